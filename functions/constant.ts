@@ -1,0 +1,76 @@
+/* eslint-disable @typescript-eslint/no-explicit-any -- the host's own type for a matrix of anything */
+import type { Answer, Datum } from '../core/answer';
+import { plainName, refused } from '../core/catalogue/find';
+import type { Substance } from '../core/substance';
+import { answer } from './edge/answer';
+import { substanceKey, textKey } from './edge/keys';
+import { onScale } from './edge/scale';
+import type { CellwiseSpec, Key, Plan } from './edge/spec';
+import type { Settings } from './settings/settings';
+
+const spec: CellwiseSpec = {
+  family: 'cellwise',
+  name: 'CONSTANT',
+  args: [
+    { name: 'substance', kind: 'key' },
+    { name: 'item', kind: 'key' },
+  ],
+  options: [],
+  plan,
+};
+
+function plan(keys: readonly Key[], settings: Settings): Plan {
+  const substance = substanceKey(keys[0]);
+  const datum = datumOf(substance, textKey('item', keys[1]));
+  const { scale, shift } = cellScale(datum, settings);
+  return {
+    compute: () => datum.value * scale + shift,
+    record: () => recordOf(datum),
+    toCell: (si) => si * scale + shift,
+    toCellDifference: (si) => si * scale,
+  };
+}
+
+/** Finds a constant by its full words; a near miss names the nearest. */
+export function datumOf(substance: Substance, item: string): Datum {
+  const found = substance.constants.find((datum) => plainName(datum.item) === plainName(item));
+  if (found !== undefined) return found;
+  throw refused('item', item, substance.constants.map((datum) => datum.item));
+}
+
+function cellScale(datum: Datum, settings: Settings): { scale: number; shift: number } {
+  if (datum.unit === 'K') return onScale(settings.units.temperature, settings);
+  if (datum.unit === 'Pa') return onScale(settings.units.pressure, settings);
+  if (datum.unit === 'kg/mol') return { scale: 1000, shift: 0 };
+  return { scale: 1, shift: 0 };
+}
+
+function recordOf(datum: Datum): Answer {
+  return {
+    value: datum.value,
+    unit: datum.unit,
+    uncertainty: datum.uncertainty,
+    method: 'published constant',
+    sources: [datum.source],
+    range: { axis: 'temperature', from: datum.value, to: datum.value },
+    marks: datum.confirmed ? [] : [{ code: 'unconfirmed', text: 'only one source stands behind this number' }],
+  };
+}
+
+/**
+ * A constant of a substance: molar mass (g/mol), melting, boiling, triple and critical temperature and pressure, and more.
+ * @customfunction CONSTANT
+ * @param substance Substance by name, formula or CAS number, as "water".
+ * @param item Full words, as "molar mass" or "critical temperature".
+ * @param [settings] Latentry_units, or text as "temperature=K".
+ * @param invocation The call itself.
+ * @returns Temperatures and pressures in the workbook's units, molar mass in g/mol, density in kg/m3.
+ */
+export function constant(
+  substance: any[][],
+  item: any[][],
+  settings?: any[][][],
+  invocation?: CustomFunctions.Invocation,
+): any[][] {
+  return answer(spec, [substance, item, settings, invocation]);
+}

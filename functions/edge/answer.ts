@@ -1,0 +1,142 @@
+import { Problem } from '../../core/problem';
+import { DEFAULT_SETTINGS, settingsFor, type Settings } from '../settings/settings';
+import { settingsStore, type StoreState } from '../settings/store';
+import { blockOf, type Block } from './block';
+import { needsBlankCheck, withBlanks } from './blanks';
+import { CellFault } from './cell';
+import { errorOf, faultOf } from './cellError';
+import { runCellwise, type Element } from './cellwise';
+import { receive, type Invocation } from './invocation';
+import type { Spec } from './spec';
+
+/** How long a formula waits for the workbook's settings to be read. */
+const LONGEST_WAIT_MS = 30_000;
+
+/** The option that every function knows. */
+const COMMON_OPTIONS: readonly string[] = ['answer'];
+
+/**
+ * The one body of every cell function: reads the arguments and the settings, computes, and maps problems to
+ * cell errors. Gives the finished table at once where it can, else a promise of it (settings still unread,
+ * or zeros to be told from blanks).
+ */
+// eslint-disable-next-line @typescript-eslint/no-explicit-any -- the host's own type for a matrix
+export function answer(spec: Spec, raw: readonly unknown[]): any {
+  const { args, invocation } = receive(raw);
+  const parts = settingsParts(args.slice(spec.args.length));
+  const state = settingsStore.current();
+  const blocks = spec.args.map((arg, i) => blockAt(arg.name, arg.optional === true, args[i], i, invocation));
+  const waits = state.state === 'unread' && !parts.some(isUnitsBlock);
+  const unsure = blocks.some((block) => block !== undefined && needsBlankCheck(block.cells, block.address));
+  if (!waits && !unsure) return finish(spec, blocks, parts, state);
+  return later(spec, blocks, parts, waits);
+}
+
+async function later(spec: Spec, blocks: readonly (Block | undefined)[], parts: readonly unknown[], waits: boolean): Promise<unknown[][]> {
+  const state = waits ? await settingsStore.whenRead(LONGEST_WAIT_MS) : settingsStore.current();
+  const read = await Promise.all(
+    blocks.map(async (block) =>
+      block !== undefined && needsBlankCheck(block.cells, block.address)
+        ? { ...block, cells: await withBlanks(block.cells, block.address) }
+        : block,
+    ),
+  );
+  return finish(spec, read, parts, state);
+}
+
+function finish(spec: Spec, blocks: readonly (Block | undefined)[], parts: readonly unknown[], state: StoreState): unknown[][] {
+  let settings: Settings | undefined;
+  try {
+    settings = settingsFor(parts, parts.some(isUnitsBlock) ? DEFAULT_SETTINGS : ambient(state), optionsOf(spec));
+    const table: Element[][] = spec.family === 'cellwise' ? runCellwise(spec, blocks, settings) : spec.run(blocks, settings);
+    return sealed(table);
+  } catch (thrown) {
+    throw errorOf(faultOf(thrown, settings));
+  }
+}
+
+const optionLists = new WeakMap<Spec, readonly string[]>();
+
+function optionsOf(spec: Spec): readonly string[] {
+  let list = optionLists.get(spec);
+  if (list === undefined) {
+    list = [...COMMON_OPTIONS, ...spec.options];
+    optionLists.set(spec, list);
+  }
+  return list;
+}
+
+/** The workbook's own settings, for formulas that do not pass the Units block. */
+function ambient(state: StoreState): Settings {
+  switch (state.state) {
+    case 'ready':
+      return state.settings;
+    case 'absent':
+      return DEFAULT_SETTINGS;
+    case 'broken':
+      throw new Problem({
+        code: 'argument',
+        argument: `the Units sheet, cell ${state.cell}`,
+        allowed: state.message,
+        received: `"${state.text}"`,
+      });
+    case 'unread':
+      throw new Problem({
+        code: 'missing',
+        subject: 'unit settings',
+        reason: 'the workbook has not been read yet; recalculate, or pass Latentry_units',
+      });
+  }
+}
+
+function isUnitsBlock(part: unknown): boolean {
+  return Array.isArray(part) && part.length > 1;
+}
+
+/** Everything after the named arguments is a settings part: repeated as a list of blocks, or bare. */
+function settingsParts(rest: readonly unknown[]): readonly unknown[] {
+  const parts: unknown[] = [];
+  for (const item of rest) {
+    if (item === null || item === undefined) continue;
+    if (Array.isArray(item) && Array.isArray(item[0]) && Array.isArray(item[0][0])) parts.push(...(item as unknown[]));
+    else parts.push(item);
+  }
+  return parts;
+}
+
+function blockAt(name: string, optional: boolean, raw: unknown, index: number, invocation: Invocation): Block | undefined {
+  const addresses = invocation.parameterAddresses;
+  const block = blockOf(name, raw, addresses?.[index] ?? undefined);
+  if (block === undefined) return undefined;
+  const only = block.rows === 1 && block.columns === 1 ? block.cells[0]?.[0] : undefined;
+  // Where addresses are told, an optional empty cell without one was skipped, not pointed at.
+  const skipped = optional && addresses !== undefined && block.address === undefined && (only === null || only === '');
+  return skipped ? undefined : block;
+}
+
+/** Blanks become "", faults the host's errors; a single fault is thrown; no NaN or Infinity leaves. */
+function sealed(table: readonly (readonly Element[])[]): unknown[][] {
+  const single = table.length === 1 && table[0]?.length === 1;
+  const out: unknown[][] = new Array<unknown[]>(table.length);
+  for (let r = 0; r < table.length; r++) {
+    const from = table[r] as readonly Element[];
+    const to: unknown[] = new Array<unknown>(from.length);
+    for (let c = 0; c < from.length; c++) {
+      const element = from[c] as Element;
+      if (typeof element === 'number') to[c] = element - element === 0 ? element : faultless(single);
+      else if (element instanceof CellFault) to[c] = single ? thrown(element) : errorOf(element);
+      else to[c] = element;
+    }
+    out[r] = to;
+  }
+  return out;
+}
+
+function thrown(fault: CellFault): never {
+  throw fault;
+}
+
+function faultless(single: boolean): Error {
+  const fault = new CellFault('#N/A', 'the equation has no finite value here');
+  return single ? thrown(fault) : errorOf(fault);
+}

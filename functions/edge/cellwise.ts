@@ -1,0 +1,219 @@
+import { Problem } from '../../core/problem';
+import { parseQuantity } from '../../core/units/parseQuantity';
+import type { QuantityKind, Unit } from '../../core/units/unit';
+import type { Settings } from '../settings/settings';
+import { isScalar, type Block } from './block';
+import { CellFault, peel, shown, type Cell } from './cell';
+import { faultOf } from './cellError';
+import { commonShape } from './broadcast';
+import { answerPart, showPart, statusOf, type AnswerPart } from './evidence';
+import type { ArgSpec, CellwiseSpec, Key, Plan } from './spec';
+import { unitFor } from './unitFor';
+
+export type Element = number | string | CellFault;
+
+/** Computes every element of the common shape of the arguments by itself. */
+export function runCellwise(spec: CellwiseSpec, blocks: readonly (Block | undefined)[], settings: Settings): Element[][] {
+  const shape = commonShape(blocks);
+  const part = answerPart(settings);
+  const readers = spec.args.map((arg, i) => new ArgReader(arg, blocks[i], settings));
+  const keyed = readers.filter((r) => r.isKey);
+  const quantities = readers.filter((r) => !r.isKey);
+  const plans = planFinder(spec, settings);
+  const only = quantities.find((r) => r.varies);
+  if (part === 'value' && keyed.every((r) => !r.varies) && quantities.every((r) => r === only || !r.varies)) {
+    return runColumn(shape, keyed, quantities, only, plans, settings);
+  }
+  const rows: Element[][] = [];
+  for (let r = 0; r < shape.rows; r++) {
+    const row: Element[] = [];
+    for (let c = 0; c < shape.columns; c++) row.push(oneElement(r, c, keyed, quantities, plans, part, settings));
+    rows.push(row);
+  }
+  return rows;
+}
+
+type PlanFinder = (keys: readonly Key[]) => Plan;
+
+/** The plan of the last keys is kept with the function: most calls repeat it. */
+const lastPlan = new WeakMap<CellwiseSpec, { keys: readonly Key[]; settings: Settings; plan: Plan }>();
+
+function planFinder(spec: CellwiseSpec, settings: Settings): PlanFinder {
+  return (keys) => {
+    const last = lastPlan.get(spec);
+    if (last !== undefined && last.settings === settings && sameKeys(last.keys, keys)) return last.plan;
+    const plan = spec.plan(keys, settings);
+    lastPlan.set(spec, { keys: [...keys], settings, plan });
+    return plan;
+  };
+}
+
+function sameKeys(a: readonly Key[], b: readonly Key[]): boolean {
+  for (let i = 0; i < b.length; i++) if (a[i] !== b[i]) return false;
+  return true;
+}
+
+/** The hot path: one plan, at most one argument that varies, nothing allocated per element. */
+function runColumn(
+  shape: { rows: number; columns: number },
+  keyed: readonly ArgReader[],
+  quantities: readonly ArgReader[],
+  only: ArgReader | undefined,
+  plans: PlanFinder,
+  settings: Settings,
+): Element[][] {
+  const keys = keyed.map((r) => r.key(0, 0));
+  for (const key of keys) if (key instanceof CellFault) return filled(shape, key);
+  const plan = plans(keys as Key[]);
+  const fixed = [NaN, NaN, NaN, NaN];
+  let slot = 0;
+  for (const [i, reader] of quantities.entries()) {
+    if (reader === only) {
+      slot = i;
+      continue;
+    }
+    const value = reader.quantity(0, 0);
+    if (typeof value !== 'number') return filled(shape, value === '' ? reader.blankFault() : value);
+    fixed[i] = value;
+  }
+  const [f0 = NaN, f1 = NaN, f2 = NaN, f3 = NaN] = fixed;
+  const rows: Element[][] = new Array<Element[]>(shape.rows);
+  for (let r = 0; r < shape.rows; r++) {
+    const row: Element[] = new Array<Element>(shape.columns);
+    for (let c = 0; c < shape.columns; c++) {
+      const x = only === undefined ? NaN : only.quantity(r, c);
+      if (typeof x !== 'number') {
+        row[c] = x;
+        continue;
+      }
+      try {
+        const value =
+          only === undefined
+            ? plan.compute(f0, f1, f2, f3)
+            : slot === 0
+              ? plan.compute(x, f1, f2, f3)
+              : slot === 1
+                ? plan.compute(f0, x, f2, f3)
+                : slot === 2
+                  ? plan.compute(f0, f1, x, f3)
+                  : plan.compute(f0, f1, f2, x);
+        row[c] = value;
+      } catch (thrown) {
+        row[c] = faultOf(thrown, settings);
+      }
+    }
+    rows[r] = row;
+  }
+  return rows;
+}
+
+function filled(shape: { rows: number; columns: number }, element: Element): Element[][] {
+  return Array.from({ length: shape.rows }, () => new Array<Element>(shape.columns).fill(element));
+}
+
+function oneElement(
+  r: number,
+  c: number,
+  keyed: readonly ArgReader[],
+  quantities: readonly ArgReader[],
+  plans: PlanFinder,
+  part: AnswerPart,
+  settings: Settings,
+): Element {
+  const keys: Key[] = [];
+  for (const reader of keyed) {
+    const key = reader.key(r, c);
+    if (key instanceof CellFault) return part === 'status' ? statusOf(key) : key;
+    if (key === '') return '';
+    keys.push(key);
+  }
+  const numbers: number[] = [];
+  for (const reader of quantities) {
+    const value = reader.quantity(r, c);
+    if (value instanceof CellFault) return part === 'status' ? statusOf(value) : value;
+    if (value === '') return '';
+    numbers.push(value);
+  }
+  try {
+    const plan = plans(keys);
+    if (part !== 'value') return showPart(part, plan, numbers, settings);
+    const [a = NaN, b = NaN, x = NaN, d = NaN] = numbers;
+    return plan.compute(a, b, x, d);
+  } catch (thrown) {
+    const fault = faultOf(thrown, settings);
+    return part === 'status' ? statusOf(fault) : fault;
+  }
+}
+
+/** Reads the elements of one argument: numbers in the workbook's units or texts with their own become SI. */
+class ArgReader {
+  readonly isKey: boolean;
+  /** True for a range: a blank in it gives a blank; a blank single cell is refused. */
+  readonly varies: boolean;
+  private readonly unit: Unit | undefined;
+  private readonly factor: number;
+  private readonly offset: number;
+  private readonly wideRows: boolean;
+  private readonly wideColumns: boolean;
+
+  constructor(
+    private readonly arg: ArgSpec,
+    private readonly block: Block | undefined,
+    private readonly settings: Settings,
+  ) {
+    this.isKey = arg.kind === 'key';
+    this.varies = block !== undefined && !isScalar(block);
+    this.wideRows = block !== undefined && block.rows > 1;
+    this.wideColumns = block !== undefined && block.columns > 1;
+    this.unit = arg.kind === 'key' || arg.kind === 'block' || arg.kind === 'number' ? undefined : unitFor(arg.kind, settings);
+    this.factor = this.unit?.factor ?? 1;
+    this.offset = (this.unit?.offset ?? 0) + (this.unit?.gauge === true ? settings.barometerPa : 0);
+    if (block === undefined && arg.optional !== true) {
+      throw new Problem({ code: 'argument', argument: arg.name, allowed: 'a value: it is required', received: 'nothing' });
+    }
+  }
+
+  private raw(r: number, c: number): unknown {
+    return this.block?.cells[this.wideRows ? r : 0]?.[this.wideColumns ? c : 0];
+  }
+
+  blankFault(): CellFault {
+    return faultOf(new Problem({ code: 'argument', argument: this.arg.name, allowed: 'a value', received: 'a blank cell' }));
+  }
+
+  /** A key; `""` for a blank inside a range. */
+  key(r: number, c: number): Key | CellFault {
+    if (this.block === undefined) return undefined;
+    const cell = peel(this.raw(r, c));
+    if (cell === null) return this.varies ? '' : this.blankFault();
+    if (typeof cell === 'boolean') return this.refused(cell);
+    return cell;
+  }
+
+  /** A quantity in SI, NaN when left out, `""` for a blank inside a range. */
+  quantity(r: number, c: number): number | '' | CellFault {
+    if (this.block === undefined) return NaN;
+    const raw = this.raw(r, c);
+    if (typeof raw === 'number' && raw - raw === 0) return raw * this.factor + this.offset;
+    const cell = peel(raw);
+    if (cell === null) return this.varies ? '' : this.blankFault();
+    if (cell instanceof CellFault) return cell;
+    if (typeof cell !== 'string' || this.unit === undefined) return this.refused(cell);
+    try {
+      return parseQuantity(cell, this.arg.kind as QuantityKind, this.settings).si;
+    } catch (thrown) {
+      return faultOf(renamed(thrown, this.arg.name), this.settings);
+    }
+  }
+
+  private refused(cell: Cell): CellFault {
+    const allowed = this.isKey ? 'a text' : this.unit === undefined ? 'a number' : `a number (${this.unit.symbol}) or a text with its unit`;
+    return faultOf(new Problem({ code: 'argument', argument: this.arg.name, allowed, received: shown(cell) }));
+  }
+}
+
+/** Gives a problem of a quantity's text the name of the argument it came in. */
+function renamed(thrown: unknown, argument: string): unknown {
+  if (!(thrown instanceof Problem) || thrown.data.code !== 'argument') return thrown;
+  return new Problem({ ...thrown.data, argument });
+}

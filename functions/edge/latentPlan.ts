@@ -1,0 +1,33 @@
+import { Problem } from '../../core/problem';
+import type { Settings } from '../settings/settings';
+import { curvePlan } from './curvePlan';
+import { changeKey, kindOption, pressureOption, substanceKey } from './keys';
+import { perAmount, signed } from './scale';
+import type { Key, Plan } from './spec';
+
+/** The plan that LATENT and DELTACP share: a curve of one kind, with the transition temperature as default. */
+export function latentPlan(quantity: 'latent' | 'latentSlope', keys: readonly Key[], settings: Settings): Plan {
+  const substance = substanceKey(keys[0]);
+  const { change, sign } = changeKey(substance, keys[1]);
+  const kind = kindOption(settings, substance.defaultKind(change));
+  const curve = substance[quantity](change, kind, pressureOption(settings, kind));
+  const unit = settings.units[quantity === 'latent' ? 'heat' : 'heatCapacity'];
+  const plan = curvePlan(curve, signed(perAmount(unit, substance.molarMass), sign), settings, 'temperature');
+  const fallback = substance.transitionTemperature(change);
+  const at = (x: number): number => {
+    if (x === x) return x;
+    if (fallback !== undefined) return fallback;
+    throw new Problem({
+      code: 'argument',
+      argument: 'temperature',
+      allowed: `a temperature: ${change} has no temperature of its own`,
+      received: 'nothing',
+    });
+  };
+  const { compute, record } = plan;
+  return {
+    ...plan,
+    compute: (x, b, c, d) => compute(at(x), b, c, d),
+    ...(record === undefined ? {} : { record: (x, b, c, d) => record(at(x), b, c, d) }),
+  };
+}
