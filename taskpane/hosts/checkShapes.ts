@@ -21,7 +21,11 @@ export function checkShapes(
     if (change.kind === 'sheet') {
       if (SHEET_NAME.test(change.name)) known.add(change.name.toLowerCase());
       else
-        add('bad reference', { sheet: change.name, address: 'A1' }, `sheet name not allowed: received "${change.name}"`);
+        add(
+          'bad reference',
+          { sheet: change.name, address: 'A1' },
+          `sheet name not allowed: received "${change.name}"`,
+        );
       continue;
     }
     const { ref } = change;
