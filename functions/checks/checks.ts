@@ -22,18 +22,6 @@ const functions: Readonly<Record<string, (...args: never[]) => unknown[][]>> = {
   TOUNITS: toUnits,
 };
 
-/** How many positional arguments come before the settings. */
-const POSITIONS: Readonly<Record<string, number>> = {
-  LATENT: 3,
-  DELTACP: 3,
-  HEATCAP: 5,
-  SATPRESSURE: 2,
-  HEAT: 4,
-  KIRCHHOFF: 7,
-  FITDELTACP: 4,
-  TOUNITS: 4,
-};
-
 /** Every check with the call that computes it. */
 export const checks: readonly { readonly check: Check; readonly run: () => number }[] = [
   ...waterChecks,
@@ -43,10 +31,10 @@ export const checks: readonly { readonly check: Check; readonly run: () => numbe
 
 function compute(check: Check): number {
   const fn = functions[check.call];
-  const positions = POSITIONS[check.call];
-  if (fn === undefined || positions === undefined) throw new Error(`no such function: ${check.call}`);
+  if (fn === undefined) throw new Error(`no such function: ${check.call}`);
   const args: unknown[] = check.args.map((arg) => (typeof arg === 'object' ? arg.values.map((x) => [x]) : [[arg]]));
-  while (args.length < positions) args.push(undefined);
+  // Every cell function ends with the settings and the invocation.
+  while (args.length < fn.length - 2) args.push(undefined);
   const table = fn(...([...args, [[[check.settings]]]] as never[]));
   const { pick } = check;
   const value = pick === undefined ? table[0]?.[0] : table.find((row) => row[0] === pick.label)?.[pick.column];
