@@ -16,13 +16,26 @@ export type QuantityKind =
   | 'time'
   | 'share'; // 1, %
 
+/** Further kinds that a unit can measure: conversions take them, cells of other functions do not. */
+export type UnitKind =
+  | QuantityKind
+  | 'area'
+  | 'density'
+  | 'specificVolume'
+  | 'bodyHeatCapacity' // J/K
+  | 'heatFlux' // W/m2
+  | 'heatTransfer' // W/(m2 K)
+  | 'heatingRate' // K/s
+  | 'specificPower' // W/kg
+  | 'force';
+
 export type Basis = 'mass' | 'mole' | null;
 
 /** SI value = factor · x + offset. The offset is non-zero only for temperature scales and gauge pressures. */
 export interface Unit {
   /** The one spelling this project writes: `kJ/kg`, `degC`, `kPa`, `kPa gauge`. */
   readonly symbol: string;
-  readonly kind: QuantityKind;
+  readonly kind: UnitKind;
   readonly factor: number;
   readonly offset: number;
   /** Which amount the unit is per (or of), for heat, heat capacity, amount and flow. */
