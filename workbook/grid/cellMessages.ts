@@ -1,4 +1,4 @@
-import type { CallPlace, Report } from './adapter';
+import type { CallPlace, Report } from './callPlace';
 import type { CallFault } from './results';
 
 interface Spoken {

@@ -1,0 +1,73 @@
+import type { ArrayValueObject, BaseValueObject } from '@univerjs/engine-formula';
+import { cellAddress, rangeAddress } from './a1';
+import { excelArguments } from './arguments';
+import type { CallPlace } from './callPlace';
+import type { CellFunction } from './customFunctions';
+import { cellName, type FunctionEntry } from './functionList';
+import { Refusal } from './refusal';
+
+/** One call of a cell function, ready to be made. */
+export interface PreparedCall {
+  readonly args: readonly unknown[];
+  readonly invocation: Readonly<Record<string, unknown>>;
+}
+
+/**
+ * Makes arguments and invocation as Excel would hand them over; throws a refusal with words where their number is wrong.
+ */
+export function prepareCall(
+  entry: FunctionEntry,
+  variants: readonly BaseValueObject[],
+  place: CallPlace,
+  sheetNames: Readonly<Record<string, string>>,
+): PreparedCall {
+  checkCount(entry, variants.length);
+  const invocation: Record<string, unknown> = { functionName: entry.id };
+  if (entry.options?.requiresAddress === true) {
+    const sheetName = sheetNames[place.sheetId];
+    if (sheetName !== undefined) invocation['address'] = cellAddress(sheetName, place.row, place.column);
+  }
+  if (entry.options?.requiresParameterAddresses === true) {
+    invocation['parameterAddresses'] = variants.map((variant) => addressOf(variant, sheetNames));
+  }
+  return { args: excelArguments(entry, variants), invocation };
+}
+
+/** Calls the associated function. */
+export function makeCall(
+  entry: FunctionEntry,
+  mappings: ReadonlyMap<string, CellFunction>,
+  call: PreparedCall,
+): unknown {
+  const implementation = mappings.get(entry.id);
+  if (implementation === undefined) {
+    throw new Refusal('#NAME?', `${cellName(entry)} is listed but not in the functions bundle`);
+  }
+  return implementation(...call.args, call.invocation);
+}
+
+function checkCount(entry: FunctionEntry, received: number): void {
+  const { parameters } = entry;
+  const least = parameters.filter((parameter) => parameter.optional !== true && parameter.repeating !== true).length;
+  const most = parameters.at(-1)?.repeating === true ? Infinity : parameters.length;
+  if (received >= least && received <= most) return;
+  const names = parameters
+    .map((parameter) => (parameter.optional === true ? `[${parameter.name}]` : parameter.name))
+    .join(', ');
+  throw new Refusal('#VALUE!', `number of arguments: allowed ${cellName(entry)}(${names}); received ${received}`);
+}
+
+/** Where a range argument lies, `Sheet!A1:B2`; null for what is no reference. */
+function addressOf(variant: BaseValueObject, sheetNames: Readonly<Record<string, string>>): string | null {
+  if (!variant.isArray()) return null;
+  const array = variant as ArrayValueObject;
+  const sheetName = sheetNames[array.getSheetId()];
+  if (sheetName === undefined || array.getCurrentRow() < 0) return null;
+  return rangeAddress(
+    sheetName,
+    array.getCurrentRow(),
+    array.getCurrentColumn(),
+    array.getRowCount(),
+    array.getColumnCount(),
+  );
+}
