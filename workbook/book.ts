@@ -15,6 +15,8 @@ export interface Book {
 
 export interface BookSheet {
   readonly name: string;
+  /** Its part in the file that it came from; whoever edits a sheet keeps it, so that a renamed sheet is still known. */
+  readonly id?: string;
   /** Keyed by A1 address without `$`: `B5`. An address that is absent is an empty, unstyled cell. */
   readonly cells: Readonly<Record<string, BookCell>>;
   /** In characters of the standard font, keyed by column letters. */
@@ -37,8 +39,8 @@ export interface BookCell {
   /** As a person types it, with its `=`: `=LATENTRY.LATENT("water","vaporization",A5:A25,Latentry_units)`. */
   readonly formula?: string;
   /**
-   * For a formula that spills: the range it fills, `B5:B25`, its own address while the extent is not yet known.
-   * The other cells of the range hold kept values and no formula; see `spilledCells`.
+   * For a formula that spills: the range it fills, `B5:B25`; absent while that is not known, and where it fills its own
+   * cell only. The other cells of the range hold kept values and no formula; see `spilledCells`.
    */
   readonly spill?: string;
   /** For an array formula of the older, fixed kind: the range it fills. */

@@ -1,0 +1,20 @@
+const table = new Uint32Array(256);
+for (let n = 0; n < 256; n++) {
+  let c = n;
+  for (let k = 0; k < 8; k++) c = c & 1 ? 0xedb88320 ^ (c >>> 1) : c >>> 1;
+  table[n] = c;
+}
+
+/**
+ * The check sum of zip packages: CRC-32 of ISO 3309, polynomial 0xEDB88320 reflected.
+ *
+ * @param bytes - the data
+ * @returns an unsigned 32-bit integer
+ * @example
+ * crc32(new TextEncoder().encode('123456789')) // => 0xcbf43926
+ */
+export function crc32(bytes: Uint8Array): number {
+  let crc = 0xffffffff;
+  for (const byte of bytes) crc = (table[(crc ^ byte) & 0xff] ?? 0) ^ (crc >>> 8);
+  return (crc ^ 0xffffffff) >>> 0;
+}
