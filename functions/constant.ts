@@ -22,11 +22,11 @@ const spec: CellwiseSpec = {
 function plan(keys: readonly Key[], settings: Settings): Plan {
   const substance = substanceKey(keys[0]);
   const datum = datumOf(substance, textKey('item', keys[1]));
-  const { scale, shift } = cellScale(datum, settings);
+  const { scale, offset } = cellScale(datum, settings);
   return {
-    compute: () => datum.value * scale + shift,
+    compute: () => datum.value * scale + offset,
     record: () => recordOf(datum),
-    toCell: (si) => si * scale + shift,
+    toCell: (si) => si * scale + offset,
     toCellDifference: (si) => si * scale,
   };
 }
@@ -38,11 +38,11 @@ export function datumOf(substance: Substance, item: string): Datum {
   throw refused('item', item, substance.constants.map((datum) => datum.item));
 }
 
-function cellScale(datum: Datum, settings: Settings): { scale: number; shift: number } {
+function cellScale(datum: Datum, settings: Settings): { scale: number; offset: number } {
   if (datum.unit === 'K') return onScale(settings.units.temperature, settings);
   if (datum.unit === 'Pa') return onScale(settings.units.pressure, settings);
-  if (datum.unit === 'kg/mol') return { scale: 1000, shift: 0 };
-  return { scale: 1, shift: 0 };
+  if (datum.unit === 'kg/mol') return { scale: 1000, offset: 0 };
+  return { scale: 1, offset: 0 };
 }
 
 function recordOf(datum: Datum): Answer {

@@ -5,10 +5,10 @@ import { meanOver } from '../core/meanOver';
 import { Problem } from '../core/problem';
 import { answer } from './edge/answer';
 import { phaseKey, substanceKey, wordOption } from './edge/keys';
-import { perAmount } from './edge/scale';
 import type { CellwiseSpec, Key, Plan } from './edge/spec';
 import type { Settings } from './settings/settings';
 import type { Curve } from '../core/substance';
+import { fromMolar } from '../core/units/fromMolar';
 
 const STANDARD_ATMOSPHERE_PA = 101325;
 
@@ -47,7 +47,7 @@ function plan(keys: readonly Key[], settings: Settings): Plan {
     }
     return last.curve;
   };
-  const { scale } = perAmount(settings.units.heatCapacity, substance.molarMass);
+  const { scale } = fromMolar(settings.units.heatCapacity, substance.molarMass);
   const value = (temperatureK: number, pressurePa: number, meanToK: number): number => {
     const curve = curveAt(pressurePa);
     return meanToK === meanToK

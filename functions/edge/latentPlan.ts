@@ -1,8 +1,9 @@
 import { Problem } from '../../core/problem';
+import { fromMolar } from '../../core/units/fromMolar';
 import type { Settings } from '../settings/settings';
 import { curvePlan } from './curvePlan';
 import { changeKey, kindOption, pressureOption, substanceKey } from './keys';
-import { perAmount, signed } from './scale';
+import { signed } from './scale';
 import type { Key, Plan } from './spec';
 
 /** The plan that LATENT and DELTACP share: a curve of one kind, with the transition temperature as default. */
@@ -12,7 +13,7 @@ export function latentPlan(quantity: 'latent' | 'latentSlope', keys: readonly Ke
   const kind = kindOption(settings, substance.defaultKind(change));
   const curve = substance[quantity](change, kind, pressureOption(settings, kind));
   const unit = settings.units[quantity === 'latent' ? 'heat' : 'heatCapacity'];
-  const plan = curvePlan(curve, signed(perAmount(unit, substance.molarMass), sign), settings, 'temperature');
+  const plan = curvePlan(curve, signed(fromMolar(unit, substance.molarMass), sign), settings, 'temperature');
   const fallback = substance.transitionTemperature(change);
   const at = (x: number): number => {
     if (x === x) return x;

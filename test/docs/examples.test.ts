@@ -23,6 +23,9 @@ function examples(text: string): string[] {
   });
 }
 
+/** Names that the library exports: an example without an import line uses these. */
+const exported = Object.keys(await import('../../core/index'));
+
 interface Claim {
   readonly shown: string;
   readonly value: unknown;
@@ -31,7 +34,9 @@ interface Claim {
 
 /** Runs an example with every `expression // => value` line turned into a claim. */
 function run(example: string): Claim[] {
-  const imports = example.split('\n').filter((line) => /^import .* from 'latentry';\s*$/.test(line));
+  const written = example.split('\n').filter((line) => /^import .* from 'latentry';\s*$/.test(line));
+  const named = exported.filter((name) => new RegExp(`\\b${name}\\b`).test(example));
+  const imports = written.length > 0 ? written : [`import { ${named.join(', ')} } from 'latentry';`];
   const body = example.split('\n').filter((line) => !imports.includes(line));
   const code = body
     .map((line) => {
