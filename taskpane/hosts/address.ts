@@ -59,9 +59,12 @@ export function formatArea({ top, left, rows, columns }: Area): string {
   return `${first}:${columnLetters(left + columns - 1)}${String(top + rows)}`;
 }
 
-/** Reads `'My sheet'!$B$2:$D$9`, with or without the equals sign of a name's formula. */
+/**
+ * Reads `'My sheet'!$B$2:$D$9`, with or without the equals sign of a name's formula.
+ * Null for anything else: broken references, other workbooks, several areas.
+ */
 export function parseReference(text: string): Ref | null {
-  const match = /^=?(?:'((?:[^']|'')+)'|([^'!]+))!([^!]+)$/.exec(text.trim());
+  const match = /^=?(?:'((?:[^'[\]]|'')+)'|([^'!#[\]]+))!([^!]+)$/.exec(text.trim());
   if (match === null) return null;
   const area = parseArea(match[3] ?? '');
   if (area === null) return null;

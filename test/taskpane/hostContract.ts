@@ -286,12 +286,13 @@ export function describeHostContract(name: string, makeHost: () => Promise<HostH
       const activations: HostEvent[] = [];
       host.on('select', (event) => selections.push(event.ref));
       host.on('activated', (event) => activations.push(event));
-      await harness.select(data('B2'));
-      await vi.waitFor(() => {
+      // A host may begin to listen a moment after `on` returns.
+      await vi.waitFor(async () => {
+        await harness.select(data('B2'));
         expect(selections).toContainEqual(data('B2'));
       });
-      await harness.activate('My notes');
-      await vi.waitFor(() => {
+      await vi.waitFor(async () => {
+        await harness.activate('My notes');
         expect(activations.length).toBeGreaterThan(0);
       });
     });
