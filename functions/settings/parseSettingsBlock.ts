@@ -1,0 +1,36 @@
+import { Problem } from '../../core/problem';
+import { settingCell } from './settingCell';
+import { withEntries, type Entry } from './settingsDraft';
+import type { Settings } from './settingsType';
+
+/**
+ * Reads a block of two columns, label and value, onto other settings. Rows that are blank don't count.
+ *
+ * @param values rows of the block as the host gives them
+ * @param base settings that hold where the block has no row
+ * @param allowedOptions option keys that are known here beside the unit settings
+ * @throws Problem `argument`, naming the row, for a label that is unknown or there twice, and for a value that is
+ * missing or can't be read
+ * @example
+ * parseSettingsBlock([['Temperature', 'K']], DEFAULT_SETTINGS).units.temperature.symbol // => 'K'
+ */
+export function parseSettingsBlock(
+  values: readonly (readonly unknown[])[],
+  base: Settings,
+  allowedOptions: readonly string[] = [],
+): Settings {
+  const entries: Entry[] = [];
+  values.forEach((row, index) => {
+    if (row.length !== 2) throw refused(index, 'two columns, label and value', `${row.length} columns`);
+    const [key, value] = [settingCell(row[0]), settingCell(row[1])];
+    // A host may hand over a blank cell as 0.
+    if ((key === '' || key === '0') && (value === '' || value === '0')) return;
+    if (key === '' || key === '0') throw refused(index, `a label beside "${value}"`, 'a blank');
+    entries.push({ key, value: value === '0' ? '' : value, where: `Units row ${index + 1} (${key})` });
+  });
+  return entries.length === 0 ? base : withEntries(base, entries, allowedOptions);
+}
+
+function refused(index: number, allowed: string, received: string): Problem {
+  return new Problem({ code: 'argument', argument: `Units row ${index + 1}`, allowed, received });
+}

@@ -1,0 +1,95 @@
+import { Problem } from '../../core/problem';
+import { parseSettingsBlock } from './parseSettingsBlock';
+import { parseSettingsText } from './parseSettingsText';
+import type { Settings } from './settingsType';
+
+type Rows = readonly (readonly unknown[])[];
+
+interface Remembered {
+  readonly base: Settings;
+  /** Copies of the parts, since a host may fill the same arrays anew. */
+  readonly parts: readonly unknown[];
+  readonly settings: Settings;
+}
+
+/** How many different sets of settings arguments are remembered for each list of options. */
+const LONGEST_MEMORY = 12;
+const memory = new WeakMap<readonly string[], Remembered[]>();
+
+/**
+ * The settings of one call: every settings argument put onto `base`, from left to right. What the same list of options
+ * met before is remembered, compared cell by cell, so that thousands of calls with the same arguments read them once
+ * and get the same object.
+ *
+ * @param parts settings arguments: texts, blocks of one column (settings texts), blocks of two (label and value); blanks
+ * don't count
+ * @param base settings that hold where the arguments are silent
+ * @param allowedOptions option keys of the function; the same array at each call
+ * @throws Problem `argument` as `parseSettingsText` and `parseSettingsBlock` do
+ */
+export function settingsFor(parts: readonly unknown[], base: Settings, allowedOptions: readonly string[]): Settings {
+  if (parts.length === 0) return base;
+  let met = memory.get(allowedOptions);
+  if (met === undefined) memory.set(allowedOptions, (met = []));
+  for (let i = 0; i < met.length; i++) {
+    const one = met[i] as Remembered;
+    if (one.base !== base || !sameParts(one.parts, parts)) continue;
+    if (i > 0) {
+      met[i] = met[i - 1] as Remembered;
+      met[i - 1] = one;
+    }
+    return one.settings;
+  }
+  const settings = parts.reduce<Settings>((onto, part) => withPart(onto, part, allowedOptions), base);
+  if (met.length >= LONGEST_MEMORY) met.pop();
+  met.unshift({ base, parts: parts.map(copied), settings });
+  return settings;
+}
+
+function withPart(base: Settings, part: unknown, allowedOptions: readonly string[]): Settings {
+  if (part === null || part === undefined || part === '' || part === 0) return base;
+  if (typeof part === 'string') return parseSettingsText(part, base, allowedOptions);
+  if (!isRows(part)) throw refused(typeof part === 'object' ? 'something else' : String(part));
+  if (part.every((row) => row.length === 1)) {
+    return part.reduce<Settings>((onto, [cell]) => withPart(onto, cell, allowedOptions), base);
+  }
+  return parseSettingsBlock(part, base, allowedOptions);
+}
+
+function isRows(part: unknown): part is Rows {
+  return Array.isArray(part) && part.every(Array.isArray);
+}
+
+function refused(received: string): Problem {
+  return new Problem({
+    code: 'argument',
+    argument: 'settings',
+    allowed: 'Latentry_units, or a text as "temperature=K; heat=kJ/mol"',
+    received,
+  });
+}
+
+function copied(part: unknown): unknown {
+  return Array.isArray(part) ? part.map((row: unknown) => (Array.isArray(row) ? [...(row as unknown[])] : row)) : part;
+}
+
+function sameParts(a: readonly unknown[], b: readonly unknown[]): boolean {
+  if (a.length !== b.length) return false;
+  for (let i = 0; i < a.length; i++) if (!samePart(a[i], b[i])) return false;
+  return true;
+}
+
+function samePart(a: unknown, b: unknown): boolean {
+  if (!Array.isArray(a) || !Array.isArray(b)) return a === b;
+  if (a.length !== b.length) return false;
+  for (let r = 0; r < a.length; r++) {
+    const [x, y] = [a[r] as unknown, b[r] as unknown];
+    if (!Array.isArray(x) || !Array.isArray(y)) {
+      if (x !== y) return false;
+      continue;
+    }
+    if (x.length !== y.length) return false;
+    for (let c = 0; c < x.length; c++) if (x[c] !== y[c]) return false;
+  }
+  return true;
+}
