@@ -198,6 +198,7 @@ class ArgReader {
     const cell = peel(raw);
     if (cell === null) return this.varies ? '' : this.blankFault();
     if (cell instanceof CellFault) return cell;
+    if (typeof cell === 'number') return cell * this.factor + this.offset;
     if (typeof cell !== 'string' || this.unit === undefined) return this.refused(cell);
     try {
       return parseQuantity(cell, this.arg.kind as QuantityKind, this.settings).si;

@@ -80,16 +80,8 @@ function sameParts(a: readonly unknown[], b: readonly unknown[]): boolean {
 }
 
 function samePart(a: unknown, b: unknown): boolean {
-  if (!Array.isArray(a) || !Array.isArray(b)) return a === b;
-  if (a.length !== b.length) return false;
-  for (let r = 0; r < a.length; r++) {
-    const [x, y] = [a[r] as unknown, b[r] as unknown];
-    if (!Array.isArray(x) || !Array.isArray(y)) {
-      if (x !== y) return false;
-      continue;
-    }
-    if (x.length !== y.length) return false;
-    for (let c = 0; c < x.length; c++) if (x[c] !== y[c]) return false;
-  }
+  if (a === b && !Array.isArray(a)) return true;
+  if (!Array.isArray(a) || !Array.isArray(b) || a.length !== b.length) return false;
+  for (let i = 0; i < a.length; i++) if (!samePart(a[i], b[i])) return false;
   return true;
 }
