@@ -1,5 +1,6 @@
 import { Problem } from '../../core/problem';
 import { DEFAULT_SETTINGS, settingsFor, type Settings } from '../settings/settings';
+import { plainKey, SETTINGS } from '../settings/schema';
 import { settingsStore, type StoreState } from '../settings/store';
 import { blockOf, type Block } from './block';
 import { needsBlankCheck, withBlanks } from './blanks';
@@ -23,10 +24,10 @@ const COMMON_OPTIONS: readonly string[] = ['answer'];
 // eslint-disable-next-line @typescript-eslint/no-explicit-any -- the host's own type for a matrix
 export function answer(spec: Spec, raw: readonly unknown[]): any {
   const { args, invocation } = receive(raw);
-  const parts = settingsParts(args.slice(spec.args.length));
+  const { positional, parts } = takeSettings(spec, args);
   const state = settingsStore.current();
-  const blocks = spec.args.map((arg, i) => blockAt(arg.name, arg.optional === true, args[i], i, invocation));
-  const waits = state.state === 'unread' && !parts.some(isUnitsBlock);
+  const blocks = spec.args.map((arg, i) => blockAt(arg.name, arg.optional === true, positional[i], i, invocation));
+  const waits = state.state === 'unread' && !parts.some(isWholeBlock);
   const unsure = blocks.some((block) => block !== undefined && needsBlankCheck(block.cells, block.address));
   if (!waits && !unsure) return finish(spec, blocks, parts, state);
   return later(spec, blocks, parts, waits);
@@ -47,7 +48,7 @@ async function later(spec: Spec, blocks: readonly (Block | undefined)[], parts: 
 function finish(spec: Spec, blocks: readonly (Block | undefined)[], parts: readonly unknown[], state: StoreState): unknown[][] {
   let settings: Settings | undefined;
   try {
-    settings = settingsFor(parts, parts.some(isUnitsBlock) ? DEFAULT_SETTINGS : ambient(state), optionsOf(spec));
+    settings = settingsFor(parts, parts.some(isWholeBlock) ? DEFAULT_SETTINGS : ambient(state), optionsOf(spec));
     const table: Element[][] = spec.family === 'cellwise' ? runCellwise(spec, blocks, settings) : spec.run(blocks, settings);
     return sealed(table);
   } catch (thrown) {
@@ -89,8 +90,38 @@ function ambient(state: StoreState): Settings {
   }
 }
 
+/** A block with a row for every setting stands by itself; a smaller one is put onto the workbook's own settings. */
+function isWholeBlock(part: unknown): boolean {
+  return Array.isArray(part) && part.length >= SETTINGS.length && Array.isArray(part[0]) && part[0].length > 1;
+}
+
 function isUnitsBlock(part: unknown): boolean {
-  return Array.isArray(part) && part.length > 1;
+  return Array.isArray(part) && Array.isArray(part[0]) && part[0].length > 1 && LABELS.has(plainKey(String(part[0][0])));
+}
+
+const LABELS: ReadonlySet<string> = new Set(SETTINGS.flatMap((row) => [plainKey(row.label), plainKey(row.key)]));
+
+/** A settings text has an equals sign, which no quantity has. */
+function isSettingsText(part: unknown): boolean {
+  return Array.isArray(part) && part.length === 1 && Array.isArray(part[0]) && typeof part[0][0] === 'string' && part[0][0].includes('=');
+}
+
+/**
+ * Settings may stand in the place of an optional quantity that is left out: `LATENT("water","fusion",Latentry_units)`.
+ * A Units block and a settings text cannot be mistaken for a quantity.
+ */
+function takeSettings(spec: Spec, args: readonly unknown[]): { positional: readonly unknown[]; parts: readonly unknown[] } {
+  const count = spec.args.length;
+  let positional: unknown[] | undefined;
+  const early: unknown[] = [];
+  for (let i = 0; i < count && i < args.length; i++) {
+    if (spec.args[i]?.optional !== true || !(isSettingsText(args[i]) || isUnitsBlock(args[i]))) continue;
+    positional ??= [...args];
+    positional[i] = undefined;
+    early.push(args[i]);
+  }
+  const rest = settingsParts(args.slice(count));
+  return { positional: positional ?? args, parts: early.length === 0 ? rest : [...early, ...rest] };
 }
 
 /** Everything after the named arguments is a settings part: repeated as a list of blocks, or bare. */

@@ -80,8 +80,23 @@ function sameParts(a: readonly unknown[], b: readonly unknown[]): boolean {
 }
 
 function samePart(a: unknown, b: unknown): boolean {
-  if (a === b && !Array.isArray(a)) return true;
-  if (!Array.isArray(a) || !Array.isArray(b) || a.length !== b.length) return false;
-  for (let i = 0; i < a.length; i++) if (!samePart(a[i], b[i])) return false;
+  return Array.isArray(a) && Array.isArray(b) ? sameRows(a as unknown[][], b as unknown[][]) : a === b;
+}
+
+/** Rows may still turn out to be no arrays: then they are compared as they are. */
+function sameRows(a: readonly (readonly unknown[])[], b: readonly (readonly unknown[])[]): boolean {
+  const rows = a.length;
+  if (b.length !== rows) return false;
+  for (let r = 0; r < rows; r++) {
+    const x = a[r];
+    const y = b[r];
+    if (!Array.isArray(x) || !Array.isArray(y)) {
+      if (x !== y) return false;
+      continue;
+    }
+    const columns = x.length;
+    if (y.length !== columns) return false;
+    for (let c = 0; c < columns; c++) if (x[c] !== y[c]) return false;
+  }
   return true;
 }

@@ -140,11 +140,22 @@ describe('settings', () => {
     at60(cellOf(await pending));
   });
 
+  it('takes settings in the place of an optional quantity that is left out', () => {
+    const atMelting = 333.4265169; // kJ/kg, IAPWS R6-95 with R10-06 at 101.325 kPa
+    for (const settings of ['heat=kJ/kg', UNITS]) {
+      const value = cellOf(call(latent, ['water', 'fusion', settings])) as number;
+      expect(Math.abs(value - atMelting)).toBeLessThanOrEqual(5e-8); // half of the last published digit
+    }
+    expect(faultOf(() => call(latent, ['water', 'vaporization', 'heat=kJ/kg'])).message).toMatch(/temperature: allowed a temperature/);
+  });
+
   it('never replaces a damaged setting by a default', () => {
     settingsStore.publish({ state: 'broken', cell: 'Units!B2', text: 'degX', message: 'degC, K, degF or degR' });
     expect(faultOf(() => call(latent, ['water', 'vaporization', 60])).message).toMatch(/Units!B2.*degX/);
     at60(cellOf(call(latent, ['water', 'vaporization', 60], [UNITS])));
     expect(faultOf(() => call(latent, ['water', 'vaporization', 60], [withUnits('Temperature', 'degX')])).message).toMatch(/degX/);
+    // A block that lost a row falls back on the workbook's settings, not on a default.
+    expect(faultOf(() => call(latent, ['water', 'vaporization', 60], [UNITS.slice(1)])).message).toMatch(/degX/);
   });
 
   it('extends out of range only when told, and says so', () => {
