@@ -60,8 +60,8 @@ function branchCurve(branch: PhaseBranch, subject: string, answered: 'enthalpy' 
     unit: answered === 'enthalpy' ? 'J/mol' : 'J/(mol K)',
     method: branch.method,
     sources: branch.sources,
-    perKilogram: branch[answered],
-    marksAt: branch.marks,
+    perKilogram: (t) => branch[answered](t),
+    marksAt: (t) => branch.marks(t),
   });
 }
 
