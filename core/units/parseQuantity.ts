@@ -1,4 +1,5 @@
 import { Problem } from '../problem';
+import { likelyOf } from './asKind';
 import { kindExamples, kindWords } from './kindWords';
 import { parseNumber, type Decimal } from './parseNumber';
 import { plainText } from './plainText';
@@ -61,9 +62,10 @@ function unitIn(rest: string, text: string, kind: UnitKind, argument: string): U
     throw refused(argument, text, expected(kind));
   }
   const read = readUnit(rest);
-  if (read.unit === undefined && read.likely !== undefined) {
+  const likely = likelyOf(read, kind);
+  if (likely.length > 0) {
     const number = plainText(text).slice(0, -rest.length);
-    throw refused(argument, text, read.likely.map((unit) => `${number}${unit}`).join(' or '));
+    throw refused(argument, text, likely.map((unit) => `${number}${unit}`).join(' or '));
   }
   return unitOf(rest, kind, argument);
 }

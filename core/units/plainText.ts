@@ -19,7 +19,7 @@ export function plainText(text: string): string {
     .replace(/[\s\u200b\u2060\ufeff]+/g, ' ')
     .replace(/℃/g, 'degC')
     .replace(/℉/g, 'degF')
-    .replace(/[°º˚]\s*/g, 'deg')
+    .replace(/[°º˚] ?(?=[CFRKcfrk](?![A-Za-z]))/g, 'deg')
     .replace(/\u212a/g, 'K')
     .replace(/\u2206/g, 'Δ')
     .replace(/[\u00b5\u03bc]/g, 'u')

@@ -8,7 +8,7 @@ export interface Term {
 
 /** A product of named units, or why a text is none. */
 export type ReadProduct =
-  | { readonly terms: readonly Term[] }
+  | { readonly terms: readonly Term[]; readonly likely?: undefined }
   | { readonly terms?: undefined; readonly likely: readonly string[] }
   | { readonly terms?: undefined; readonly likely?: undefined; readonly nearest: string | undefined };
 
@@ -33,7 +33,7 @@ const WORDS: readonly (readonly [RegExp, string | ((...match: string[]) => strin
 const subscript = (kind: string): string => (/it/i.test(kind) ? 'IT' : 'th');
 const prefix = (text: string): string => (text.toLowerCase() === 'mm' ? 'MM' : text.toLowerCase());
 
-const TOKEN = /\s*(?:([A-Za-z]+H2O|[A-Za-z_%]+|1(?![\d.]))(?:\^?([+-]?\d+)|\^\(([+-]?\d+)\))?|([*/()]))/y;
+const TOKEN = /\s*(?:([A-Za-z]+H2O|[A-Za-z_%]+|1(?![\d.]))(?:\^?([+-]?\d)(?!\d)|\^\(([+-]?\d)\))?|([*/()]))/y;
 
 /**
  * Reads a product of units in plain characters: `kJ/(kg K)`, `J mol^-1 K^-1`, `Btu_IT/lb`.

@@ -7,8 +7,8 @@ import type { Unit } from './unit';
 
 /** A unit, or why a text is none: spellings that are likely meant, or the nearest word. */
 export type ReadUnit =
-  | { readonly unit: Unit }
-  | { readonly unit?: undefined; readonly likely: readonly string[] }
+  | { readonly unit: Unit; readonly likely?: undefined; readonly nearest?: undefined }
+  | { readonly unit?: undefined; readonly likely: readonly string[]; readonly nearest?: undefined }
   | { readonly unit?: undefined; readonly likely?: undefined; readonly nearest: string | undefined };
 
 const GAUGE = /^(.+?)(?: ?\((gauge|gage|g|absolute|abs|a)\)|[ _](gauge|gage|g|absolute|abs|a)|(?<=psi|bar|pa)([ga]))$/i;
@@ -40,12 +40,19 @@ function gaugeUnit(unit: Unit, text: string): Unit {
 /** A slash is read strictly; only where that measures nothing, everything after it stands below it. */
 function readWhole(plain: string): ReadUnit {
   const strict = readProduct(plain, false);
+  if (strict.likely !== undefined) return { likely: strict.likely.flatMap(spelledOut) };
   if (strict.terms === undefined) return strict;
   const unit = unitOfTerms(strict.terms);
   if (unit !== undefined) return { unit };
   const wide = readProduct(plain, true);
   const wideUnit = wide.terms === undefined ? undefined : unitOfTerms(wide.terms);
   return wideUnit === undefined ? { nearest: undefined } : { unit: wideUnit };
+}
+
+/** A likely spelling may hold a further ambiguous word, or measure nothing. */
+function spelledOut(likely: string): readonly string[] {
+  const read = readWhole(likely);
+  return read.unit === undefined ? (read.likely ?? []) : [read.unit.symbol];
 }
 
 function unitOfTerms(terms: readonly Term[]): Unit | undefined {

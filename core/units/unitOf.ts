@@ -1,5 +1,5 @@
 import { Problem } from '../problem';
-import { differenceUnit } from './differenceUnit';
+import { asKind, likelyOf } from './asKind';
 import { kindExamples, kindWords } from './kindWords';
 import { plainText } from './plainText';
 import { readUnit } from './readUnit';
@@ -34,29 +34,25 @@ export function unitOf(text: string, kind?: UnitKind, argument = 'unit'): Unit {
 function checked(text: string, kind: UnitKind | undefined, argument: string): Unit {
   const read = readUnit(plainText(text));
   if (read.unit !== undefined) {
-    if (kind === undefined || read.unit.kind === kind) return read.unit;
-    if (kind === 'difference' && read.unit.kind === 'temperature') return differenceUnit(read.unit);
+    const unit = asKind(read.unit, kind);
+    if (unit !== undefined) return unit;
     throw new Problem({
       code: 'argument',
       argument,
-      allowed: `a unit of ${kindWords(kind)}, as ${kindExamples(kind)}`,
+      allowed: unitsOf(kind),
       received: `"${text}", a unit of ${kindWords(read.unit.kind)}`,
     });
   }
-  const allowed = kind === undefined ? 'a unit' : `a unit of ${kindWords(kind)}, as ${kindExamples(kind)}`;
-  if (read.likely !== undefined) {
-    throw new Problem({
-      code: 'argument',
-      argument,
-      allowed: read.likely.join(' or '),
-      received: `"${text}", which is ambiguous`,
-    });
-  }
+  const likely = likelyOf(read, kind);
   throw new Problem({
     code: 'argument',
     argument,
-    allowed,
-    received: `"${text}"`,
+    allowed: likely.length > 0 ? likely.join(' or ') : unitsOf(kind),
+    received: likely.length > 0 ? `"${text}", which is ambiguous` : `"${text}"`,
     ...(read.nearest === undefined ? {} : { nearest: read.nearest }),
   });
+}
+
+function unitsOf(kind: UnitKind | undefined): string {
+  return kind === undefined ? 'a unit, as kJ/kg, degC, kPa' : `a unit of ${kindWords(kind)}, as ${kindExamples(kind)}`;
 }
