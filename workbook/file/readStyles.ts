@@ -1,6 +1,7 @@
 import type { BookStyle } from '../book';
 import { BUILTIN_FORMATS } from './builtinFormats';
 import { unescapeText } from './escapeXml';
+import { sameLook } from './sameLook';
 import { colorOf } from './themeColors';
 import { type XmlNode, child, childrenOf } from './xmlTree';
 
@@ -63,7 +64,7 @@ export function readStyles(root: XmlNode, theme: readonly string[]): FileStyles 
     const look = read(xf);
     const { format, ...bare } = look;
     const known = named.get(Number(xf.attributes['xfId'] ?? 0));
-    if (known !== undefined && sameLook(bare, { ...known.look, format: undefined })) {
+    if (known !== undefined && sameLook(bare, withoutFormat(known.look))) {
       return format === known.look.format ? { style: known.key } : { style: known.key, format: format ?? 'General' };
     }
     if (Object.keys(bare).length === 0) return format === undefined ? {} : { format };
@@ -73,10 +74,7 @@ export function readStyles(root: XmlNode, theme: readonly string[]): FileStyles 
   return { keys, styles };
 }
 
-function sameLook(a: object, b: object): boolean {
-  const text = (look: object) => JSON.stringify(Object.entries(look).sort(([x], [y]) => (x < y ? -1 : 1)));
-  return text(a) === text(JSON.parse(JSON.stringify(b)) as object);
-}
+const withoutFormat = ({ format: _format, ...look }: BookStyle): BookStyle => look;
 
 /** Only what differs from the book's standard font counts as a look. */
 function readFont(font: XmlNode | undefined, standard: XmlNode | undefined, theme: readonly string[]): BookStyle {

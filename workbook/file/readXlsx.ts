@@ -11,6 +11,7 @@ import { readStrings } from './readStrings';
 import { type FileStyles, readStyles } from './readStyles';
 import { readRelations } from './relations';
 import { resolveLists } from './resolveLists';
+import { isNamed } from './sameLook';
 import { themeColors } from './themeColors';
 import { type XmlNode, attribute, child, childrenOf, xmlTree } from './xmlTree';
 
@@ -106,5 +107,5 @@ function stylesOf(parts: Parts, part: string, theme: string): FileStyles {
 
 function usedStyles(styles: Book['styles'], sheets: readonly BookSheet[]): Book['styles'] {
   const used = new Set(sheets.flatMap((sheet) => Object.values(sheet.cells).map((cell) => cell.style)));
-  return Object.fromEntries(Object.entries(styles).filter(([key]) => used.has(key)));
+  return Object.fromEntries(Object.entries(styles).filter(([key]) => isNamed(key) || used.has(key)));
 }
