@@ -34,3 +34,8 @@ export interface EngineCells {
   /** How far the formula of a cell spills; one by one where it does not. */
   extent(row: number, column: number): { readonly rows: number; readonly columns: number };
 }
+
+/** How the formula engine calls the sheet at an index. */
+export function sheetId(index: number): string {
+  return `sheet${index}`;
+}

@@ -28,7 +28,7 @@ import { functionClasses, type CallListeners } from '../grid/adapter';
 import type { CellFunction } from '../grid/customFunctions';
 import type { FunctionList } from '../grid/functionList';
 import { mendEngine } from '../grid/mendEngine';
-import type { EngineBook, EngineCells, EngineSheet, EngineValue } from './engineBook';
+import { sheetId, type EngineBook, type EngineCells, type EngineSheet, type EngineValue } from './engineBook';
 
 /** The grid library's formula engine without any grid; everything of the library stays behind this. */
 export interface FormulaEngine {
@@ -53,6 +53,9 @@ const CALCULATE_ALL = {
   options: undefined,
 };
 
+/** The library keeps parsed formulas by book for the whole process, so no two books may be called the same. */
+let booksSoFar = 0;
+
 /** Starts the engine with the cell functions of a bundle. */
 export function startFormulaEngine(
   list: FunctionList,
@@ -64,12 +67,16 @@ export function startFormulaEngine(
   const injector = univer.__getInjector();
   mendEngine(injector);
   const commands = injector.get(ICommandService);
-  let units = 0;
   let queue: Promise<unknown> = Promise.resolve();
 
   const run = async (book: EngineBook): Promise<EngineCells[]> => {
-    const unitId = `book${(units += 1)}`;
+    // The library remembers formulas by their text, with the names of an earlier book put in: forget them.
+    new LexerTreeBuilder().dispose();
+    const unitId = `book${(booksSoFar += 1)}`;
     univer.createUnit(UniverInstanceType.UNIVER_SHEET, snapshot(unitId, book));
+    // Names are looked up in the current book only.
+    const instances = injector.get(IUniverInstanceService);
+    instances.setCurrentUnitForType(unitId);
     const names = injector.get(IDefinedNamesService);
     book.names.forEach(({ name, formula, sheet }, i) => {
       const local = sheet === undefined ? {} : { localSheetId: sheetId(sheet) };
@@ -104,7 +111,7 @@ export function startFormulaEngine(
       });
     } finally {
       names.removeUnitDefinedName(unitId);
-      injector.get(IUniverInstanceService).disposeUnit(unitId);
+      instances.disposeUnit(unitId);
     }
   };
 
@@ -121,15 +128,6 @@ export function startFormulaEngine(
     functionNames: () =>
       [...injector.get(IFunctionService).getExecutors().keys()].map((name) => String(name).toUpperCase()),
   };
-}
-
-/** The number of a sheet of an `EngineBook` in the place that calls a function. */
-export function sheetIndex(sheet: string): number {
-  return Number(sheet.slice('sheet'.length));
-}
-
-function sheetId(index: number): string {
-  return `sheet${index}`;
 }
 
 function snapshot(id: string, book: EngineBook): Partial<IWorkbookData> {

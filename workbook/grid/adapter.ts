@@ -55,7 +55,7 @@ function functionClass(
       let value: BaseValueObject;
       try {
         const call = prepareCall(entry, variants, place, this.getSheetsInfo().sheetNameMap);
-        const key = () => JSON.stringify([entry.id, place, call.args]);
+        const key = () => JSON.stringify([entry.id, place.sheetId, place.row, place.column, call.args]);
         const settled = late.take(key);
         if (settled === 'waiting') {
           value = waiting(faults);

@@ -1,5 +1,5 @@
 import type { ArrayValueObject, BaseValueObject } from '@univerjs/engine-formula';
-import { cellAddress, rangeAddress } from './a1';
+import { formatArea, formatReference } from '../../taskpane/hosts/address';
 import { excelArguments } from './arguments';
 import type { CallPlace } from './callPlace';
 import type { CellFunction } from './customFunctions';
@@ -25,7 +25,7 @@ export function prepareCall(
   const invocation: Record<string, unknown> = { functionName: entry.id };
   if (entry.options?.requiresAddress === true) {
     const sheetName = sheetNames[place.sheetId];
-    if (sheetName !== undefined) invocation['address'] = cellAddress(sheetName, place.row, place.column);
+    if (sheetName !== undefined) invocation['address'] = address(sheetName, place.row, place.column, 1, 1);
   }
   if (entry.options?.requiresParameterAddresses === true) {
     invocation['parameterAddresses'] = variants.map((variant) => addressOf(variant, sheetNames));
@@ -63,11 +63,15 @@ function addressOf(variant: BaseValueObject, sheetNames: Readonly<Record<string,
   const array = variant as ArrayValueObject;
   const sheetName = sheetNames[array.getSheetId()];
   if (sheetName === undefined || array.getCurrentRow() < 0) return null;
-  return rangeAddress(
+  return address(
     sheetName,
     array.getCurrentRow(),
     array.getCurrentColumn(),
     array.getRowCount(),
     array.getColumnCount(),
   );
+}
+
+function address(sheet: string, top: number, left: number, rows: number, columns: number): string {
+  return formatReference({ sheet, address: formatArea({ top, left, rows, columns }) });
 }

@@ -1,0 +1,83 @@
+import type { LatentryBundle } from '../../functions/index';
+import type { StoreState } from '../../functions/settings/store';
+import { formatArea, parseArea, parseReference } from '../../taskpane/hosts/address';
+import type { Cell } from '../../taskpane/port';
+import type { Book } from '../book';
+
+/** The block of unit settings in a workbook. */
+const UNITS_NAME = 'latentry_units';
+
+/**
+ * The unit settings of a book as the functions are told them.
+ * @param book Any book, or none.
+ * @param unitsText Settings on top of the book's own, `key=value; key=value`.
+ * @throws Problem of the bundle where `unitsText` can't be read.
+ */
+export function bookSettings(
+  book: Book | undefined,
+  unitsText: string | undefined,
+  latentry: LatentryBundle,
+): StoreState {
+  const state = book === undefined ? { state: 'absent' as const } : blockState(book, latentry);
+  if (unitsText === undefined) return state;
+  const base = state.state === 'ready' ? state.settings : latentry.defaultSettings;
+  const settings = latentry.parseSettingsText(unitsText, base);
+  if (state.state === 'broken') return state;
+  return { state: 'ready', settings, stamp: JSON.stringify(latentry.settingsRows(settings)) };
+}
+
+function blockState(book: Book, latentry: LatentryBundle): StoreState {
+  const name = book.names.find((each) => each.sheet === undefined && each.name.toLowerCase() === UNITS_NAME);
+  if (name === undefined) return { state: 'absent' };
+  const ref = parseReference(name.formula);
+  const area = parseArea(ref?.address ?? '');
+  const sheet = book.sheets.find((each) => each.name.toLowerCase() === ref?.sheet.toLowerCase());
+  if (area === null || sheet === undefined) {
+    return {
+      state: 'broken',
+      cell: name.name,
+      text: name.formula,
+      message: 'a range of two columns on a sheet of this workbook',
+    };
+  }
+  const cell = (row: number, column: number) =>
+    formatArea({ top: area.top + row, left: area.left + column, rows: 1, columns: 1 });
+  const values = Array.from({ length: area.rows }, (_row, r) =>
+    Array.from({ length: area.columns }, (_column, c) => handedOver(sheet.cells[cell(r, c)]?.value ?? null)),
+  );
+  try {
+    const settings = latentry.parseSettingsBlock(values, latentry.defaultSettings);
+    return { state: 'ready', settings, stamp: JSON.stringify(latentry.settingsRows(settings)) };
+  } catch (thrown) {
+    const { allowed, received, nearest, row } = problemOf(thrown);
+    const inValue = String(values[row]?.[1] ?? '') === received;
+    const words = nearest === undefined ? allowed : `${allowed} (nearest: ${nearest})`;
+    return { state: 'broken', cell: cell(row, inValue ? 1 : 0), text: received, message: words };
+  }
+}
+
+function handedOver(value: Cell): unknown {
+  return typeof value === 'object' && value !== null ? { code: value.error } : value;
+}
+
+interface BlockProblem {
+  readonly allowed: string;
+  readonly received: string;
+  readonly nearest: string | undefined;
+  /** Row of the block, from zero. */
+  readonly row: number;
+}
+
+/** The data of a refusal by the bundle; anything else is a defect and is thrown on. */
+function problemOf(thrown: unknown): BlockProblem {
+  const data = (thrown as { data?: Readonly<Record<string, unknown>> }).data;
+  const row = /^Units row (\d+)/.exec(String(data?.['argument'] ?? ''));
+  if (data?.['code'] !== 'argument' || row === null) throw thrown;
+  const nearest = data['nearest'];
+  return {
+    allowed: String(data['allowed']),
+    received: String(data['received']).replace(/^(?:the key )?"(.*)"$/, '$1'),
+    nearest: typeof nearest === 'string' ? nearest : undefined,
+    row: Number(row[1]) - 1,
+  };
+}
