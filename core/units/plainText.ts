@@ -3,10 +3,8 @@ const SUBSCRIPTS = '₀₁₂₃₄₅₆₇₈₉';
 
 /**
  * Rewrites the typography of units, numbers and headers in plain characters: superscripts as `^-1`, every minus as `-`,
- * every product sign as `*`, every slash as `/`, every space as one blank, `°` as `deg`, one delta, `µ` as `u`.
- *
- * @example
- * plainText('kJ·kg⁻¹') // => 'kJ*kg^-1'
+ * every product sign as `*`, every slash as `/`, every space as one blank, `°` as `deg`, one delta, `µ` as `u`:
+ * `kJ·kg⁻¹` becomes `kJ*kg^-1`.
  */
 export function plainText(text: string): string {
   if (PLAIN.test(text)) return text.replace(/ +/g, ' ').trim();

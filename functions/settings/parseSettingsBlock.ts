@@ -21,16 +21,28 @@ export function parseSettingsBlock(
 ): Settings {
   const entries: Entry[] = [];
   values.forEach((row, index) => {
-    if (row.length !== 2) throw refused(index, 'two columns, label and value', `${row.length} columns`);
-    const [key, value] = [settingCell(row[0]), settingCell(row[1])];
+    const where = rowName(index, settingCell(row[0]));
+    if (row.length !== 2) throw refused(where, 'two columns, label and value', `${row.length} columns`);
+    const key = label(row);
+    const value = settingCell(row[1]);
     // A host may hand over a blank cell as 0.
-    if ((key === '' || key === '0') && (value === '' || value === '0')) return;
-    if (key === '' || key === '0') throw refused(index, `a label beside "${value}"`, 'a blank');
-    entries.push({ key, value: value === '0' ? '' : value, where: `Units row ${index + 1} (${key})` });
+    const blank = value === '' || row[1] === 0;
+    if (key === '' && blank) return;
+    if (key === '') throw refused(where, `a label beside "${value}"`, 'a blank');
+    entries.push({ key, value: blank ? '' : value, where });
   });
   return entries.length === 0 ? base : withEntries(base, entries, allowedOptions);
 }
 
-function refused(index: number, allowed: string, received: string): Problem {
-  return new Problem({ code: 'argument', argument: `Units row ${index + 1}`, allowed, received });
+/** How a refusal names a row of the block, counted from 1. */
+export function rowName(index: number, key: string): string {
+  return key === '' || key === '0' ? `Units row ${index + 1}` : `Units row ${index + 1} (${key})`;
+}
+
+function label(row: readonly unknown[]): string {
+  return row[0] === 0 ? '' : settingCell(row[0]);
+}
+
+function refused(argument: string, allowed: string, received: string): Problem {
+  return new Problem({ code: 'argument', argument, allowed, received });
 }
