@@ -35,7 +35,11 @@ function plan(keys: readonly Key[], settings: Settings): Plan {
 export function datumOf(substance: Substance, item: string): Datum {
   const found = substance.constants.find((datum) => plainName(datum.item) === plainName(item));
   if (found !== undefined) return found;
-  throw refused('item', item, substance.constants.map((datum) => datum.item));
+  throw refused(
+    'item',
+    item,
+    substance.constants.map((datum) => datum.item),
+  );
 }
 
 function cellScale(datum: Datum, settings: Settings): { scale: number; offset: number } {

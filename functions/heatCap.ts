@@ -5,12 +5,11 @@ import { meanOver } from '../core/meanOver';
 import { Problem } from '../core/problem';
 import { answer } from './edge/answer';
 import { phaseKey, substanceKey, wordOption } from './edge/keys';
+import { orAtmosphere } from './edge/pathPlan';
 import type { CellwiseSpec, Key, Plan } from './edge/spec';
 import type { Settings } from './settings/settings';
 import type { Curve } from '../core/substance';
 import { fromMolar } from '../core/units/fromMolar';
-
-const STANDARD_ATMOSPHERE_PA = 101325;
 
 const spec: CellwiseSpec = {
   family: 'cellwise',
@@ -41,9 +40,12 @@ function plan(keys: readonly Key[], settings: Settings): Plan {
         received: 'a pressure',
       });
     }
-    const at = pressurePa === pressurePa ? pressurePa : STANDARD_ATMOSPHERE_PA;
+    const at = orAtmosphere(pressurePa);
     if (last === undefined || last.pressurePa !== at) {
-      last = { pressurePa: at, curve: substance.heatCapacity(phase, standard ? 'standard' : saturated ? 'saturated' : at) };
+      last = {
+        pressurePa: at,
+        curve: substance.heatCapacity(phase, standard ? 'standard' : saturated ? 'saturated' : at),
+      };
     }
     return last.curve;
   };

@@ -25,7 +25,15 @@ function rowOf(check: Check, run: () => number): Table[number] {
     const result = Math.abs(deviation) <= check.within ? 'pass' : 'FAIL';
     return [formula, value, check.expected, deviation, check.within, result, check.source];
   } catch (error) {
-    return [formula, error instanceof Error ? error.message : String(error), check.expected, '', check.within, 'FAIL', check.source];
+    return [
+      formula,
+      error instanceof Error ? error.message : String(error),
+      check.expected,
+      '',
+      check.within,
+      'FAIL',
+      check.source,
+    ];
   }
 }
 

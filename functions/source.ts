@@ -27,7 +27,10 @@ function sourceWords(substance: Substance, item: string, settings: Settings): st
   const name = plainName(item);
   const datum = substance.constants.find((d) => plainName(d.item) === name);
   if (datum !== undefined) {
-    const u = datum.uncertainty === undefined ? 'no stated uncertainty' : `standard uncertainty ${shortNumber(datum.uncertainty)} ${datum.unit}`;
+    const u =
+      datum.uncertainty === undefined
+        ? 'no stated uncertainty'
+        : `standard uncertainty ${shortNumber(datum.uncertainty)} ${datum.unit}`;
     return `${datum.source}; ${u}; ${datum.confirmed ? 'confirmed' : 'unconfirmed'}`;
   }
   const curves = curvesOf(substance);
@@ -43,13 +46,17 @@ function sourceWords(substance: Substance, item: string, settings: Settings): st
     curve.sources.join('; '),
     curve.method,
     `valid from ${write(curve.from)} to ${write(curve.to)}`,
-    u === undefined ? 'no stated uncertainty' : `standard uncertainty ${shortNumber(u)} ${curve.unit} at ${write(middle)}`,
+    u === undefined
+      ? 'no stated uncertainty'
+      : `standard uncertainty ${shortNumber(u)} ${curve.unit} at ${write(middle)}`,
   ].join('; ');
 }
 
 function curvesOf(substance: Substance): readonly (readonly [string, () => Curve])[] {
   return [
-    ...substance.changes.map((change) => [change, () => substance.latent(change, substance.defaultKind(change))] as const),
+    ...substance.changes.map(
+      (change) => [change, () => substance.latent(change, substance.defaultKind(change))] as const,
+    ),
     ['saturation pressure', () => substance.saturationPressure('stable')],
     ['saturation temperature', () => substance.saturationTemperature('stable')],
     ['solid heat capacity', () => substance.heatCapacity('solid', 101325)],

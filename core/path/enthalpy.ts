@@ -16,6 +16,11 @@ import type { State } from './state';
  * import { enthalpy, water } from 'latentry';
  * enthalpy(water, { form: 'temperature', temperatureK: 298.15 }, 1e5) / water.molarMass // => 104918.9
  */
-export function enthalpy(substance: Substance, state: State, pressurePa: number, policy: OutOfRange = 'refuse'): number {
+export function enthalpy(
+  substance: Substance,
+  state: State,
+  pressurePa: number,
+  policy: OutOfRange = 'refuse',
+): number {
   return placeState(substance, state, pressurePa, policy).enthalpy;
 }

@@ -19,6 +19,12 @@ import type { State } from './state';
  * import { heat, water } from 'latentry';
  * heat(water, { form: 'saturated', phase: 'liquid' }, { form: 'saturated', phase: 'gas' }, 101325) / water.molarMass // => 2256471.6
  */
-export function heat(substance: Substance, from: State, to: State, pressurePa: number, policy: OutOfRange = 'refuse'): number {
+export function heat(
+  substance: Substance,
+  from: State,
+  to: State,
+  pressurePa: number,
+  policy: OutOfRange = 'refuse',
+): number {
   return heatSteps(substance, from, to, pressurePa, policy).heat;
 }

@@ -1,7 +1,7 @@
 import type { Mark } from '../answer';
 import type { OutOfRange } from '../evaluate';
 import { Problem } from '../problem';
-import type { Ladder, Substance } from '../substance';
+import type { Gap, Ladder, Substance } from '../substance';
 import type { Place } from './place';
 import { placeState } from './placeState';
 import type { State } from './state';
@@ -57,7 +57,11 @@ export function heatSteps(
   policy: OutOfRange = 'refuse',
 ): HeatPath {
   const ladder = substance.ladder(pressurePa);
-  const [a, b] = decided(placeState(substance, from, pressurePa, policy), placeState(substance, to, pressurePa, policy), ladder);
+  const [a, b] = decided(
+    placeState(substance, from, pressurePa, policy),
+    placeState(substance, to, pressurePa, policy),
+    ladder,
+  );
   const steps = staysInPhase(a, b)
     ? [{ label: a.phase, fromK: a.temperatureK, toK: b.temperatureK, heat: b.enthalpy - a.enthalpy }]
     : [...leaving(a, ladder), ...climb(stable(a, ladder), stable(b, ladder), ladder), ...arriving(b, ladder)];
@@ -80,7 +84,8 @@ function decided(a: Place, b: Place, ladder: Ladder): [Place, Place] {
     const gapIndex = ladder.gaps.findIndex((gap) => gap.temperatureK === place.temperatureK);
     const gap = ladder.gaps[gapIndex];
     if (gap === undefined) return place;
-    const above = other.segment > 2 * gapIndex + 1 || (other.segment === 2 * gapIndex + 1 && other.enthalpy > gap.below);
+    const above =
+      other.segment > 2 * gapIndex + 1 || (other.segment === 2 * gapIndex + 1 && other.enthalpy > gap.below);
     const rung = ladder.rungs[above ? gapIndex + 1 : gapIndex];
     if (rung === undefined) return place;
     const text = `exactly at ${gap.change}: taken as ${rung.phase}, the side of the other end; name the phase to be sure`;
@@ -115,7 +120,12 @@ function arriving(place: Place, ladder: Ladder): HeatStep[] {
 }
 
 function change(a: Place, b: Place): HeatStep {
-  return { label: `${a.phase} to ${b.phase}`, fromK: a.temperatureK, toK: b.temperatureK, heat: b.enthalpy - a.enthalpy };
+  return {
+    label: `${a.phase} to ${b.phase}`,
+    fromK: a.temperatureK,
+    toK: b.temperatureK,
+    heat: b.enthalpy - a.enthalpy,
+  };
 }
 
 /** The legs between two stable places; downward they are the upward legs turned round. */
@@ -129,16 +139,32 @@ function climb(a: Place, b: Place, ladder: Ladder): HeatStep[] {
 function upward(a: Place, b: Place, ladder: Ladder): HeatStep[] {
   const steps: HeatStep[] = [];
   for (let segment = a.segment; segment <= b.segment; segment++) {
-    const gap = ladder.gaps[Math.floor(segment / 2)];
-    const below = ladder.gaps[segment / 2 - 1];
-    const rung = segment % 2 === 0 ? ladder.rungs[segment / 2] : undefined;
-    const start = segment === a.segment ? a : { temperatureK: below?.temperatureK ?? gap?.temperatureK, enthalpy: segment % 2 === 0 ? below?.above : gap?.below };
-    const end = segment === b.segment ? b : { temperatureK: gap?.temperatureK, enthalpy: segment % 2 === 0 ? gap?.below : gap?.above };
-    const fromK = segment % 2 === 0 ? start.temperatureK : gap?.temperatureK;
-    if (fromK === undefined || end.temperatureK === undefined || start.enthalpy === undefined || end.enthalpy === undefined) continue;
+    const span = spanOf(segment, ladder);
+    const start = segment === a.segment ? a : span.start;
+    const end = segment === b.segment ? b : span.end;
     const heat = end.enthalpy - start.enthalpy;
-    if (fromK === end.temperatureK && heat === 0) continue;
-    steps.push({ label: rung?.phase ?? gap?.change ?? '', fromK, toK: end.temperatureK, heat });
+    if (start.temperatureK === end.temperatureK && heat === 0) continue;
+    steps.push({ label: span.label, fromK: start.temperatureK, toK: end.temperatureK, heat });
   }
   return steps;
+}
+
+interface Point {
+  readonly temperatureK: number;
+  readonly enthalpy: number;
+}
+
+/** The whole of a segment: a rung between the gaps at its ends, or a gap from its lower side to its upper. */
+function spanOf(segment: number, ladder: Ladder): { label: string; start: Point; end: Point } {
+  const open: Point = { temperatureK: NaN, enthalpy: NaN };
+  const side = (gap: Gap | undefined, at: 'below' | 'above'): Point =>
+    gap === undefined ? open : { temperatureK: gap.temperatureK, enthalpy: gap[at] };
+  const index = Math.floor(segment / 2);
+  const gap = ladder.gaps[index];
+  if (segment % 2 === 1) return { label: gap?.change ?? '', start: side(gap, 'below'), end: side(gap, 'above') };
+  return {
+    label: ladder.rungs[index]?.phase ?? '',
+    start: side(ladder.gaps[index - 1], 'above'),
+    end: side(gap, 'below'),
+  };
 }

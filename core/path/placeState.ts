@@ -19,7 +19,12 @@ const NEAR_K = 0.1;
  * @throws Problem `range` for a temperature off the ladder, `missing` for a transition that does not exist at this pressure,
  * `argument` for a fraction outside [0, 1] and for a difference that leaves the phase
  */
-export function placeState(substance: Substance, state: State, pressurePa: number, policy: OutOfRange = 'refuse'): Place {
+export function placeState(
+  substance: Substance,
+  state: State,
+  pressurePa: number,
+  policy: OutOfRange = 'refuse',
+): Place {
   const ladder = substance.ladder(pressurePa);
   switch (state.form) {
     case 'temperature':
@@ -57,7 +62,13 @@ function bareTemperature(substance: Substance, ladder: Ladder, temperatureK: num
   };
 }
 
-function namedPhase(substance: Substance, ladder: Ladder, temperatureK: number, phase: Phase, policy: OutOfRange): Place {
+function namedPhase(
+  substance: Substance,
+  ladder: Ladder,
+  temperatureK: number,
+  phase: Phase,
+  policy: OutOfRange,
+): Place {
   const index = ladder.rungs.findIndex(
     (rung) => fits(rung, phase) && temperatureK >= rung.fromK && temperatureK <= rung.toK,
   );
@@ -84,7 +95,12 @@ function fits(rung: Rung, phase: Phase): boolean {
   return rung.phase === phase || (rung.phase === 'supercritical' && phase !== 'solid');
 }
 
-function rungAt(substance: Substance, ladder: Ladder, temperatureK: number, policy: OutOfRange): { index: number; rung: Rung } {
+function rungAt(
+  substance: Substance,
+  ladder: Ladder,
+  temperatureK: number,
+  policy: OutOfRange,
+): { index: number; rung: Rung } {
   const first = ladder.rungs[0];
   const last = ladder.rungs[ladder.rungs.length - 1];
   if (first === undefined || last === undefined) {
@@ -157,5 +173,10 @@ function beside(substance: Substance, ladder: Ladder, found: FoundGap, deltaK: n
 
 function checkedFraction(vapor: number): number {
   if (vapor >= 0 && vapor <= 1) return vapor;
-  throw new Problem({ code: 'argument', argument: 'vapor fraction', allowed: 'within [0, 1]', received: String(vapor) });
+  throw new Problem({
+    code: 'argument',
+    argument: 'vapor fraction',
+    allowed: 'within [0, 1]',
+    received: String(vapor),
+  });
 }

@@ -37,8 +37,14 @@ export function enumLists() {
   const { substances, changeWords } = loadModule('core/catalogue/find.ts');
   const direction = { condensation: 'heat given up', freezing: 'heat given up', deposition: 'heat given up' };
   return {
-    substance: list('SUBSTANCE', substances.map((s) => [s.name, `${s.formula}, CAS ${s.cas}`])),
-    change: list('CHANGE', changeWords.map((word) => [word, direction[word] ?? 'heat taken up'])),
+    substance: list(
+      'SUBSTANCE',
+      substances.map((s) => [s.name, `${s.formula}, CAS ${s.cas}`]),
+    ),
+    change: list(
+      'CHANGE',
+      changeWords.map((word) => [word, direction[word] ?? 'heat taken up']),
+    ),
     phase: list('PHASE', [
       ['solid', 'ice and other solids'],
       ['liquid', 'liquid'],

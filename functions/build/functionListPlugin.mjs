@@ -48,7 +48,8 @@ export function finishFunctionList(list, releasedIds, lists) {
   const functions = [...list.functions].sort((a, b) => (a.id < b.id ? -1 : 1));
   const ids = new Set(functions.map((f) => f.id));
   for (const id of releasedIds) if (!ids.has(id)) errors.push(`${id} was released and is gone`);
-  for (const id of ids) if (!releasedIds.includes(id)) errors.push(`${id} is not in functions/build/releasedIds.json; append it`);
+  for (const id of ids)
+    if (!releasedIds.includes(id)) errors.push(`${id} is not in functions/build/releasedIds.json; append it`);
   const used = new Set();
   for (const f of functions) {
     if (f.result?.dimensionality !== 'matrix') errors.push(`${f.id}: the result is not a matrix`);

@@ -7,7 +7,14 @@ const computed = `${R6}, evaluated to 34 digits`;
 const computedIce = `${R6_R10}, evaluated to 34 digits`;
 const KJ = 'temperature=degC; heat=kJ/kg; heat_capacity=kJ/(kg K); pressure=kPa';
 
-const latent = (change: string, t: number, expected: number, within: number, source: string, because = LAST_DIGIT): Check => ({
+const latent = (
+  change: string,
+  t: number,
+  expected: number,
+  within: number,
+  source: string,
+  because = LAST_DIGIT,
+): Check => ({
   call: 'LATENT',
   args: ['water', change, t],
   settings: KJ,
@@ -85,8 +92,24 @@ export const waterChecks: readonly Check[] = [
     because: 'the 12th digit of the listing depends on its iteration settings',
     source: 'TEOS-10 Sea-Ice-Air check values (Wright et al., Ocean Sci. 6, 695-718, 2010)',
   },
-  { call: 'DELTACP', args: ['water', 'vaporization', 25], settings: KJ, expected: -2.37045551, within: 5e-9, because: LAST_DIGIT, source: `${computed}, along saturation` },
-  { call: 'DELTACP', args: ['water', 'vaporization', 300], settings: KJ, expected: -7.52482373, within: 5e-9, because: LAST_DIGIT, source: `${computed}, along saturation` },
+  {
+    call: 'DELTACP',
+    args: ['water', 'vaporization', 25],
+    settings: KJ,
+    expected: -2.37045551,
+    within: 5e-9,
+    because: LAST_DIGIT,
+    source: `${computed}, along saturation`,
+  },
+  {
+    call: 'DELTACP',
+    args: ['water', 'vaporization', 300],
+    settings: KJ,
+    expected: -7.52482373,
+    within: 5e-9,
+    because: LAST_DIGIT,
+    source: `${computed}, along saturation`,
+  },
   {
     call: 'DELTACP',
     args: ['water', 'vaporization', 298.15],
@@ -105,8 +128,24 @@ export const waterChecks: readonly Check[] = [
     because: LAST_DIGIT,
     source: `${computedIce}, supercooled water at 101.325 kPa`,
   },
-  { call: 'SATPRESSURE', args: ['water', 25], settings: KJ, expected: 3.169929339, within: 5e-10, because: LAST_DIGIT, source: computed },
-  { call: 'SATPRESSURE', args: ['water', 350], settings: KJ, expected: 16529.41514, within: 5e-6, because: LAST_DIGIT, source: computed },
+  {
+    call: 'SATPRESSURE',
+    args: ['water', 25],
+    settings: KJ,
+    expected: 3.169929339,
+    within: 5e-10,
+    because: LAST_DIGIT,
+    source: computed,
+  },
+  {
+    call: 'SATPRESSURE',
+    args: ['water', 350],
+    settings: KJ,
+    expected: 16529.41514,
+    within: 5e-6,
+    because: LAST_DIGIT,
+    source: computed,
+  },
   {
     call: 'SATPRESSURE',
     args: ['water', 270],
@@ -125,7 +164,15 @@ export const waterChecks: readonly Check[] = [
     because: 'the release is a fit within 7e-5 of the phase equilibrium',
     source: 'IAPWS R14-08(2011), check value of the sublimation curve',
   },
-  { call: 'SATPRESSURE', args: ['water', -30], settings: 'temperature=degC; pressure=Pa', expected: 38.0075407, within: 5e-9, because: LAST_DIGIT, source: computedIce },
+  {
+    call: 'SATPRESSURE',
+    args: ['water', -30],
+    settings: 'temperature=degC; pressure=Pa',
+    expected: 38.0075407,
+    within: 5e-9,
+    because: LAST_DIGIT,
+    source: computedIce,
+  },
   {
     call: 'HEATCAP',
     args: ['water', 'liquid', 25],

@@ -33,7 +33,12 @@ export function answer(spec: Spec, raw: readonly unknown[]): any {
   return later(spec, blocks, parts, waits);
 }
 
-async function later(spec: Spec, blocks: readonly (Block | undefined)[], parts: readonly unknown[], waits: boolean): Promise<unknown[][]> {
+async function later(
+  spec: Spec,
+  blocks: readonly (Block | undefined)[],
+  parts: readonly unknown[],
+  waits: boolean,
+): Promise<unknown[][]> {
   const state = waits ? await settingsStore.whenRead(LONGEST_WAIT_MS) : settingsStore.current();
   const read = await Promise.all(
     blocks.map(async (block) =>
@@ -45,11 +50,17 @@ async function later(spec: Spec, blocks: readonly (Block | undefined)[], parts: 
   return finish(spec, read, parts, state);
 }
 
-function finish(spec: Spec, blocks: readonly (Block | undefined)[], parts: readonly unknown[], state: StoreState): unknown[][] {
+function finish(
+  spec: Spec,
+  blocks: readonly (Block | undefined)[],
+  parts: readonly unknown[],
+  state: StoreState,
+): unknown[][] {
   let settings: Settings | undefined;
   try {
     settings = settingsFor(parts, parts.some(isWholeBlock) ? DEFAULT_SETTINGS : ambient(state), optionsOf(spec));
-    const table: Element[][] = spec.family === 'cellwise' ? runCellwise(spec, blocks, settings) : spec.run(blocks, settings);
+    const table: Element[][] =
+      spec.family === 'cellwise' ? runCellwise(spec, blocks, settings) : spec.run(blocks, settings);
     return sealed(table);
   } catch (thrown) {
     throw errorOf(faultOf(thrown, settings));
@@ -96,21 +107,32 @@ function isWholeBlock(part: unknown): boolean {
 }
 
 function isUnitsBlock(part: unknown): boolean {
-  return Array.isArray(part) && Array.isArray(part[0]) && part[0].length > 1 && LABELS.has(plainKey(String(part[0][0])));
+  return (
+    Array.isArray(part) && Array.isArray(part[0]) && part[0].length > 1 && LABELS.has(plainKey(String(part[0][0])))
+  );
 }
 
 const LABELS: ReadonlySet<string> = new Set(SETTINGS.flatMap((row) => [plainKey(row.label), plainKey(row.key)]));
 
 /** A settings text has an equals sign, which no quantity has. */
 function isSettingsText(part: unknown): boolean {
-  return Array.isArray(part) && part.length === 1 && Array.isArray(part[0]) && typeof part[0][0] === 'string' && part[0][0].includes('=');
+  return (
+    Array.isArray(part) &&
+    part.length === 1 &&
+    Array.isArray(part[0]) &&
+    typeof part[0][0] === 'string' &&
+    part[0][0].includes('=')
+  );
 }
 
 /**
  * Settings may stand in the place of an optional quantity that is left out: `LATENT("water","fusion",Latentry_units)`.
  * A Units block and a settings text cannot be mistaken for a quantity.
  */
-function takeSettings(spec: Spec, args: readonly unknown[]): { positional: readonly unknown[]; parts: readonly unknown[] } {
+function takeSettings(
+  spec: Spec,
+  args: readonly unknown[],
+): { positional: readonly unknown[]; parts: readonly unknown[] } {
   const count = spec.args.length;
   let positional: unknown[] | undefined;
   const early: unknown[] = [];
@@ -135,7 +157,13 @@ function settingsParts(rest: readonly unknown[]): readonly unknown[] {
   return parts;
 }
 
-function blockAt(name: string, optional: boolean, raw: unknown, index: number, invocation: Invocation): Block | undefined {
+function blockAt(
+  name: string,
+  optional: boolean,
+  raw: unknown,
+  index: number,
+  invocation: Invocation,
+): Block | undefined {
   const addresses = invocation.parameterAddresses;
   const block = blockOf(name, raw, addresses?.[index] ?? undefined);
   if (block === undefined) return undefined;

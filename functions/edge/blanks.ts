@@ -12,7 +12,10 @@ export function setBlankReader(next: BlankReader | undefined): void {
 }
 
 /** True when `cells` holds a value that a blank could hide behind and the host can tell. */
-export function needsBlankCheck(cells: readonly (readonly unknown[])[], address: string | undefined): address is string {
+export function needsBlankCheck(
+  cells: readonly (readonly unknown[])[],
+  address: string | undefined,
+): address is string {
   if (reader === undefined || address === undefined) return false;
   for (const row of cells) for (const cell of row) if (cell === 0 || cell === null) return true;
   return false;

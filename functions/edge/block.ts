@@ -13,7 +13,11 @@ export interface Block {
 /** Makes a block of a raw argument; `undefined` where the argument was left out. */
 export function blockOf(name: string, raw: unknown, address: string | undefined): Block | undefined {
   if (raw === null || raw === undefined) return undefined;
-  const cells = Array.isArray(raw) ? (raw.length > 0 && !Array.isArray(raw[0]) ? [raw] : (raw as unknown[][])) : [[raw]];
+  const cells = Array.isArray(raw)
+    ? raw.length > 0 && !Array.isArray(raw[0])
+      ? [raw]
+      : (raw as unknown[][])
+    : [[raw]];
   const rows = cells.length;
   const columns = rows === 0 ? 0 : (cells[0] as unknown[]).length;
   if (rows === 0 || columns === 0) return undefined;

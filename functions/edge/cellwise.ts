@@ -13,7 +13,11 @@ import { unitFor } from './unitFor';
 export type Element = number | string | CellFault;
 
 /** Computes every element of the common shape of the arguments by itself. */
-export function runCellwise(spec: CellwiseSpec, blocks: readonly (Block | undefined)[], settings: Settings): Element[][] {
+export function runCellwise(
+  spec: CellwiseSpec,
+  blocks: readonly (Block | undefined)[],
+  settings: Settings,
+): Element[][] {
   const shape = commonShape(blocks);
   const part = answerPart(settings);
   const readers = spec.args.map((arg, i) => new ArgReader(arg, blocks[i], settings));
@@ -165,11 +169,17 @@ class ArgReader {
     this.varies = block !== undefined && !isScalar(block);
     this.wideRows = block !== undefined && block.rows > 1;
     this.wideColumns = block !== undefined && block.columns > 1;
-    this.unit = arg.kind === 'key' || arg.kind === 'block' || arg.kind === 'number' ? undefined : unitFor(arg.kind, settings);
+    this.unit =
+      arg.kind === 'key' || arg.kind === 'block' || arg.kind === 'number' ? undefined : unitFor(arg.kind, settings);
     this.factor = this.unit?.factor ?? 1;
     this.offset = (this.unit?.offset ?? 0) + (this.unit?.gauge === true ? settings.barometerPa : 0);
     if (block === undefined && arg.optional !== true) {
-      throw new Problem({ code: 'argument', argument: arg.name, allowed: 'a value: it is required', received: 'nothing' });
+      throw new Problem({
+        code: 'argument',
+        argument: arg.name,
+        allowed: 'a value: it is required',
+        received: 'nothing',
+      });
     }
   }
 
@@ -178,7 +188,9 @@ class ArgReader {
   }
 
   blankFault(): CellFault {
-    return faultOf(new Problem({ code: 'argument', argument: this.arg.name, allowed: 'a value', received: 'a blank cell' }));
+    return faultOf(
+      new Problem({ code: 'argument', argument: this.arg.name, allowed: 'a value', received: 'a blank cell' }),
+    );
   }
 
   /** A key; `""` for a blank inside a range. */
@@ -208,7 +220,11 @@ class ArgReader {
   }
 
   private refused(cell: Cell): CellFault {
-    const allowed = this.isKey ? 'a text' : this.unit === undefined ? 'a number' : `a number (${this.unit.symbol}) or a text with its unit`;
+    const allowed = this.isKey
+      ? 'a text'
+      : this.unit === undefined
+        ? 'a number'
+        : `a number (${this.unit.symbol}) or a text with its unit`;
     return faultOf(new Problem({ code: 'argument', argument: this.arg.name, allowed, received: shown(cell) }));
   }
 }

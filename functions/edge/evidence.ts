@@ -7,7 +7,16 @@ import { faultOf, writerFor } from './cellError';
 import type { Plan } from './spec';
 
 /** The parts of an answer that a cell can show instead of its value. */
-export const ANSWER_PARTS = ['value', 'uncertainty', 'expanded', 'kind', 'method', 'source', 'range', 'status'] as const;
+export const ANSWER_PARTS = [
+  'value',
+  'uncertainty',
+  'expanded',
+  'kind',
+  'method',
+  'source',
+  'range',
+  'status',
+] as const;
 export type AnswerPart = (typeof ANSWER_PARTS)[number];
 
 /** Coverage factor of `answer=expanded`: k = 2, about 95 % for a normal distribution (GUM 6.3.3). */
@@ -28,11 +37,17 @@ export function answerPart(settings: Settings): AnswerPart {
 }
 
 /** The asked part of one element's evidence; a problem becomes words for `status` and a fault for the rest. */
-export function showPart(part: AnswerPart, plan: Plan, quantities: readonly number[], settings: Settings): number | string | CellFault {
+export function showPart(
+  part: AnswerPart,
+  plan: Plan,
+  quantities: readonly number[],
+  settings: Settings,
+): number | string | CellFault {
   const [a = NaN, b = NaN, c = NaN, d = NaN] = quantities;
   try {
     if (plan.record === undefined) {
-      if (part !== 'status') throw new Problem({ code: 'missing', subject: part, reason: 'this function gives a value only' });
+      if (part !== 'status')
+        throw new Problem({ code: 'missing', subject: part, reason: 'this function gives a value only' });
       plan.compute(a, b, c, d);
       return 'ok';
     }

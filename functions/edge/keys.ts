@@ -9,7 +9,12 @@ import type { Key } from './spec';
 /** A key that must be a text. */
 export function textKey(argument: string, key: Key): string {
   if (typeof key === 'string') return key;
-  throw new Problem({ code: 'argument', argument, allowed: 'a text', received: key === undefined ? 'nothing' : String(key) });
+  throw new Problem({
+    code: 'argument',
+    argument,
+    allowed: 'a text',
+    received: key === undefined ? 'nothing' : String(key),
+  });
 }
 
 export function substanceKey(key: Key): Substance {
@@ -25,7 +30,12 @@ export function phaseKey(key: Key): Phase {
 }
 
 /** An option that takes one word of a list. */
-export function wordOption<Word extends string>(settings: Settings, option: string, words: readonly Word[], fallback: Word): Word {
+export function wordOption<Word extends string>(
+  settings: Settings,
+  option: string,
+  words: readonly Word[],
+  fallback: Word,
+): Word {
   const asked = settings.options[option];
   if (asked === undefined) return fallback;
   const word = words.find((w) => w === asked.trim().toLowerCase());
