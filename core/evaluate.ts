@@ -13,7 +13,12 @@ export function valueAt(curve: Curve, x: number, policy: OutOfRange = 'refuse', 
 }
 
 /** The checked value with its uncertainty, range, sources and marks. */
-export function evaluate(curve: Curve, x: number, policy: OutOfRange = 'refuse', argument: string = curve.axis): Answer {
+export function evaluate(
+  curve: Curve,
+  x: number,
+  policy: OutOfRange = 'refuse',
+  argument: string = curve.axis,
+): Answer {
   const value = valueAt(curve, x, policy, argument);
   const marks: Mark[] = [...(curve.marksAt?.(x) ?? [])];
   if (x < curve.from || x > curve.to) {

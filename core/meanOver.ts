@@ -3,7 +3,7 @@ import type { Curve } from './substance';
 
 /** Abscissae and weights of the 10-point Gauss–Legendre rule on [−1, 1], positive half (Abramowitz & Stegun, Table 25.4). */
 const NODES = [0.1488743389816312, 0.4333953941292472, 0.6794095682990244, 0.8650633666889845, 0.9739065285171717];
-const WEIGHTS = [0.2955242247147529, 0.2692667193099964, 0.2190863625159820, 0.1494513491505806, 0.0666713443086881];
+const WEIGHTS = [0.2955242247147529, 0.2692667193099964, 0.219086362515982, 0.1494513491505806, 0.0666713443086881];
 
 /** Panels no wider than this keep the rule at rounding level for the heat capacities of one phase, K. */
 const WIDEST_PANEL_K = 25;

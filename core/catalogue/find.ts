@@ -22,7 +22,12 @@ for (const substance of substances) {
 export function findSubstance(text: string): Substance {
   const found = byName.get(plainName(text));
   if (found !== undefined) return found;
-  throw refused('substance', text, substances.map((s) => s.name), [...byName.keys()]);
+  throw refused(
+    'substance',
+    text,
+    substances.map((s) => s.name),
+    [...byName.keys()],
+  );
 }
 
 /** A change as the core knows it, and −1 where the word names the opposite direction. */
@@ -49,7 +54,14 @@ const CHANGE_WORDS: Readonly<Record<string, readonly [string, 1 | -1]>> = {
 };
 
 /** The words of `CHANGE_WORDS`, for autocomplete lists. */
-export const changeWords: readonly string[] = ['vaporization', 'fusion', 'sublimation', 'condensation', 'freezing', 'deposition'];
+export const changeWords: readonly string[] = [
+  'vaporization',
+  'fusion',
+  'sublimation',
+  'condensation',
+  'freezing',
+  'deposition',
+];
 
 /** Finds a change of a substance by its name or a synonym. */
 export function findChange(substance: Substance, text: string): FoundChange {
@@ -85,7 +97,12 @@ export function findPhase(text: string): Phase {
 }
 
 /** A word that is not on a list, with the list and the nearest word. */
-export function refused(argument: string, received: string, allowed: readonly string[], known: readonly string[] = allowed): Problem {
+export function refused(
+  argument: string,
+  received: string,
+  allowed: readonly string[],
+  known: readonly string[] = allowed,
+): Problem {
   const close = nearest(received, known);
   return new Problem({
     code: 'argument',
