@@ -16,10 +16,17 @@ function valueOf(row: SettingRow, settings: Settings): string {
   if (row.unit !== undefined) return settings.units[row.unit].symbol;
   switch (row.kind) {
     case 'barometer':
-      return `${String(settings.barometerPa / 1000).replace('.', settings.decimal)} kPa`;
+      return barometerText(settings);
     case 'outOfRange':
       return settings.outOfRange;
     default:
       return settings.decimal;
   }
+}
+
+/** In kPa where that says it exactly, else in Pa. */
+function barometerText({ barometerPa, decimal }: Settings): string {
+  const kilopascal = barometerPa / 1000;
+  const text = kilopascal * 1000 === barometerPa ? `${kilopascal} kPa` : `${barometerPa} Pa`;
+  return text.replace('.', decimal);
 }
