@@ -1,0 +1,46 @@
+import { formatArea } from '../../../taskpane/hosts/address';
+import { cellName, type FunctionList, NAMESPACE } from '../../grid/functionList';
+import { cellValue } from '../grid/cellValue';
+import { gridCells } from '../grid/gridCells';
+import type { Grid } from '../grid/openGrid';
+import { ERROR_WORDS } from './errorWords';
+
+/** What there is to say about one cell beside its content. */
+export interface CellInfo {
+  readonly tone: 'error' | 'note' | 'plain';
+  readonly text: string;
+}
+
+const HINT = `Type = and ${NAMESPACE}. to see the functions.`;
+
+/** The words for a cell: its error, its note, what its function answers, or where its value comes from. */
+export function cellInfo(grid: Grid, list: FunctionList, sheetId: string, row: number, column: number): CellInfo {
+  const sheet = grid.workbook().getSheetBySheetId(sheetId);
+  if (sheet === null) return { tone: 'plain', text: '' };
+  const cells = gridCells(grid.injector, sheet.getSheet());
+  const data = cells.at(row, column);
+  const value = cellValue(data);
+  const here = formatArea({ top: row, left: column, rows: 1, columns: 1 });
+  const anchor = cells.anchor(row, column) ?? { row, column };
+  if (typeof value === 'object' && value !== null) {
+    const offset = { row: row - anchor.row, column: column - anchor.column };
+    const words = grid.messages.at(sheetId, anchor.row, anchor.column, value.error, offset);
+    return { tone: 'error', text: `${here} shows ${value.error}: ${words ?? ERROR_WORDS[value.error]}` };
+  }
+  const note: unknown = data?.custom?.['note'];
+  if (typeof note === 'string') return { tone: 'note', text: `${here}, note: ${note}` };
+  const formula = cells.formula(row, column);
+  if (formula !== '') return { tone: 'plain', text: functionWords(formula, list) };
+  if (anchor.row !== row || anchor.column !== column) {
+    const from = formatArea({ top: anchor.row, left: anchor.column, rows: 1, columns: 1 });
+    return { tone: 'plain', text: `${here} is filled by the formula in ${from}.` };
+  }
+  return { tone: 'plain', text: value === null ? HINT : '' };
+}
+
+/** Name and description of the first function of ours in a formula. */
+function functionWords(formula: string, list: FunctionList): string {
+  const called = new RegExp(`${NAMESPACE}\\.([A-Z]+)\\(`, 'i').exec(formula)?.[1]?.toUpperCase();
+  const entry = list.functions.find(({ id }) => id === called);
+  return entry === undefined ? '' : `${cellName(entry)}: ${entry.description ?? ''}`;
+}

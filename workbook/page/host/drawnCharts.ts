@@ -1,0 +1,69 @@
+import { ICommandService } from '@univerjs/core';
+import { createElement } from 'react';
+import type { ChartSpec, Ref } from '../../../taskpane/port';
+import type { Grid } from '../grid/openGrid';
+import { ChartFrame } from './ChartFrame';
+import { chartPoints } from './chartPoints';
+import { CHART_HEIGHT_PX, CHART_WIDTH_PX } from './chartSize';
+import { placeOf } from './place';
+
+interface Drawn {
+  readonly id: string;
+  readonly spec: ChartSpec;
+  readonly at: Ref;
+}
+
+const COMPONENT = 'LatentryChart';
+const PROPERTY = 'latentry.charts';
+
+/** The charts over the grid; kept with the workbook as a small text, drawn again when it is opened. */
+export function drawnCharts(grid: Grid): { add(spec: ChartSpec, at: Ref): void } {
+  const changed = new Set<() => void>();
+  const subscribe = (listener: () => void) => {
+    changed.add(listener);
+    return () => changed.delete(listener);
+  };
+  const tell = () => {
+    for (const listener of changed) listener();
+  };
+  const kept = () => JSON.parse(grid.properties.get(PROPERTY) ?? '[]') as Drawn[];
+  const keep = (charts: readonly Drawn[]) => {
+    if (charts.length === 0) grid.properties.delete(PROPERTY);
+    else grid.properties.set(PROPERTY, JSON.stringify(charts));
+  };
+
+  const frames = new Map<string, Parameters<typeof ChartFrame>[0]>();
+  grid.api.registerComponent(COMPONENT, ({ data }: { data?: { chart?: string } }) => {
+    const props = frames.get(data?.chart ?? '');
+    return props === undefined ? null : createElement(ChartFrame, props);
+  });
+
+  const show = ({ id, spec, at }: Drawn) => {
+    const { sheet, area } = placeOf(grid, at);
+    frames.set(id, { spec, subscribe, read: () => spec.series.map((series) => chartPoints(grid, series)) });
+    const range = sheet.getRange(area.top, area.left, area.rows, area.columns);
+    const size = { width: CHART_WIDTH_PX, height: CHART_HEIGHT_PX };
+    sheet.addFloatDomToRange(range, { componentKey: COMPONENT, data: { chart: id }, allowTransform: true }, size, id);
+  };
+
+  const restore = () => {
+    frames.clear();
+    for (const chart of kept()) if (grid.sheet(chart.at.sheet) !== undefined) show(chart);
+  };
+  grid.api.getFormula().calculationResultApplied(tell);
+  grid.injector.get(ICommandService).onCommandExecuted(({ id }) => {
+    if (id === 'sheet.mutation.set-range-values') tell();
+    if (id !== 'sheet.mutation.set-drawing-apply') return;
+    keep(kept().filter((chart) => grid.sheet(chart.at.sheet)?.getFloatDomById(chart.id) != null));
+  });
+  grid.onOpened(restore);
+  restore();
+
+  return {
+    add: (spec, at) => {
+      const chart = { id: crypto.randomUUID(), spec, at };
+      show(chart);
+      keep([...kept(), chart]);
+    },
+  };
+}

@@ -1,0 +1,29 @@
+import { CommandType, ICommandService } from '@univerjs/core';
+import type { Grid } from '../grid/openGrid';
+
+const SOON_MS = 500;
+
+export interface Saving {
+  /** True where the last changes wait to be saved. */
+  pending(): boolean;
+  flush(): void;
+}
+
+/** Calls `changed` at each change of the open workbook and `save` a little after the last of them. */
+export function autosave(grid: Grid, changed: (byPerson: boolean) => void, save: () => void): Saving {
+  let timer: ReturnType<typeof setTimeout> | undefined;
+  const flush = () => {
+    if (timer === undefined) return;
+    clearTimeout(timer);
+    timer = undefined;
+    save();
+  };
+  grid.injector.get(ICommandService).onCommandExecuted((command, options) => {
+    const params = command.params as { unitId?: string } | undefined;
+    if (command.type !== CommandType.MUTATION || params?.unitId !== grid.workbook().getId()) return;
+    changed(options?.fromFormula !== true && options?.onlyLocal !== true);
+    clearTimeout(timer);
+    timer = setTimeout(flush, SOON_MS);
+  });
+  return { flush, pending: () => timer !== undefined };
+}

@@ -1,0 +1,4 @@
+import { createCustomFunctions } from '../grid/customFunctions';
+
+// Loaded before the functions bundle: what that associates is kept where the page finds it.
+Object.assign(globalThis, { CustomFunctions: createCustomFunctions() });
