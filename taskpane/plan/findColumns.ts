@@ -17,10 +17,13 @@ export interface DataColumn {
 
 export type Part = 'temperature' | 'latent' | 'uLatent' | 'uTemperature';
 
+/** Place of each part in the columns, where it was found. */
+export type Parts = Readonly<Partial<Record<Part, number | undefined>>>;
+
 /** Columns in the order of the ranges; each part is a place in `columns` where it was found. */
 export interface FoundColumns {
   readonly columns: readonly DataColumn[];
-  readonly parts: Readonly<Partial<Record<Part, number>>>;
+  readonly parts: Parts;
 }
 
 /**
@@ -31,7 +34,7 @@ export interface FoundColumns {
  */
 export function findColumns(blocks: readonly Block[]): FoundColumns {
   const columns = blocks.flatMap(columnsOf);
-  const parts: Partial<Record<Part, number>> = {};
+  const parts: Partial<Record<Part, number | undefined>> = {};
   for (const [i, { header }] of columns.entries()) {
     if (header?.role === 'temperature') parts.temperature ??= i;
     if (header?.role === 'latent') parts.latent ??= i;
@@ -50,17 +53,14 @@ export function findColumns(blocks: readonly Block[]): FoundColumns {
     if (rest[0] !== undefined) parts.uLatent = rest[0];
     if (rest[1] !== undefined) parts.uTemperature = rest[1];
   }
-  return {
-    columns,
-    parts: Object.fromEntries(Object.entries(parts).filter(([, i]) => (i as number | undefined) !== undefined)),
-  };
+  return { columns, parts };
 }
 
 const isOpen = (header: Header | undefined) => header === undefined || header.role === 'unknown';
 
 const hasNumber = (values: readonly Cell[]) => values.some((value) => typeof value === 'number');
 
-function partOf(parts: Readonly<Partial<Record<Part, number>>>, place: number): Part | undefined {
+function partOf(parts: Parts, place: number): Part | undefined {
   return (['temperature', 'latent'] as const).find((part) => parts[part] === place);
 }
 

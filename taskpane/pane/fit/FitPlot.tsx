@@ -1,0 +1,45 @@
+import { useEffect, useRef, useState } from 'react';
+import { useLook } from '../look/useLook';
+import type { FitPicture } from './drawFit';
+
+/** The picture of a fit; the drawing code is fetched when the first fit is shown. */
+export function FitPlot({ picture }: { readonly picture: Omit<FitPicture, 'width'> }) {
+  const look = useLook();
+  const frame = useRef<HTMLDivElement>(null);
+  const width = useWidth(frame);
+  const [failed, setFailed] = useState(false);
+  useEffect(() => {
+    if (width === 0) return undefined;
+    let current = true;
+    import('./drawFit').then(
+      ({ drawFit }) => {
+        if (current) frame.current?.replaceChildren(...drawFit({ ...picture, width }));
+      },
+      () => {
+        if (current) setFailed(true);
+      },
+    );
+    return () => {
+      current = false;
+    };
+  }, [picture, width]);
+  return (
+    <>
+      <div ref={frame} style={{ minHeight: 336, minWidth: 0 }} />
+      {failed && <p className={look.quiet}>The picture could not be loaded. The table below holds the same numbers.</p>}
+    </>
+  );
+}
+
+/** Width of an element in whole pixels, followed while it is on the page. */
+function useWidth(frame: React.RefObject<HTMLDivElement | null>): number {
+  const [width, setWidth] = useState(0);
+  useEffect(() => {
+    const element = frame.current;
+    if (element === null) return undefined;
+    const observer = new ResizeObserver(() => setWidth(Math.floor(element.clientWidth)));
+    observer.observe(element);
+    return () => observer.disconnect();
+  }, [frame]);
+  return width;
+}
