@@ -2,6 +2,7 @@ import type { LatentKind, Mark } from '../answer';
 import { Problem, shortNumber } from '../problem';
 import type { Change, Curve, Phase } from '../substance';
 import { noSuchChange } from './coexistenceCurves';
+import { fastFusionHeat, fastFusionSlope } from './fastLines';
 import { idealGasBranch, phaseBranch, type PhaseBranch } from './phaseBranch';
 import { NORMAL_PRESSURE_PA, STANDARD_PRESSURE_PA } from './ranges';
 import { CRITICAL_PRESSURE_PA } from './saturationAuxiliary';
@@ -47,7 +48,7 @@ function make(change: Change, kind: LatentKind, pressurePa: number, answered: 'l
       reason: `the colder phase ends at ${shortNumber(cold.toK)} K and the warmer one begins at ${shortNumber(hot.fromK)} K`,
     });
   }
-  return waterCurve({
+  const curve = waterCurve({
     from,
     to,
     subject,
@@ -61,6 +62,9 @@ function make(change: Change, kind: LatentKind, pressurePa: number, answered: 'l
         : (t) => hot.heatCapacity(t) - cold.heatCapacity(t),
     marksAt: (t) => marksOf(cold, hot, t),
   });
+  if (change !== 'fusion' || pressurePa !== NORMAL_PRESSURE_PA) return curve;
+  const fast = answered === 'latent' ? fastFusionHeat : fastFusionSlope;
+  return { ...curve, at: (t) => (t >= from && t <= to ? fast(t) : Number.NaN) };
 }
 
 function marksOf(cold: PhaseBranch, hot: PhaseBranch, t: number): readonly Mark[] {

@@ -3,28 +3,29 @@ import { Problem } from '../problem';
 import type { Change, Curve } from '../substance';
 import { CRITICAL_TEMPERATURE_K } from './fluidCoefficients';
 import {
-  meltingHeat,
-  meltingSlope,
-  meltingTerm,
-  sublimationHeat,
-  sublimationSlope,
-  sublimationTerm,
-} from './iceEquilibriumLines';
+  fastMeltingHeat,
+  fastMeltingSlope,
+  fastSublimationHeat,
+  fastSublimationSlope,
+  fastVaporizationHeat,
+  fastVaporizationSlope,
+} from './fastLines';
+import { meltingTerm, sublimationTerm } from './iceEquilibriumLines';
 import {
   COLDEST_LIQUID_K,
   COLDEST_MELTING_K,
   COLDEST_VAPOUR_K,
+  MOLAR_MASS,
   NEAREST_TO_CRITICAL_K,
   NEAR_CRITICAL_K,
   TRIPLE_K,
 } from './ranges';
-import { vaporizationHeat, vaporizationSlope, vaporizationTerm } from './saturationLine';
+import { vaporizationTerm } from './saturationLine';
 import { R10_06, R6_95 } from './sources';
-import { waterCurve, type CurveParts } from './waterCurve';
 
 export type Answered = 'latent' | 'slope' | 'term';
 
-/** The three lines, each with its range and its three functions per kilogram. */
+/** The three lines, each with its range and its three functions per mole. */
 interface Line {
   readonly from: number;
   readonly to: number;
@@ -55,21 +56,29 @@ const lines: Readonly<Record<string, Line>> = {
     sources: [R6_95],
     method: 'equal pressure and Gibbs energy of liquid and vapour',
     marksAt: (t) => (t < TRIPLE_K ? BELOW_TRIPLE : t > NEAR_CRITICAL_K ? NEAR_CRITICAL : NO_MARKS),
-    functions: { latent: vaporizationHeat, slope: vaporizationSlope, term: vaporizationTerm },
+    functions: {
+      latent: fastVaporizationHeat,
+      slope: fastVaporizationSlope,
+      term: (t) => MOLAR_MASS * vaporizationTerm(t),
+    },
   },
   sublimation: {
     from: COLDEST_VAPOUR_K,
     to: TRIPLE_K,
     sources: [R6_95, R10_06],
     method: 'equal Gibbs energy of ice and vapour',
-    functions: { latent: sublimationHeat, slope: sublimationSlope, term: sublimationTerm },
+    functions: {
+      latent: fastSublimationHeat,
+      slope: fastSublimationSlope,
+      term: (t) => MOLAR_MASS * sublimationTerm(t),
+    },
   },
   fusion: {
     from: COLDEST_MELTING_K,
     to: TRIPLE_K,
     sources: [R6_95, R10_06],
     method: 'equal Gibbs energy of ice and liquid',
-    functions: { latent: meltingHeat, slope: meltingSlope, term: meltingTerm },
+    functions: { latent: fastMeltingHeat, slope: fastMeltingSlope, term: (t) => MOLAR_MASS * meltingTerm(t) },
   },
 };
 
@@ -80,20 +89,21 @@ const WORDS: Readonly<Record<Answered, string>> = {
 };
 
 function make(change: Change, line: Line, answered: Answered): Curve {
+  const { from, method, sources, marksAt } = line;
   const to = answered === 'latent' ? line.to : (line.slopeTo ?? line.to);
-  const perKilogram = line.functions[answered];
-  const parts: CurveParts = {
-    from: line.from,
+  const value = line.functions[answered];
+  return {
+    axis: 'temperature',
+    from,
     to,
     subject: `${change} ${WORDS[answered]}`,
     unit: answered === 'latent' ? 'J/mol' : 'J/(mol K)',
     kind: 'coexistence',
-    method: line.method,
-    sources: line.sources,
-    perKilogram: (t) => (t >= line.from && t <= to ? perKilogram(t) : Number.NaN),
-    ...(line.marksAt === undefined ? {} : { marksAt: line.marksAt }),
+    method,
+    sources,
+    at: (t) => (t >= from && t <= to ? value(t) : Number.NaN),
+    ...(marksAt === undefined ? {} : { marksAt }),
   };
-  return waterCurve(parts);
 }
 
 const curves = new Map<string, Curve>();

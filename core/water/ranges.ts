@@ -19,10 +19,10 @@ export const TRIPLE_PRESSURE_PA = 611.654771;
 /** Where ice Ih, ice III and liquid meet: the cold end of the melting line of ice Ih (R14-08). */
 export const COLDEST_MELTING_K = 251.165;
 /**
- * Up to here the equilibrium of liquid and vapour is solved; on the last millikelvin the two densities differ by too
+ * Up to here the equilibrium of liquid and vapour is solved; on the last 1/1024 K the two densities differ by too
  * little for double precision, and the saturation line is carried on as a power law to the critical point.
  */
-export const NEAREST_TO_CRITICAL_K = CRITICAL_TEMPERATURE_K - 1e-3;
+export const NEAREST_TO_CRITICAL_K = CRITICAL_TEMPERATURE_K - 1 / 1024;
 /** Heat capacities of the saturated phases grow without bound towards the critical point; from here on numbers are marked. */
 export const NEAR_CRITICAL_K = CRITICAL_TEMPERATURE_K - 0.1;
 export const NORMAL_PRESSURE_PA = 101325;

@@ -1,10 +1,13 @@
 import type { Mark } from '../answer';
 import type { Curve, Surface } from '../substance';
 import { CRITICAL_TEMPERATURE_K } from './fluidCoefficients';
-import { sublimationPressure } from './iceEquilibriumLines';
-import { liquidVapourTemperature, sublimationTemperature } from './lineTemperature';
+import {
+  fastLiquidVapourPressure,
+  fastLiquidVapourTemperature,
+  fastSublimationPressure,
+  fastSublimationTemperature,
+} from './fastLines';
 import { COLDEST_LIQUID_K, COLDEST_VAPOUR_K, TRIPLE_K, TRIPLE_PRESSURE_PA } from './ranges';
-import { liquidVapourPressure } from './saturationLine';
 import { CRITICAL_PRESSURE_PA } from './saturationAuxiliary';
 import { R10_06, R6_95 } from './sources';
 
@@ -28,15 +31,15 @@ const sides: Readonly<Record<Surface, Side>> = {
 };
 
 const pressureOf: Readonly<Record<Surface, (temperatureK: number) => number>> = {
-  stable: (t) => (t < TRIPLE_K ? sublimationPressure(t) : liquidVapourPressure(t)),
-  ice: sublimationPressure,
-  liquid: liquidVapourPressure,
+  stable: (t) => (t < TRIPLE_K ? fastSublimationPressure(t) : fastLiquidVapourPressure(t)),
+  ice: fastSublimationPressure,
+  liquid: fastLiquidVapourPressure,
 };
 
 const temperatureOf: Readonly<Record<Surface, (pressurePa: number) => number>> = {
-  stable: (p) => (p < TRIPLE_PRESSURE_PA ? sublimationTemperature(p) : liquidVapourTemperature(p)),
-  ice: sublimationTemperature,
-  liquid: liquidVapourTemperature,
+  stable: (p) => (p < TRIPLE_PRESSURE_PA ? fastSublimationTemperature(p) : fastLiquidVapourTemperature(p)),
+  ice: fastSublimationTemperature,
+  liquid: fastLiquidVapourTemperature,
 };
 
 function pressureCurve(surface: Surface): Curve {
