@@ -45,8 +45,20 @@ function table(
   const share = (heat: number): number => (path.heat === 0 ? 0 : heat / path.heat);
   return [
     ['Step', `From / ${temperature.symbol}`, `To / ${temperature.symbol}`, `Heat / ${heatUnit.symbol}`, 'Share'],
-    ...path.steps.map(({ label, fromK, toK, heat }) => [label, degrees(fromK), degrees(toK), heat * scale, share(heat)]),
-    ['total', degrees(path.from.temperatureK), degrees(path.to.temperatureK), path.heat * scale, path.heat === 0 ? 0 : 1],
+    ...path.steps.map(({ label, fromK, toK, heat }) => [
+      label,
+      degrees(fromK),
+      degrees(toK),
+      heat * scale,
+      share(heat),
+    ]),
+    [
+      'total',
+      degrees(path.from.temperatureK),
+      degrees(path.to.temperatureK),
+      path.heat * scale,
+      path.heat === 0 ? 0 : 1,
+    ],
     ...path.marks.map((mark) => [`${mark.code}: ${mark.text}`, '', '', '', '']),
   ];
 }

@@ -1,9 +1,12 @@
 import { deltaCp } from '../deltaCp';
+import { fitDeltaCp } from '../fitDeltaCp';
+import { heat } from '../heat';
 import { heatCap } from '../heatCap';
 import { latent } from '../latent';
 import { satPressure } from '../satPressure';
 import { toUnits } from '../toUnits';
 import type { Check } from './check';
+import { fitChecks } from './fitChecks';
 import { unitChecks } from './unitChecks';
 import { waterChecks } from './waterChecks';
 
@@ -12,12 +15,15 @@ const functions: Readonly<Record<string, (...args: never[]) => unknown[][]>> = {
   DELTACP: deltaCp,
   HEATCAP: heatCap,
   SATPRESSURE: satPressure,
+  HEAT: heat,
+  FITDELTACP: fitDeltaCp,
   TOUNITS: toUnits,
 };
 
 /** Every check with the call that computes it. */
 export const checks: readonly { readonly check: Check; readonly run: () => number }[] = [
   ...waterChecks,
+  ...fitChecks,
   ...unitChecks,
 ].map((check) => ({ check, run: () => compute(check) }));
 

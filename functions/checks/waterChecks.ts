@@ -201,6 +201,15 @@ export const waterChecks: readonly Check[] = [
     source: computed,
   },
   {
+    call: 'HEAT',
+    args: ['water', 'melting solid', 'melting liquid'],
+    settings: KJ,
+    expected: 333.4265169,
+    within: 1e-7,
+    because: `${LAST_DIGIT}, and two enthalpies rounded`,
+    source: `${computedIce}, at 101.325 kPa`,
+  },
+  {
     call: 'HEATCAP',
     args: ['water', 'solid', -30],
     settings: 'temperature=degC; heat_capacity=J/(kg K)',

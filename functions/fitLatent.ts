@@ -1,0 +1,86 @@
+/* eslint-disable @typescript-eslint/no-explicit-any -- the host's own type for a matrix of anything */
+import { findSubstance } from '../core/catalogue/find';
+import { latentFromFit } from '../core/fit/latentFromFit';
+import { readFitTable, type FitFromTable } from '../core/fit/readFitTable';
+import { Problem } from '../core/problem';
+import { between } from '../core/units/linear';
+import { unitOf } from '../core/units/unitOf';
+import { answer } from './edge/answer';
+import type { Block } from './edge/block';
+import { heatFactor } from './edge/fitUnits';
+import { numberColumn } from './edge/numberColumn';
+import type { BlockwiseSpec, Table } from './edge/spec';
+import type { Settings } from './settings/settings';
+
+const spec: BlockwiseSpec = {
+  family: 'blockwise',
+  name: 'FITLATENT',
+  args: [
+    { name: 'fit', kind: 'block' },
+    { name: 'temperature', kind: 'block' },
+  ],
+  options: ['substance'],
+  run: ([fit, temperature], settings) => table(required('fit', fit), required('temperature', temperature), settings),
+};
+
+function table(fitBlock: Block, temperatures: Block, settings: Settings): Table {
+  const fit = inHeatPerDegree(readFitTable(fitBlock.cells));
+  const name = settings.options['substance'] ?? fit.substance;
+  const substance = name === undefined ? undefined : findSubstance(name);
+  const factor = heatFactor(unitOf(fit.heatUnit, 'heat'), settings.units.heat, substance);
+  const toFit = between(settings.units.temperature, unitOf(fit.temperatureUnit, 'temperature'));
+  const { header, cells } = numberColumn(temperatures);
+  const pairs: Table = Array.from(cells, (cell, i) => {
+    if (cell === null) return ['', ''];
+    if (typeof cell !== 'number') {
+      throw new Problem({
+        code: 'argument',
+        argument: 'temperature',
+        allowed: "numbers in the workbook's unit",
+        received: `"${String(cell)}" in row ${i + 1}`,
+      });
+    }
+    const { value, uLine } = latentFromFit(fit, cell * toFit.scale + toFit.offset);
+    return [value * factor, uLine === undefined ? '' : uLine * Math.abs(factor)];
+  });
+  if (header !== undefined) pairs.unshift([`latent heat / ${settings.units.heat.symbol}`, 'standard uncertainty']);
+  return temperatures.rows === 1 && temperatures.columns > 1 ? turned(pairs) : pairs;
+}
+
+/** The table holds the slope in the heat-capacity unit; a prediction needs it in heat per degree of the table. */
+function inHeatPerDegree(fit: FitFromTable): FitFromTable {
+  const heat = unitOf(fit.heatUnit, 'heat').factor;
+  const perDegree =
+    (unitOf(fit.heatCapacityUnit, 'heatCapacity').factor * unitOf(fit.temperatureUnit, 'temperature').factor) / heat;
+  const scaled = (value: number | undefined): number | undefined =>
+    value === undefined ? undefined : value * perDegree;
+  return { ...fit, slope: fit.slope * perDegree, uSlope: scaled(fit.uSlope), covariance: scaled(fit.covariance) };
+}
+
+function turned(pairs: Table): Table {
+  return [pairs.map((pair) => pair[0] ?? ''), pairs.map((pair) => pair[1] ?? '')];
+}
+
+function required(name: string, block: Block | undefined): Block {
+  if (block !== undefined) return block;
+  throw new Problem({ code: 'argument', argument: name, allowed: 'a range: it is required', received: 'nothing' });
+}
+
+/**
+ * Latent heat at a temperature from the table of FITDELTACP, with the standard uncertainty of the fitted line beside it.
+ * @customfunction FITLATENT
+ * @requiresParameterAddresses
+ * @param fit The whole table that FITDELTACP spilled.
+ * @param temperature One temperature, or a column or row of them, in the workbook's unit.
+ * @param [settings] Latentry_units, or text as "heat=kJ/mol; substance=water".
+ * @param invocation The call itself.
+ * @returns Value and standard uncertainty, in the workbook's heat unit.
+ */
+export function fitLatent(
+  fit: any[][],
+  temperature: any[][],
+  settings?: any[][][],
+  invocation?: CustomFunctions.Invocation,
+): any[][] {
+  return answer(spec, [fit, temperature, settings, invocation]);
+}
