@@ -69,6 +69,8 @@ export interface BookList {
   readonly source?: string;
   /** Shown when the cell is selected. */
   readonly prompt?: string;
+  /** The choices are usual ones only: other entries are taken too. */
+  readonly open?: boolean;
 }
 
 export interface BookPrint {

@@ -32,16 +32,18 @@ const sameRule = (a: BookList, b: BookList) =>
   a.range === b.range &&
   a.source === b.source &&
   a.prompt === b.prompt &&
+  (a.open ?? false) === (b.open ?? false) &&
   (a.source !== undefined || a.values.join(',') === b.values.join(','));
 
-function listXml({ range, values, source, prompt }: BookList): string {
+function listXml({ range, values, source, prompt, open }: BookList): string {
   const inline = `"${values.join(',').replace(/"/g, '""')}"`;
   // Choices too long for a rule, or with commas inside, need cells to stand in; without them no rule is better than a wrong one.
   if (source === undefined && (inline.length > LONGEST_INLINE + 2 || values.some((value) => value.includes(','))))
     return '';
   const shown = prompt === undefined ? '' : ` showInputMessage="1" prompt="${attributeText(prompt)}"`;
+  const strict = open === true ? '' : ' showErrorMessage="1"';
   return (
-    `<dataValidation type="list" allowBlank="1" showErrorMessage="1"${shown} sqref="${range}">` +
+    `<dataValidation type="list" allowBlank="1"${strict}${shown} sqref="${range}">` +
     `<formula1>${escapeXml(source ?? inline)}</formula1></dataValidation>`
   );
 }

@@ -13,6 +13,8 @@ export function readList(attributes: Readonly<Record<string, string>>, formula: 
   const text = unescapeText(formula).trim();
   const inline = /^"([^]*)"$/.exec(text)?.[1];
   const prompt = attributes['prompt'] === undefined ? {} : { prompt: unescapeText(attributes['prompt']) };
+  const strict = attributes['showErrorMessage'] === '1' || attributes['showErrorMessage'] === 'true';
+  const open = strict ? {} : { open: true };
   const choices =
     inline === undefined
       ? { values: [], source: text }
@@ -22,5 +24,5 @@ export function readList(attributes: Readonly<Record<string, string>>, formula: 
             .split(',')
             .map((each) => each.trim()),
         };
-  return attributes['sqref'].split(/\s+/).map((range) => ({ range, ...choices, ...prompt }));
+  return attributes['sqref'].split(/\s+/).map((range) => ({ range, ...choices, ...prompt, ...open }));
 }

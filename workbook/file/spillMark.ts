@@ -54,7 +54,7 @@ function findOrAdd(edits: PackageEdits, main: string, part: string | undefined):
   text = insertAfterLast(text, part, FUTURE, ['metadataTypes', 'metadataStrings', 'mdxMetadata', 'futureMetadata']);
   if (cells === 0) {
     const holders = ['metadataTypes', 'metadataStrings', 'mdxMetadata', 'futureMetadata'];
-    text = insertAfterLast(text, part, '<cellMetadata></cellMetadata>', holders);
+    text = insertAfterLast(text, part, '<cellMetadata count="0"></cellMetadata>', holders);
   }
   text = insertLast(text, part, record(types + 1), 'cellMetadata');
   edits.set(part, recount(recount(text, 'metadataTypes', types + 1), 'cellMetadata', cells + 1));
