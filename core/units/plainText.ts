@@ -9,7 +9,7 @@ const SUBSCRIPTS = '₀₁₂₃₄₅₆₇₈₉';
 export function plainText(text: string): string {
   if (PLAIN.test(text)) return text.replace(/ +/g, ' ').trim();
   return text
-    .replace(/[⁺⁻]?[⁰¹²³⁴⁵⁶⁷⁸⁹]+/g, (run) => `^${[...run].map(unraised).join('')}`)
+    .replace(/[⁺⁻]?[⁰¹²³⁴⁵⁶⁷⁸⁹]+/g, (run) => `^${Array.from(run, unraised).join('')}`)
     .replace(/[₀-₉]/g, (digit) => String(SUBSCRIPTS.indexOf(digit)))
     .replace(/[\u2010-\u2014\u2212\ufe63\uff0d]/g, '-')
     .replace(/[\u00b7\u22c5\u2022\u2219\u00d7\u2a2f]/g, '*')

@@ -49,7 +49,8 @@ export function settingsFor(parts: readonly unknown[], base: Settings, allowedOp
 function withPart(base: Settings, part: unknown, allowedOptions: readonly string[]): Settings {
   if (part === null || part === undefined || part === '' || part === 0) return base;
   if (typeof part === 'string') return parseSettingsText(part, base, allowedOptions);
-  if (!isRows(part)) throw refused(typeof part === 'object' ? 'something else' : String(part));
+  if (!isRows(part))
+    throw refused(typeof part === 'number' || typeof part === 'boolean' ? String(part) : 'something else');
   if (part.every((row) => row.length === 1)) {
     return part.reduce<Settings>((onto, [cell]) => withPart(onto, cell, allowedOptions), base);
   }

@@ -24,7 +24,10 @@ export function createSettingsStore(): SettingsStore {
   let state: StoreState = { state: 'unread' };
   const listeners = new Set<(state: StoreState) => void>();
   const subscribe = (listener: (state: StoreState) => void): (() => void) => {
-    const own = (next: StoreState): void => listener(next);
+    // A wrapper of its own, so that the same listener can come twice.
+    const own = (next: StoreState): void => {
+      listener(next);
+    };
     listeners.add(own);
     return () => void listeners.delete(own);
   };
@@ -39,19 +42,20 @@ export function createSettingsStore(): SettingsStore {
     subscribe,
     whenRead: (timeoutMs) =>
       new Promise((resolve) => {
-        if (state.state !== 'unread') return resolve(state);
-        let timer: ReturnType<typeof setTimeout> | undefined;
+        // A host without timers gets what is known.
+        if (state.state !== 'unread' || typeof setTimeout !== 'function') {
+          resolve(state);
+          return;
+        }
+        const finish = (): void => {
+          stop();
+          clearTimeout(timer);
+          resolve(state);
+        };
         const stop = subscribe((next) => {
           if (next.state !== 'unread') finish();
         });
-        // A host without timers settles at once with what it has.
-        if (typeof setTimeout !== 'function') return finish();
-        timer = setTimeout(finish, timeoutMs);
-        function finish(): void {
-          stop();
-          if (timer !== undefined) clearTimeout(timer);
-          resolve(state);
-        }
+        const timer = setTimeout(finish, timeoutMs);
       }),
   };
 }

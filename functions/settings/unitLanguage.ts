@@ -37,7 +37,7 @@ interface UnitMath {
     options: { definition: ParsedUnit; offset?: ExactFraction },
     override: { override: boolean },
   ): unknown;
-  readonly Unit: { isValidAlpha(character: string): boolean };
+  readonly Unit: { isValidAlpha: (character: string) => boolean };
 }
 
 /** The language's own order: mass, length, time, current, temperature, luminous intensity, amount, angle, bit. */

@@ -95,7 +95,7 @@ describe('a settings text', () => {
     const barometer = fc.integer({ min: 1, max: 200_000 });
     fc.assert(
       fc.property(pairs, barometer, fc.constantFrom('.', ','), (chosen, pa, decimal) => {
-        const text = Object.entries(chosen).map(([key, value]) => `${key}=${String(value)}`);
+        const text = Object.entries(chosen).map(([key, value]) => `${key}=${value}`);
         const settings = read([...text, `barometer=${pa} Pa`, `decimal=${decimal}`, 'kind=standard'].join('; '));
         expect(parseSettingsText(settingsText(settings), DEFAULT_SETTINGS, OPTIONS)).toEqual(settings);
         expect(parseSettingsBlock(settingsRows(settings), DEFAULT_SETTINGS)).toEqual({ ...settings, options: {} });
