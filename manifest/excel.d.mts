@@ -1,0 +1,1 @@
+export function whyNot(platform: string): string | null;

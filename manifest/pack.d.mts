@@ -1,0 +1,1 @@
+export function pack(base: string, from?: string, target?: string): string;
