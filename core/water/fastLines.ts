@@ -1,7 +1,20 @@
-import { piecewise, piecewiseTowardsEnd, readPieces, SMALLEST_DISTANCE, type ChebyshevPieces } from './chebyshevPieces';
+import {
+  pieceTowardsEnd,
+  piecewise,
+  piecewiseTowardsEnd,
+  readPieces,
+  SMALLEST_DISTANCE,
+  type ChebyshevPieces,
+} from './chebyshevPieces';
 import { bridgeLatent, bridgePressure, criticalBridge } from './criticalBridge';
 import * as data from './fastPath.generated';
-import { CRITICAL_FROM_K, LN_PRESSURE_SCALE, SUPERCOOLED_END_K, SUPERCOOLED_TO_K } from './fastPathPlan';
+import {
+  BOILING_PIECES,
+  CRITICAL_FROM_K,
+  LN_PRESSURE_SCALE,
+  SUPERCOOLED_END_K,
+  SUPERCOOLED_TO_K,
+} from './fastPathPlan';
 import { CRITICAL_TEMPERATURE_K } from './fluidCoefficients';
 import { NEAREST_TO_CRITICAL_K } from './ranges';
 import { CRITICAL_PRESSURE_PA } from './saturationAuxiliary';
@@ -44,7 +57,8 @@ const fusionSlope = readPieces(data.FUSION_SLOPE);
 
 function onLine(tables: LiquidVapourTables, temperatureK: number): number {
   if (temperatureK < SUPERCOOLED_TO_K) return piecewiseTowardsEnd(tables.supercooled, temperatureK - SUPERCOOLED_END_K);
-  if (temperatureK < CRITICAL_FROM_K) return piecewise(tables.middle, temperatureK);
+  // at the border itself the even pieces answer: the numbered ones end just before their largest distance
+  if (temperatureK <= CRITICAL_FROM_K) return piecewise(tables.middle, temperatureK);
   return piecewiseTowardsEnd(tables.critical, CRITICAL_TEMPERATURE_K - temperatureK);
 }
 
@@ -57,6 +71,7 @@ function makeBridge() {
   const pressureSlope = (CRITICAL_PRESSURE_PA - pressure) / (CRITICAL_TEMPERATURE_K - NEAREST_TO_CRITICAL_K);
   return criticalBridge(pressure, pressureSlope, latent, onLine(slope, NEAREST_TO_CRITICAL_K));
 }
+const LARGEST_BOILING_DISTANCE = pieceTowardsEnd(BOILING_PIECES[1])[1];
 const LN_CRITICAL = Math.log(CRITICAL_PRESSURE_PA);
 const LAST_STRETCH_K = CRITICAL_TEMPERATURE_K - 1 / piecewiseTowardsEnd(boilingInverse, SMALLEST_DISTANCE);
 
@@ -80,8 +95,8 @@ export function fastLiquidVapourPressure(temperatureK: number): number {
 /** K, from the pressure of the liquid-vapour line at 235 K to the critical pressure. */
 export function fastLiquidVapourTemperature(pressurePa: number): number {
   const lnP = Math.log(pressurePa);
-  if (lnP < supercooledInverse.to) return 1 / piecewise(supercooledInverse, lnP);
   const distance = (LN_CRITICAL - lnP) * LN_PRESSURE_SCALE;
+  if (distance >= LARGEST_BOILING_DISTANCE) return 1 / piecewise(supercooledInverse, lnP);
   if (distance >= SMALLEST_DISTANCE) return 1 / piecewiseTowardsEnd(boilingInverse, distance);
   return CRITICAL_TEMPERATURE_K - (distance / SMALLEST_DISTANCE) * LAST_STRETCH_K;
 }
