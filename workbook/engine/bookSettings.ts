@@ -50,7 +50,8 @@ function blockState(book: Book, latentry: LatentryBundle): StoreState {
     return { state: 'ready', settings, stamp: JSON.stringify(latentry.settingsRows(settings)) };
   } catch (thrown) {
     const { allowed, received, nearest, row } = problemOf(thrown);
-    const inValue = String(values[row]?.[1] ?? '') === received;
+    const value = values[row]?.[1];
+    const inValue = (typeof value === 'number' || typeof value === 'string') && String(value) === received;
     const words = nearest === undefined ? allowed : `${allowed} (nearest: ${nearest})`;
     return { state: 'broken', cell: cell(row, inValue ? 1 : 0), text: received, message: words };
   }
@@ -71,8 +72,9 @@ interface BlockProblem {
 /** The data of a refusal by the bundle; anything else is a defect and is thrown on. */
 function problemOf(thrown: unknown): BlockProblem {
   const data = (thrown as { data?: Readonly<Record<string, unknown>> }).data;
-  const row = /^Units row (\d+)/.exec(String(data?.['argument'] ?? ''));
-  if (data?.['code'] !== 'argument' || row === null) throw thrown;
+  const argument = data?.['argument'];
+  const row = /^Units row (\d+)/.exec(typeof argument === 'string' ? argument : '');
+  if (data === undefined || row === null) throw thrown;
   const nearest = data['nearest'];
   return {
     allowed: String(data['allowed']),

@@ -59,7 +59,8 @@ function withValue(
   { top, left }: { readonly top: number; readonly left: number },
   { rows, columns }: { readonly rows: number; readonly columns: number },
 ): BookCell {
-  const { spill: _spill, ...rest } = cell;
-  if (cell.array !== undefined || (rows === 1 && columns === 1)) return { ...rest, value };
-  return { ...rest, value, spill: formatArea({ top, left, rows, columns }) };
+  const changed: { -readonly [K in keyof BookCell]: BookCell[K] } = { ...cell, value };
+  delete changed.spill;
+  if (cell.array === undefined && (rows > 1 || columns > 1)) changed.spill = formatArea({ top, left, rows, columns });
+  return changed;
 }

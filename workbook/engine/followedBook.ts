@@ -8,8 +8,7 @@ import { scanFormula } from './scanFormula';
 export function followedBook(book: Book): Book {
   return mapCells(book, (cell) => {
     if (!isUnfollowed(cell)) return cell;
-    const { formula: _formula, spill: _spill, array: _array, ...rest } = cell;
-    return cell.value === null ? { ...rest, value: { error: '#REF!' } } : rest;
+    return { value: cell.value ?? { error: '#REF!' } };
   });
 }
 

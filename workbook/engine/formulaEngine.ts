@@ -1,18 +1,18 @@
 import {
-  CellValueType,
-  type ICellData,
   ICommandService,
   IUniverInstanceService,
-  type IWorkbookData,
   LocaleType,
   LogLevel,
-  type Nullable,
   Univer,
   UniverInstanceType,
 } from '@univerjs/core';
 import {
+  ErrorType,
   FormulaExecutedStateType,
+  ICalculateFormulaService,
   IDefinedNamesService,
+  type IFormulaDependencyTreeJson,
+  IFormulaRuntimeService,
   IFunctionService,
   LexerTreeBuilder,
   SetArrayFormulaDataMutation,
@@ -28,7 +28,10 @@ import { functionClasses, type CallListeners } from '../grid/adapter';
 import type { CellFunction } from '../grid/customFunctions';
 import type { FunctionList } from '../grid/functionList';
 import { mendEngine } from '../grid/mendEngine';
-import { sheetId, type EngineBook, type EngineCells, type EngineSheet, type EngineValue } from './engineBook';
+import { cyclicCells } from './cyclicCells';
+import { sheetId, type EngineBook, type EngineCells } from './engineBook';
+import { engineCells } from './engineCells';
+import { snapshot } from './snapshot';
 
 /** The grid library's formula engine without any grid; everything of the library stays behind this. */
 export interface FormulaEngine {
@@ -68,8 +71,56 @@ export function startFormulaEngine(
   mendEngine(injector);
   const commands = injector.get(ICommandService);
   let queue: Promise<unknown> = Promise.resolve();
+  const noticed = { cycle: false };
+  // The library notices cycles, but forgets them before it tells the results.
+  const runtime = injector.get(IFormulaRuntimeService);
+  const enableCycleDependency = runtime.enableCycleDependency.bind(runtime);
+  runtime.enableCycleDependency = () => {
+    noticed.cycle = true;
+    enableCycleDependency();
+  };
 
-  const run = async (book: EngineBook): Promise<EngineCells[]> => {
+  /** Gives the command's own parameters once `id` was executed, before anything else happens. */
+  const whenExecuted = <T>(id: string, until: (params: T) => boolean): Promise<T> =>
+    new Promise((resolve) => {
+      const listener = commands.onCommandExecuted((command) => {
+        if (command.id !== id || !until(command.params as T)) return;
+        listener.dispose();
+        resolve(command.params as T);
+      });
+    });
+
+  const calculateUnit = async (unitId: string, sheets: number): Promise<EngineCells[] | null> => {
+    let values: ISetFormulaCalculationResultMutation['unitData'][string];
+    let arrays: ISetArrayFormulaDataMutationParams | undefined;
+    noticed.cycle = false;
+    const listener = commands.onCommandExecuted((command) => {
+      if (command.id === SetArrayFormulaDataMutation.id) {
+        arrays = command.params as ISetArrayFormulaDataMutationParams;
+      } else if (command.id === SetFormulaCalculationResultMutation.id) {
+        values = (command.params as ISetFormulaCalculationResultMutation).unitData[unitId];
+      }
+    });
+    const ended = whenExecuted<ISetFormulaCalculationNotificationMutation>(
+      SetFormulaCalculationNotificationMutation.id,
+      ({ functionsExecutedState: state }) => state !== undefined && state !== FormulaExecutedStateType.INITIAL,
+    );
+    void commands.executeCommand(SetFormulaCalculationStartMutation.id, { ...CALCULATE_ALL }, { onlyLocal: true });
+    await ended;
+    listener.dispose();
+    if (noticed.cycle) return null;
+    return Array.from({ length: sheets }, (_sheet, i) => {
+      const id = sheetId(i);
+      return engineCells(
+        values?.[id],
+        arrays?.arrayFormulaCellData[unitId]?.[id],
+        arrays?.arrayFormulaRange[unitId]?.[id],
+      );
+    });
+  };
+
+  /** Works on a book while the library holds it. */
+  const withUnit = async <T>(book: EngineBook, work: (unitId: string) => Promise<T>): Promise<T> => {
     // The library remembers formulas by their text, with the names of an earlier book put in: forget them.
     new LexerTreeBuilder().dispose();
     const unitId = `book${(booksSoFar += 1)}`;
@@ -83,36 +134,25 @@ export function startFormulaEngine(
       names.registerDefinedName(unitId, { id: `name${i}`, name, formulaOrRefString: formula, ...local });
     });
     try {
-      let values: ISetFormulaCalculationResultMutation['unitData'][string];
-      let arrays: ISetArrayFormulaDataMutationParams | undefined;
-      await new Promise<void>((resolve) => {
-        const listener = commands.onCommandExecuted((command) => {
-          if (command.id === SetArrayFormulaDataMutation.id) {
-            arrays = command.params as ISetArrayFormulaDataMutationParams;
-          } else if (command.id === SetFormulaCalculationResultMutation.id) {
-            values = (command.params as ISetFormulaCalculationResultMutation).unitData[unitId];
-          } else if (command.id === SetFormulaCalculationNotificationMutation.id) {
-            const { functionsExecutedState } = command.params as ISetFormulaCalculationNotificationMutation;
-            if (functionsExecutedState === undefined || functionsExecutedState === FormulaExecutedStateType.INITIAL)
-              return;
-            listener.dispose();
-            resolve();
-          }
-        });
-        void commands.executeCommand(SetFormulaCalculationStartMutation.id, { ...CALCULATE_ALL }, { onlyLocal: true });
-      });
-      return book.sheets.map((_sheet, i) => {
-        const id = sheetId(i);
-        return engineCells(
-          values?.[id],
-          arrays?.arrayFormulaCellData[unitId]?.[id],
-          arrays?.arrayFormulaRange[unitId]?.[id],
-        );
-      });
+      return await work(unitId);
     } finally {
       names.removeUnitDefinedName(unitId);
       instances.disposeUnit(unitId);
     }
+  };
+
+  const run = async (book: EngineBook): Promise<readonly EngineCells[]> => {
+    const cycles: IFormulaDependencyTreeJson[] = [];
+    const cells = await withUnit(book, async (unitId) => {
+      const calculated = await calculateUnit(unitId, book.sheets.length);
+      if (calculated === null)
+        cycles.push(...cyclicCells(await injector.get(ICalculateFormulaService).getAllDependencyJson()));
+      return calculated;
+    });
+    if (cells !== null) return cells;
+    // Round a cycle the library gives numbers that depend on the order of calculation: errors instead.
+    const broken = withoutCycles(book, cycles);
+    return (await withUnit(broken, (unitId) => calculateUnit(unitId, book.sheets.length))) ?? [];
   };
 
   return {
@@ -130,63 +170,14 @@ export function startFormulaEngine(
   };
 }
 
-function snapshot(id: string, book: EngineBook): Partial<IWorkbookData> {
-  return {
-    id,
-    name: id,
-    appVersion: '',
-    locale: LocaleType.EN_US,
-    styles: {},
-    sheetOrder: book.sheets.map((_sheet, i) => sheetId(i)),
-    sheets: Object.fromEntries(book.sheets.map((sheet, i) => [sheetId(i), worksheet(sheetId(i), sheet)])),
-  };
-}
-
-function worksheet(id: string, sheet: EngineSheet) {
-  const cellData: Record<number, Record<number, ICellData>> = {};
-  for (const { row, column, value, formula } of sheet.cells) {
-    (cellData[row] ??= {})[column] = formula === undefined ? cellOf(value) : { f: formula };
-  }
-  return { id, name: sheet.name, cellData, rowCount: sheet.rows, columnCount: sheet.columns };
-}
-
-function cellOf(value: EngineValue): ICellData {
-  switch (typeof value) {
-    case 'number':
-      return { v: value, t: CellValueType.NUMBER };
-    case 'boolean':
-      return { v: value ? 1 : 0, t: CellValueType.BOOLEAN };
-    case 'string':
-      return { v: value, t: CellValueType.STRING };
-    default:
-      return value === null ? {} : { v: value.code, t: CellValueType.STRING };
-  }
-}
-
-type Matrix<T> = Readonly<Record<number, Readonly<Record<number, T>>>> | null | undefined;
-
-function engineCells(
-  values: Matrix<Nullable<ICellData>>,
-  spilled: Matrix<Nullable<ICellData>>,
-  ranges: Matrix<{ startRow: number; endRow: number; startColumn: number; endColumn: number }>,
-): EngineCells {
-  const at = (row: number, column: number) => spilled?.[row]?.[column] ?? values?.[row]?.[column];
-  return {
-    value: (row, column) => valueOf(at(row, column)),
-    extent: (row, column) => {
-      const range = ranges?.[row]?.[column];
-      if (range === undefined) return { rows: 1, columns: 1 };
-      return { rows: range.endRow - range.startRow + 1, columns: range.endColumn - range.startColumn + 1 };
-    },
-  };
-}
-
-const ERROR = /^#(?:[A-Z]+\/?[A-Z0]*[!?]?|GETTING_DATA)$/;
-
-function valueOf(cell: Nullable<ICellData>): EngineValue {
-  const value = cell?.v;
-  if (value === undefined || value === null) return null;
-  if (cell?.t === CellValueType.BOOLEAN) return value === 1 || value === true;
-  if (typeof value === 'string') return ERROR.test(value) ? { code: value } : value;
-  return value;
+/** The book with each formula of a cycle replaced by the error that it shows. */
+function withoutCycles(book: EngineBook, cycles: readonly IFormulaDependencyTreeJson[]): EngineBook {
+  const places = new Set(cycles.map(({ subUnitId, row, column }) => `${subUnitId},${row},${column}`));
+  const sheets = book.sheets.map((sheet, i) => ({
+    ...sheet,
+    cells: sheet.cells.map((cell) =>
+      places.has(`${sheetId(i)},${cell.row},${cell.column}`) ? { ...cell, formula: `=${ErrorType.CYCLE}` } : cell,
+    ),
+  }));
+  return { ...book, sheets };
 }

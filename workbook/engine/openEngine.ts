@@ -81,7 +81,7 @@ export async function openEngine(options: { readonly bundlePath: string }): Prom
     if (typeof value !== 'object' || value === null) return value;
     if (!formulas.isWellFormed(anchor.formula)) return malformed(anchor.formula);
     const said = messages.at(sheetId(anchor.sheet), anchor.row, anchor.column, value.code, { row, column });
-    return errorWords(value.code, said, anchor.formula, formulas.functionNames);
+    return errorWords(value.code, said, anchor.formula, () => formulas.functionNames());
   };
 
   const calculate = async (book: Book, unitsText: string | undefined): Promise<Book> => {
@@ -110,7 +110,9 @@ export async function openEngine(options: { readonly bundlePath: string }): Prom
       column: 0,
       formula: asFormula(text),
     }));
-    const refusals = anchors.map(({ formula }) => refusalOf(formula, formulas.isWellFormed, known !== undefined));
+    const refusals = anchors.map(({ formula }) =>
+      refusalOf(formula, (text) => formulas.isWellFormed(text), known !== undefined),
+    );
     const sheets = anchors.map(({ formula }, i): EngineSheet => {
       const cell = { row: 0, column: 0, value: null, formula };
       return { name: `${OWN_SHEET} ${i + 1}`, ...WHOLE_SHEET, cells: refusals[i] === undefined ? [cell] : [] };

@@ -1,5 +1,5 @@
 import type { Nullable } from '@univerjs/core';
-import type { ArrayValueObject, BaseValueObject } from '@univerjs/engine-formula';
+import { ArrayValueObject, type BaseValueObject } from '@univerjs/engine-formula';
 import type { FunctionEntry } from './functionList';
 
 /**
@@ -31,11 +31,10 @@ function isOmitted(variant: BaseValueObject): boolean {
 }
 
 function argument(variant: BaseValueObject, matrix: boolean): unknown {
-  if (!variant.isArray()) return matrix ? [[element(variant)]] : element(variant);
-  const array = variant as ArrayValueObject;
-  if (!matrix) return element(array.get(0, 0));
-  const columns = array.getColumnCount();
-  return array.getArrayValue().map((row) => {
+  if (!(variant instanceof ArrayValueObject)) return matrix ? [[element(variant)]] : element(variant);
+  if (!matrix) return element(variant.get(0, 0));
+  const columns = variant.getColumnCount();
+  return variant.getArrayValue().map((row) => {
     const cells = new Array<unknown>(columns);
     for (let c = 0; c < columns; c++) cells[c] = element(row[c]);
     return cells;

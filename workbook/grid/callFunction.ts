@@ -1,4 +1,4 @@
-import type { ArrayValueObject, BaseValueObject } from '@univerjs/engine-formula';
+import { ArrayValueObject, type BaseValueObject } from '@univerjs/engine-formula';
 import { formatArea, formatReference } from '../../taskpane/hosts/address';
 import { excelArguments } from './arguments';
 import type { CallPlace } from './callPlace';
@@ -59,17 +59,11 @@ function checkCount(entry: FunctionEntry, received: number): void {
 
 /** Where a range argument lies, `Sheet!A1:B2`; null for what is no reference. */
 function addressOf(variant: BaseValueObject, sheetNames: Readonly<Record<string, string>>): string | null {
-  if (!variant.isArray()) return null;
-  const array = variant as ArrayValueObject;
-  const sheetName = sheetNames[array.getSheetId()];
-  if (sheetName === undefined || array.getCurrentRow() < 0) return null;
-  return address(
-    sheetName,
-    array.getCurrentRow(),
-    array.getCurrentColumn(),
-    array.getRowCount(),
-    array.getColumnCount(),
-  );
+  if (!(variant instanceof ArrayValueObject)) return null;
+  const sheetName = sheetNames[variant.getSheetId()];
+  const [row, column] = [variant.getCurrentRow(), variant.getCurrentColumn()];
+  if (sheetName === undefined || row < 0) return null;
+  return address(sheetName, row, column, variant.getRowCount(), variant.getColumnCount());
 }
 
 function address(sheet: string, top: number, left: number, rows: number, columns: number): string {

@@ -69,13 +69,12 @@ function fault(code: ErrorType, message: string, row: number, column: number, fa
   return ErrorValueObject.create(code);
 }
 
-const gridCodes: ReadonlySet<string> = new Set(Object.values(ErrorType));
+const gridCodes: ReadonlyMap<string, ErrorType> = new Map(Object.values(ErrorType).map((code) => [code, code]));
 
 function errorCode(value: unknown): ErrorType | undefined {
-  if (typeof value !== 'object' || value === null || !('code' in value) || typeof value.code !== 'string')
-    return undefined;
-  if (!value.code.startsWith('#')) return undefined;
-  return gridCodes.has(value.code) ? (value.code as ErrorType) : ErrorType.VALUE;
+  if (typeof value !== 'object' || value === null || !('code' in value)) return undefined;
+  if (typeof value.code !== 'string' || !value.code.startsWith('#')) return undefined;
+  return gridCodes.get(value.code) ?? ErrorType.VALUE;
 }
 
 function messageOf(value: unknown): string {

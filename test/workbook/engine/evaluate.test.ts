@@ -20,7 +20,8 @@ async function one(formula: string, book?: Book): Promise<Cell> {
 
 /** The arguments that ECHO received. */
 async function received(formula: string, book?: Book): Promise<unknown> {
-  return JSON.parse(String(await one(formula, book)));
+  const text = await one(formula, book);
+  return typeof text === 'string' ? JSON.parse(text) : text;
 }
 
 const data: Book = {
