@@ -61,13 +61,14 @@ function unitIn(rest: string, text: string, kind: UnitKind, argument: string): U
     if (kind === 'share') return unitOf('1', kind);
     throw refused(argument, text, expected(kind));
   }
-  const read = readUnit(rest);
-  const likely = likelyOf(read, kind);
-  if (likely.length > 0) {
+  try {
+    return unitOf(rest, kind, argument);
+  } catch (thrown) {
+    const likely = likelyOf(readUnit(rest), kind);
+    if (likely.length === 0) throw thrown;
     const number = plainText(text).slice(0, -rest.length);
     throw refused(argument, text, likely.map((unit) => `${number}${unit}`).join(' or '));
   }
-  return unitOf(rest, kind, argument);
 }
 
 function expected(kind: UnitKind): string {

@@ -17,7 +17,9 @@ export function plainText(text: string): string {
     .replace(/[\s\u200b\u2060\ufeff]+/g, ' ')
     .replace(/℃/g, 'degC')
     .replace(/℉/g, 'degF')
-    .replace(/[°º˚] ?(?=[CFRKcfrk](?![A-Za-z]))/g, 'deg')
+    .replace(/([A-Za-z])?[°º˚] ?(?=[CFRKcfrk](?![A-Za-z]))/g, (_, letter?: string) =>
+      letter === undefined ? 'deg' : `${letter} deg`,
+    )
     .replace(/\u212a/g, 'K')
     .replace(/\u2206/g, 'Δ')
     .replace(/[\u00b5\u03bc]/g, 'u')

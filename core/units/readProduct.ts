@@ -16,7 +16,7 @@ export type ReadProduct =
 const WORDS: readonly (readonly [RegExp, string | ((...match: string[]) => string)])[] = [
   [/\*\*/g, '^'],
   [/\bper\b/gi, '/'],
-  [/(?<=[A-Za-z)])\.(?=[A-Za-z(])/g, '*'],
+  [/([A-Za-z)])\.(?=[A-Za-z(])/g, '$1*'],
   [/\b(k?)cal[ _]?[({]{0,2}(IT|th)\b[)}]{0,2}/gi, (_, k = '', kind = '') => `${k.toLowerCase()}cal_${subscript(kind)}`],
   [/\b(k|MM)?btu[ _]?[({]{0,2}(IT|th)\b[)}]{0,2}/gi, (_, p = '', kind = '') => `${prefix(p)}Btu_${subscript(kind)}`],
   [/\b(mm|in) ?(Hg|H2O)\b/gi, (_, size = '', of = '') => size.toLowerCase() + (/hg/i.test(of) ? 'Hg' : 'H2O')],
@@ -28,6 +28,8 @@ const WORDS: readonly (readonly [RegExp, string | ((...match: string[]) => strin
   [/\btons? of refrigeration\b/gi, 'ton_refrigeration'],
   [/\b(US|UK) gal(?:lons?)?\b/gi, (_, where = '') => `gal_${where.toUpperCase()}`],
   [/\bcc\b/g, 'cm^3'],
+  // A hyphen between units, as in J/mol-K, is a product; lb-mol has been joined above.
+  [/([A-Za-z)])-(?=[A-Za-z(])/g, '$1*'],
 ];
 
 const subscript = (kind: string): string => (/it/i.test(kind) ? 'IT' : 'th');

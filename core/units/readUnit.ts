@@ -1,6 +1,6 @@
 import { differenceUnit } from './differenceUnit';
 import { measureOf } from './dimensions';
-import { makeUnit } from './makeUnit';
+import { exactOf, makeUnit } from './makeUnit';
 import { ONE, power, times } from './rational';
 import { readProduct, type Term } from './readProduct';
 import type { Unit } from './unit';
@@ -11,7 +11,9 @@ export type ReadUnit =
   | { readonly unit?: undefined; readonly likely: readonly string[]; readonly nearest?: undefined }
   | { readonly unit?: undefined; readonly likely?: undefined; readonly nearest: string | undefined };
 
-const GAUGE = /^(.+?)(?: ?\((gauge|gage|g|absolute|abs|a)\)|[ _](gauge|gage|g|absolute|abs|a)|(?<=psi|bar|pa)([ga]))$/i;
+const GAUGE = /^(.+?)(?: ?\((gauge|gage|g|absolute|abs|a)\)|[ _](gauge|gage|g|absolute|abs|a))$/i;
+/** Written in one word: `psig`, `bara`. */
+const ATTACHED_GAUGE = /^(.*(?:psi|bar|pa))([ga])$/i;
 const DIFFERENCE = /^(?:(?:Δ|delta) ?(deg ?[CFR]|K)|(deg ?[CFR]|K) (?:difference|diff))$/i;
 
 /** Reads a unit text in plain characters, with `gauge`, `absolute` and `difference` where they belong. */
@@ -21,20 +23,18 @@ export function readUnit(plain: string): ReadUnit {
     const scale = readWhole(difference[1] ?? difference[2] ?? '');
     return scale.unit === undefined ? scale : { unit: differenceUnit(scale.unit) };
   }
-  const gauge = GAUGE.exec(plain);
+  const gauge = GAUGE.exec(plain) ?? ATTACHED_GAUGE.exec(plain);
   if (gauge !== null) {
-    const [, base = '', inBrackets, apart, attached] = gauge;
+    const [, base = '', inBrackets, apart] = gauge;
     const read = readWhole(base);
-    const word = inBrackets ?? apart ?? attached ?? '';
-    if (read.unit?.kind === 'pressure') return { unit: /^g/i.test(word) ? gaugeUnit(read.unit, base) : read.unit };
+    const word = inBrackets ?? apart ?? '';
+    if (read.unit?.kind === 'pressure') return { unit: /^g/i.test(word) ? gaugeUnit(read.unit) : read.unit };
   }
   return readWhole(plain);
 }
 
-function gaugeUnit(unit: Unit, text: string): Unit {
-  const product = readProduct(text, false);
-  const factor = (product.terms ?? []).reduce((f, term) => times(f, power(term.atom.factor, term.power)), ONE);
-  return makeUnit(`${unit.symbol} gauge`, 'pressure', null, factor, undefined, true);
+function gaugeUnit(unit: Unit): Unit {
+  return makeUnit(`${unit.symbol} gauge`, 'pressure', null, exactOf(unit).factor, undefined, true);
 }
 
 /** A slash is read strictly; only where that measures nothing, everything after it stands below it. */

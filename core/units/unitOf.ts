@@ -6,7 +6,7 @@ import { readUnit } from './readUnit';
 import type { Unit, UnitKind } from './unit';
 
 const LONGEST_MEMORY = 1000;
-const remembered = new Map<string, Unit>();
+const remembered = new Map<UnitKind | undefined, Map<string, Unit>>();
 
 /**
  * The unit that a text names, in any of its usual spellings: `kJ/(kg K)`, `kJ kg⁻¹ K⁻¹`, `°C`, `bar(g)`.
@@ -22,12 +22,13 @@ const remembered = new Map<string, Unit>();
  * unitOf('Btu_IT/lb').factor // => 2326
  */
 export function unitOf(text: string, kind?: UnitKind, argument = 'unit'): Unit {
-  const key = `${kind ?? ''}:${text}`;
-  const found = remembered.get(key);
+  let units = remembered.get(kind);
+  if (units === undefined) remembered.set(kind, (units = new Map()));
+  const found = units.get(text);
   if (found !== undefined) return found;
   const unit = checked(text, kind, argument);
-  if (remembered.size >= LONGEST_MEMORY) remembered.clear();
-  remembered.set(key, unit);
+  if (units.size >= LONGEST_MEMORY) units.clear();
+  units.set(text, unit);
   return unit;
 }
 

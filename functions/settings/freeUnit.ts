@@ -2,6 +2,7 @@ import { Problem } from '../../core/problem';
 import { asKind } from '../../core/units/asKind';
 import { findAtom } from '../../core/units/atoms';
 import { measureOf } from '../../core/units/dimensions';
+import { kindWords } from '../../core/units/kindWords';
 import { exactOf, makeUnit } from '../../core/units/makeUnit';
 import { plainText } from '../../core/units/plainText';
 import { readUnit } from '../../core/units/readUnit';
@@ -48,8 +49,8 @@ export async function freeUnit(text: string, kind?: UnitKind): Promise<Unit> {
   throw new Problem({
     code: 'argument',
     argument: 'unit',
-    allowed: `a unit of ${String(kind)}`,
-    received: `"${text}", a unit of ${unit.kind}`,
+    allowed: kind === undefined ? 'a unit' : `a unit of ${kindWords(kind)}`,
+    received: `"${text}", a unit of ${kindWords(unit.kind)}`,
   });
 }
 
@@ -61,7 +62,7 @@ function isUnclear(plain: string): boolean {
 function inLanguage(plain: string): string {
   return plain
     .replace(/\bper\b/gi, '/')
-    .replace(/(?<=[A-Za-z])([+-]?[1-9])(?![\dA-Za-z])/g, '^$1')
+    .replace(/([A-Za-z])([+-]?[1-9])(?![\dA-Za-z])/g, '$1^$2')
     .replace(/\^\(([+-]?\d)\)/g, '^$1');
 }
 

@@ -1,10 +1,10 @@
-import { plainWords, Problem } from '../../core/problem';
+import { Problem } from '../../core/problem';
 import { parseSettingsBlock, rowName } from './parseSettingsBlock';
 import { SETTINGS, plainKey } from './schema';
 import { settingCell } from './settingCell';
 import type { Settings } from './settingsType';
 
-/** The cell of a Units block that can't be read, counted from 0, what stands in it, and what is allowed. */
+/** The cell of a Units block that can't be read, counted from 0, what stands in it, and what is allowed instead. */
 export interface SettingsFault {
   readonly row: number;
   readonly column: 0 | 1;
@@ -34,11 +34,12 @@ export function readSettingsBlock(values: readonly (readonly unknown[])[], base:
     return { settings, missing: missing.map((row) => row.label) };
   } catch (thrown) {
     if (!(thrown instanceof Problem) || thrown.data.code !== 'argument') throw thrown;
-    const { argument } = thrown.data;
+    const { argument, allowed, nearest } = thrown.data;
     const row = values.findIndex((cells, index) => rowName(index, settingCell(cells[0])) === argument);
     const own = labels[row] ?? '';
     const known = SETTINGS.some((setting) => own === plainKey(setting.label) || own === plainKey(setting.key));
     const column = known && labels.indexOf(own) === row ? 1 : 0;
-    return { fault: { row, column, text: settingCell(values[row]?.[column]), message: plainWords(thrown.data) } };
+    const message = nearest === undefined ? allowed : `${allowed}; nearest: ${nearest}`;
+    return { fault: { row, column, text: settingCell(values[row]?.[column]), message } };
   }
 }
