@@ -30,7 +30,9 @@ export function columnsXml(old: string, part: string, before: Widths, after: Wid
   }
   for (const { number, width } of changed) {
     const run = runs.find(({ first, last }) => first === number && last === number);
-    const { width: _width, customWidth: _custom, ...others } = run?.rest ?? {};
+    const others = Object.fromEntries(
+      Object.entries(run?.rest ?? {}).filter(([name]) => name !== 'width' && name !== 'customWidth'),
+    );
     const rest: Attributes = width === undefined ? others : { ...others, width: String(width), customWidth: '1' };
     if (run !== undefined) run.rest = rest;
     else if (width !== undefined) runs.push({ first: number, last: number, rest });

@@ -10,16 +10,13 @@ const NAMED: Readonly<Record<string, string>> = { '&': '&amp;', '<': '&lt;', '>'
  * escapeXml('a < b') // => 'a &lt; b'
  */
 export function escapeXml(text: string): string {
-  return (
-    text
-      .replace(/_(?=x[0-9A-Fa-f]{4}_)/g, '_x005F_')
-      // eslint-disable-next-line no-control-regex
-      .replace(
-        /[\u0000-\u0008\u000b-\u001f\ufffe\uffff]|[\ud800-\udbff](?![\udc00-\udfff])|(?<![\ud800-\udbff])[\udc00-\udfff]/g,
-        hex,
-      )
-      .replace(/[&<>"]/g, (c) => NAMED[c] ?? c)
-  );
+  return text
+    .replace(/_(?=x[0-9A-Fa-f]{4}_)/g, '_x005F_')
+    .replace(
+      /[\u0000-\u0008\u000b-\u001f\ufffe\uffff]|[\ud800-\udbff](?![\udc00-\udfff])|(?<![\ud800-\udbff])[\udc00-\udfff]/g,
+      hex,
+    )
+    .replace(/[&<>"]/g, (c) => NAMED[c] ?? c);
 }
 
 const hex = (c: string) => `_x${c.charCodeAt(0).toString(16).toUpperCase().padStart(4, '0')}_`;

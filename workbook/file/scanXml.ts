@@ -32,10 +32,9 @@ export function scanXml(xml: string, part: string, handlers: XmlHandlers): void 
     handlers.open(localName(tag.name), tag.attributes, xml.lastIndexOf('<', end - 1), end);
   });
   parser.on('closetag', (tag) => handlers.close?.(localName(tag.name), parser.position));
-  const text = handlers.text;
-  if (text !== undefined) {
-    parser.on('text', (value) => text(value));
-    parser.on('cdata', (value) => text(value));
+  if (handlers.text !== undefined) {
+    parser.on('text', (value) => handlers.text?.(value));
+    parser.on('cdata', (value) => handlers.text?.(value));
   }
   parser.write(xml).close();
 }

@@ -23,9 +23,15 @@ export function checksSheet(): BookSheet {
   FORMATS.forEach((format, i) => {
     const letter = String.fromCharCode(65 + i);
     for (let row = HEAD; row <= HEAD + checks.length; row++) {
-      const { format: _plain, ...cell } = cells[`${letter}${row}`] ?? { value: null };
+      const address = `${letter}${row}`;
+      const { value = null, formula, spill } = cells[address] ?? {};
       const style = row === HEAD ? 'heading' : i === 0 || i > 4 ? 'label' : 'data';
-      cells[`${letter}${row}`] = { ...cell, style, ...(row === HEAD || format === 'General' ? {} : { format }) };
+      cells[address] = {
+        value,
+        ...(formula === undefined || spill === undefined ? {} : { formula, spill }),
+        style,
+        ...(row === HEAD || format === 'General' ? {} : { format }),
+      };
     }
   });
   return {

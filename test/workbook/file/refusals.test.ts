@@ -104,8 +104,8 @@ describe('a file is refused with words', () => {
   });
 
   it('when a sheet is missing', async () => {
-    const { 'xl/worksheets/sheet1.xml': _gone, ...rest } = foreignParts(EMPTY);
-    expect(await refusal(zipOf(rest))).toContain('a missing sheet');
+    const rest = Object.entries(foreignParts(EMPTY)).filter(([name]) => name !== 'xl/worksheets/sheet1.xml');
+    expect(await refusal(zipOf(Object.fromEntries(rest)))).toContain('a missing sheet');
   });
 
   it('when XML declares entities, or does not nest', async () => {
