@@ -71,12 +71,12 @@ export function startFormulaEngine(
   mendEngine(injector);
   const commands = injector.get(ICommandService);
   let queue: Promise<unknown> = Promise.resolve();
-  const noticed = { cycle: false };
+  let cycles = 0;
   // The library notices cycles, but forgets them before it tells the results.
   const runtime = injector.get(IFormulaRuntimeService);
   const enableCycleDependency = runtime.enableCycleDependency.bind(runtime);
   runtime.enableCycleDependency = () => {
-    noticed.cycle = true;
+    cycles += 1;
     enableCycleDependency();
   };
 
@@ -93,7 +93,7 @@ export function startFormulaEngine(
   const calculateUnit = async (unitId: string, sheets: number): Promise<EngineCells[] | null> => {
     let values: ISetFormulaCalculationResultMutation['unitData'][string];
     let arrays: ISetArrayFormulaDataMutationParams | undefined;
-    noticed.cycle = false;
+    const cyclesBefore = cycles;
     const listener = commands.onCommandExecuted((command) => {
       if (command.id === SetArrayFormulaDataMutation.id) {
         arrays = command.params as ISetArrayFormulaDataMutationParams;
@@ -108,7 +108,7 @@ export function startFormulaEngine(
     void commands.executeCommand(SetFormulaCalculationStartMutation.id, { ...CALCULATE_ALL }, { onlyLocal: true });
     await ended;
     listener.dispose();
-    if (noticed.cycle) return null;
+    if (cycles !== cyclesBefore) return null;
     return Array.from({ length: sheets }, (_sheet, i) => {
       const id = sheetId(i);
       return engineCells(
@@ -142,16 +142,16 @@ export function startFormulaEngine(
   };
 
   const run = async (book: EngineBook): Promise<readonly EngineCells[]> => {
-    const cycles: IFormulaDependencyTreeJson[] = [];
+    const cyclic: IFormulaDependencyTreeJson[] = [];
     const cells = await withUnit(book, async (unitId) => {
       const calculated = await calculateUnit(unitId, book.sheets.length);
       if (calculated === null)
-        cycles.push(...cyclicCells(await injector.get(ICalculateFormulaService).getAllDependencyJson()));
+        cyclic.push(...cyclicCells(await injector.get(ICalculateFormulaService).getAllDependencyJson()));
       return calculated;
     });
     if (cells !== null) return cells;
     // Round a cycle the library gives numbers that depend on the order of calculation: errors instead.
-    const broken = withoutCycles(book, cycles);
+    const broken = withoutCycles(book, cyclic);
     return (await withUnit(broken, (unitId) => calculateUnit(unitId, book.sheets.length))) ?? [];
   };
 

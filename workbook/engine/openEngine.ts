@@ -1,3 +1,4 @@
+import type { Settings } from '../../functions/settings/settingsType';
 import type { Cell } from '../../taskpane/port';
 import type { Book } from '../book';
 import { createCellMessages } from '../grid/cellMessages';
@@ -14,6 +15,7 @@ import { loadBundle } from './loadBundle';
 
 /** What one formula gave: the extent of its spill as rows and columns; a single value is 1 × 1. */
 export interface Evaluated {
+  /** As it was given. */
   readonly formula: string;
   readonly values: readonly (readonly Cell[])[];
 }
@@ -28,6 +30,11 @@ export interface EvaluateOptions {
 /** Formulas and whole workbooks, calculated without Excel and without a grid. */
 export interface Engine {
   readonly edition: string;
+  /**
+   * Unit settings from text, on top of the defaults.
+   * @throws Problem of the bundle where it can't be read.
+   */
+  readSettings(unitsText: string): Settings;
   /** The book with every formula calculated; errors carry words. */
   calculate(book: Book, options?: { readonly unitsText?: string }): Promise<Book>;
   /** Evaluates formulas, each by itself; the leading `=` may be left out. */
@@ -121,7 +128,7 @@ export async function openEngine(options: { readonly bundlePath: string }): Prom
     return anchors.map((anchor, i): Evaluated => {
       const cells = calculated[anchor.sheet];
       const refusal = refusals[i];
-      const formula = anchor.formula;
+      const formula = texts[i] ?? '';
       if (refusal !== undefined || cells === undefined) return { formula, values: [[refusal ?? null]] };
       const { rows, columns } = cells.extent(0, 0);
       return { formula, values: matrix(rows, columns, (r, c) => readCell(cells, anchor, r, c)) };
@@ -130,6 +137,7 @@ export async function openEngine(options: { readonly bundlePath: string }): Prom
 
   return {
     edition: latentry.edition,
+    readSettings: (text) => latentry.parseSettingsText(text, latentry.defaultSettings),
     calculate: (book, { unitsText } = {}) => inTurn(() => calculate(book, unitsText)),
     evaluate: (texts, given = {}) => inTurn(() => evaluate(texts, given)),
   };

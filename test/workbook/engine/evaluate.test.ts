@@ -92,7 +92,7 @@ describe('results', () => {
   it('spills with its extent, blanks as empty texts, truth values as they are', async () => {
     const [column] = await engine.evaluate(['LATENTRY.COLUMN(3)']);
     expect(column).toEqual({
-      formula: '=LATENTRY.COLUMN(3)',
+      formula: 'LATENTRY.COLUMN(3)',
       values: [
         [1, 'n1'],
         [2, 'n2'],
