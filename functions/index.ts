@@ -14,6 +14,7 @@ import './fitLatent';
 import './heat';
 import './heatCap';
 import './heatSteps';
+import './kirchhoff';
 import './latent';
 import './satPressure';
 import './satTemperature';

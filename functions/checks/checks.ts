@@ -2,6 +2,7 @@ import { deltaCp } from '../deltaCp';
 import { fitDeltaCp } from '../fitDeltaCp';
 import { heat } from '../heat';
 import { heatCap } from '../heatCap';
+import { kirchhoff } from '../kirchhoff';
 import { latent } from '../latent';
 import { satPressure } from '../satPressure';
 import { toUnits } from '../toUnits';
@@ -16,6 +17,7 @@ const functions: Readonly<Record<string, (...args: never[]) => unknown[][]>> = {
   HEATCAP: heatCap,
   SATPRESSURE: satPressure,
   HEAT: heat,
+  KIRCHHOFF: kirchhoff,
   FITDELTACP: fitDeltaCp,
   TOUNITS: toUnits,
 };

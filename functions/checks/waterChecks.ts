@@ -201,6 +201,15 @@ export const waterChecks: readonly Check[] = [
     source: computed,
   },
   {
+    call: 'KIRCHHOFF',
+    args: [2256.403722, 100, 25, -(2.64054977 + 2.37045551) / 2],
+    settings: KJ,
+    expected: 2444.31642,
+    within: 5e-6 + 75 * 5e-9,
+    because: `${LAST_DIGIT}, and those of the two slopes over 75 K`,
+    source: `${computed}: 100 degC carried to 25 degC with the mean slope along saturation`,
+  },
+  {
     call: 'HEAT',
     args: ['water', 'melting solid', 'melting liquid'],
     settings: KJ,

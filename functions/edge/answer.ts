@@ -6,9 +6,9 @@ import { blockOf, type Block } from './block';
 import { needsBlankCheck, withBlanks } from './blanks';
 import { CellFault } from './cell';
 import { errorOf, faultOf } from './cellError';
-import { runCellwise, type Element } from './cellwise';
+import { runCellwise } from './cellwise';
 import { receive, type Invocation } from './invocation';
-import type { Spec } from './spec';
+import type { Element, Spec } from './spec';
 
 /** How long a formula waits for the workbook's settings to be read. */
 const LONGEST_WAIT_MS = 30_000;

@@ -2,6 +2,7 @@ import type { Answer } from '../../core/answer';
 import type { QuantityKind } from '../../core/units/unit';
 import type { Settings } from '../settings/settings';
 import type { Block } from './block';
+import type { CellFault } from './cell';
 
 /** `key` arguments (names, states) choose what to compute; quantities are what it is computed from. */
 export type ArgKind = 'key' | 'number' | 'block' | QuantityKind;
@@ -40,8 +41,11 @@ export interface CellwiseSpec {
   plan(keys: readonly Key[], settings: Settings): Plan;
 }
 
-/** What a block-wise function gives back; blanks are `""`. */
-export type Table = (number | string)[][];
+/** One cell of an answer; a blank is `""`. */
+export type Element = number | string | CellFault;
+
+/** What a block-wise function gives back. */
+export type Table = Element[][];
 
 /** Arguments are taken as whole blocks; the result is a table. */
 export interface BlockwiseSpec {

@@ -61,9 +61,16 @@ function run(example: string): Claim[] {
 
 /** A number agrees when it rounds to the digits the page prints; everything else must be equal. */
 function agrees(value: unknown, claimed: unknown): boolean {
-  if (typeof value !== 'number' || typeof claimed !== 'number') return JSON.stringify(value) === JSON.stringify(claimed);
-  const digits = String(claimed).replace(/e.*$/, '').replace(/^-?0?\.?0*/, '').replace('.', '').length;
-  return Math.abs(value - claimed) <= 0.5000001 * 10 ** (Math.floor(Math.log10(Math.abs(claimed) || 1)) - Math.max(digits, 1) + 1);
+  if (typeof value !== 'number' || typeof claimed !== 'number')
+    return JSON.stringify(value) === JSON.stringify(claimed);
+  const digits = String(claimed)
+    .replace(/e.*$/, '')
+    .replace(/^-?0?\.?0*/, '')
+    .replace('.', '').length;
+  return (
+    Math.abs(value - claimed) <=
+    0.5000001 * 10 ** (Math.floor(Math.log10(Math.abs(claimed) || 1)) - Math.max(digits, 1) + 1)
+  );
 }
 
 const found = sources('core').flatMap((file) =>
@@ -79,7 +86,10 @@ describe('examples in doc comments', () => {
     const claims = run(example);
     expect(claims.length, 'an example without a claim shows nothing').toBeGreaterThan(0);
     for (const { shown, value, claimed } of claims) {
-      expect(agrees(value, claimed), `${shown} is ${JSON.stringify(value)}, the page says ${JSON.stringify(claimed)}`).toBe(true);
+      expect(
+        agrees(value, claimed),
+        `${shown} is ${JSON.stringify(value)}, the page says ${JSON.stringify(claimed)}`,
+      ).toBe(true);
     }
   });
 });

@@ -54,12 +54,18 @@ describe('arguments', () => {
       message: expect.stringMatching(/^substance: allowed .*water.*; received "watr"; nearest: water$/) as string,
     });
     expect(faultOf(() => call(latent, ['water', 'vaporisaton', 60])).message).toMatch(/nearest: vaporisation/);
-    expect(faultOf(() => call(latent, ['water', 'vaporization', 60], ['knd=standard'])).message).toMatch(/nearest: kind/);
+    expect(faultOf(() => call(latent, ['water', 'vaporization', 60], ['knd=standard'])).message).toMatch(
+      /nearest: kind/,
+    );
   });
 
   it('refuses ambiguous and unusable values with what is allowed and what came', () => {
-    expect(faultOf(() => call(latent, ['water', 'vaporization', '140 F'])).message).toMatch(/temperature: allowed .*degF.*received "140 F"/);
-    expect(faultOf(() => call(latent, ['water', 'vaporization', true])).message).toMatch(/temperature: allowed a number \(degC\).*received true/);
+    expect(faultOf(() => call(latent, ['water', 'vaporization', '140 F'])).message).toMatch(
+      /temperature: allowed .*degF.*received "140 F"/,
+    );
+    expect(faultOf(() => call(latent, ['water', 'vaporization', true])).message).toMatch(
+      /temperature: allowed a number \(degC\).*received true/,
+    );
     expect(faultOf(() => call(latent, ['water', 'vaporization', '60'])).code).toBe('#VALUE!');
     expect(faultOf(() => call(latent, ['water', 'vaporization', undefined])).message).toMatch(/temperature/);
   });
@@ -73,7 +79,11 @@ describe('arguments', () => {
 
 describe('ranges', () => {
   it('spills in the shape of the range, with blanks, errors and texts each in their place', () => {
-    const spill = call(latent, ['water', 'vaporization', [[60], [null], [{ code: '#DIV/0!' }], ['140 degF'], [400]]]) as unknown[][];
+    const spill = call(latent, [
+      'water',
+      'vaporization',
+      [[60], [null], [{ code: '#DIV/0!' }], ['140 degF'], [400]],
+    ]) as unknown[][];
     at60(spill[0]?.[0]);
     expect(spill[1]?.[0]).toBe('');
     expect((spill[2]?.[0] as HostError).code).toBe('#DIV/0!');
@@ -103,7 +113,13 @@ describe('blanks', () => {
   it('tells a real 0 from an empty cell where the host hands both over as 0', async () => {
     setBlankReader((address) => Promise.resolve(address === 'Sheet1!A1:A2' ? [[false], [true]] : [[false]]));
     const invocation = { parameterAddresses: [null, null, 'Sheet1!A1:A2'] };
-    const spill = (await latent([['water']], [['vaporization']], [[0], [0]], undefined, invocation as never)) as unknown[][];
+    const spill = (await latent(
+      [['water']],
+      [['vaporization']],
+      [[0], [0]],
+      undefined,
+      invocation as never,
+    )) as unknown[][];
     expect(spill[0]?.[0]).toBeTypeOf('number');
     expect(spill[1]?.[0]).toBe('');
   });
@@ -124,7 +140,11 @@ describe('the call itself', () => {
   });
 
   it('unwraps rich values and refuses entities', () => {
-    at60(cellOf(call(latent, ['water', 'vaporization', [[{ type: 'FormattedNumber', basicType: 'Double', basicValue: 60 }]]])));
+    at60(
+      cellOf(
+        call(latent, ['water', 'vaporization', [[{ type: 'FormattedNumber', basicType: 'Double', basicValue: 60 }]]]),
+      ),
+    );
     const entity = { type: 'Entity', basicType: 'Error', basicValue: '#VALUE!' };
     expect(faultOf(() => call(latent, ['water', 'vaporization', [[entity]]])).message).toMatch(/data-type cell/);
   });
@@ -136,7 +156,11 @@ describe('settings', () => {
     at60(cellOf(call(latent, ['water', 'vaporization', 60], [UNITS])));
     const pending = call(latent, ['water', 'vaporization', 333.15]) as Promise<unknown>;
     expect(pending).toBeInstanceOf(Promise);
-    settingsStore.publish({ state: 'ready', settings: parseSettingsBlock(withUnits('Temperature', 'K'), DEFAULT_SETTINGS), stamp: '' });
+    settingsStore.publish({
+      state: 'ready',
+      settings: parseSettingsBlock(withUnits('Temperature', 'K'), DEFAULT_SETTINGS),
+      stamp: '',
+    });
     at60(cellOf(await pending));
   });
 
@@ -146,14 +170,18 @@ describe('settings', () => {
       const value = cellOf(call(latent, ['water', 'fusion', settings])) as number;
       expect(Math.abs(value - atMelting)).toBeLessThanOrEqual(5e-8); // half of the last published digit
     }
-    expect(faultOf(() => call(latent, ['water', 'vaporization', 'heat=kJ/kg'])).message).toMatch(/temperature: allowed a temperature/);
+    expect(faultOf(() => call(latent, ['water', 'vaporization', 'heat=kJ/kg'])).message).toMatch(
+      /temperature: allowed a temperature/,
+    );
   });
 
   it('never replaces a damaged setting by a default', () => {
     settingsStore.publish({ state: 'broken', cell: 'Units!B2', text: 'degX', message: 'degC, K, degF or degR' });
     expect(faultOf(() => call(latent, ['water', 'vaporization', 60])).message).toMatch(/Units!B2.*degX/);
     at60(cellOf(call(latent, ['water', 'vaporization', 60], [UNITS])));
-    expect(faultOf(() => call(latent, ['water', 'vaporization', 60], [withUnits('Temperature', 'degX')])).message).toMatch(/degX/);
+    expect(
+      faultOf(() => call(latent, ['water', 'vaporization', 60], [withUnits('Temperature', 'degX')])).message,
+    ).toMatch(/degX/);
     // A block that lost a row falls back on the workbook's settings, not on a default.
     expect(faultOf(() => call(latent, ['water', 'vaporization', 60], [UNITS.slice(1)])).message).toMatch(/degX/);
   });

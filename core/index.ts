@@ -1,0 +1,40 @@
+/**
+ * The library `latentry`: latent heats, heat capacities, heating paths, fits and units, in SI and without a host.
+ */
+export type { Answer, Datum, LatentKind, Mark } from './answer';
+export { evaluate, valueAt, type OutOfRange } from './evaluate';
+export { meanOver } from './meanOver';
+export { nearest } from './nearest';
+export { plainWords, Problem, type ProblemData, type QuantityWriter } from './problem';
+export type { Change, Curve, Gap, Ladder, Phase, Rung, Substance, Surface } from './substance';
+export { findChange, findPhase, findSubstance, substances } from './catalogue/find';
+export { water } from './water/water';
+
+export { convertLine, type ScaleChange } from './fit/convertLine';
+export { fitDeltaCp, type FitOptions } from './fit/fitDeltaCp';
+export { FIT_COLUMNS, FIT_ROWS, fitTable, type FitLabels } from './fit/fitTable';
+export type { Curvature, FitBasis, Interval, LineDiagnostics, LineFit } from './fit/fitTypes';
+export { latentFromFit, type FitPrediction } from './fit/latentFromFit';
+export type { LeftOut } from './fit/leftOut';
+export { readFitTable, type FitFromTable } from './fit/readFitTable';
+export { readRows, type Rows } from './fit/readRows';
+
+export { readForm, type Form } from './kirchhoff/form';
+export { kirchhoff, type KirchhoffInput, type KirchhoffResult } from './kirchhoff/kirchhoff';
+
+export { enthalpy } from './path/enthalpy';
+export { heat } from './path/heat';
+export { heatSteps, type HeatPath, type HeatStep } from './path/heatSteps';
+export { placeState } from './path/placeState';
+export type { Place } from './path/place';
+export type { State } from './path/state';
+
+export { conversion, type ConversionNeeds } from './units/conversion';
+export { convert } from './units/convert';
+export { differenceUnit } from './units/differenceUnit';
+export { fromMolar } from './units/fromMolar';
+export { parseQuantity, type Quantity, type QuantitySettings } from './units/parseQuantity';
+export { readHeader, type Header } from './units/readHeader';
+export { toMolar } from './units/toMolar';
+export type { Basis, QuantityKind, Unit, UnitKind } from './units/unit';
+export { unitOf } from './units/unitOf';
