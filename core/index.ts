@@ -32,9 +32,18 @@ export type { State } from './path/state';
 export { conversion, type ConversionNeeds } from './units/conversion';
 export { convert } from './units/convert';
 export { differenceUnit } from './units/differenceUnit';
+export { fromSi } from './units/fromSi';
 export { fromMolar } from './units/fromMolar';
 export { parseQuantity, type Quantity, type QuantitySettings } from './units/parseQuantity';
 export { readHeader, type Header } from './units/readHeader';
 export { toMolar } from './units/toMolar';
+export { toSi } from './units/toSi';
 export type { Basis, QuantityKind, Unit, UnitKind } from './units/unit';
 export { unitOf } from './units/unitOf';
+
+export { chiSquareAbove } from './statistics/chiSquareAbove';
+export { compensatedSum } from './statistics/compensatedSum';
+export { fisherFAbove } from './statistics/fisherFAbove';
+export { studentTBelow } from './statistics/studentTBelow';
+export { studentTBothTails } from './statistics/studentTBothTails';
+export { studentTQuantile } from './statistics/studentTQuantile';

@@ -71,7 +71,11 @@ class Carrier {
         received: `a range of ${shapeOf(shape)}`,
       });
     }
-    if (shape.columns === 1) return Array.from({ length: shape.rows }, (_, r) => this.element(r, 0));
+    if (shape.columns === 1) {
+      const rows = Array.from({ length: shape.rows }, (_, r) => this.element(r, 0));
+      if (rows.length === 1 && rows[0]?.[0] instanceof CellFault) throw rows[0][0];
+      return rows;
+    }
     const pairs = Array.from({ length: shape.columns }, (_, c) => this.element(0, c));
     return [pairs.map((pair) => pair[0]), pairs.map((pair) => pair[1])];
   }

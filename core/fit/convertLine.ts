@@ -22,7 +22,7 @@ export interface ScaleChange {
  * @example
  * import { convertLine, fitDeltaCp } from 'latentry';
  * const fit = fitDeltaCp([0, 10, 20, 30, 40], [2500.8, 2477.3, 2453.76, 2429.82, 2405.12]);
- * convertLine(fit, { factor: 1, offset: 273.15 }, 0.018015268).intercept // => 56.8119
+ * convertLine(fit, { factor: 1, offset: 273.15 }, 0.018015268).intercept // => 56.8115
  */
 export function convertLine(fit: LineFit, temperature: ScaleChange, latentFactor: number): LineFit {
   const { factor, offset } = temperature;

@@ -1,4 +1,4 @@
-import { buildSync } from 'esbuild';
+import { buildSync, transformSync } from 'esbuild';
 import { readdirSync, readFileSync } from 'node:fs';
 import path from 'node:path';
 import vm from 'node:vm';
@@ -23,39 +23,37 @@ function examples(text: string): string[] {
   });
 }
 
-/** Names that the library exports: an example without an import line uses these. */
-const exported = Object.keys(await import('../../core/index'));
-
 interface Claim {
   readonly shown: string;
   readonly value: unknown;
   readonly claimed: unknown;
 }
 
-/** Runs an example with every `expression // => value` line turned into a claim. */
+/** The library, bundled once. */
+const library = buildSync({
+  entryPoints: [path.join(root, 'core/index.ts')],
+  bundle: true,
+  write: false,
+  format: 'iife',
+  globalName: 'latentry',
+  target: 'node20',
+}).outputFiles[0]?.text;
+
+/** Runs an example, whose names are the library's, with every `expression // => value` line turned into a claim. */
 function run(example: string): Claim[] {
-  const written = example.split('\n').filter((line) => /^import .* from 'latentry';\s*$/.test(line));
-  const named = exported.filter((name) => new RegExp(`\\b${name}\\b`).test(example));
-  const imports = written.length > 0 ? written : [`import { ${named.join(', ')} } from 'latentry';`];
-  const body = example.split('\n').filter((line) => !imports.includes(line));
-  const code = body
+  const code = example
+    .split('\n')
+    .filter((line) => !/^import .* from 'latentry';\s*$/.test(line))
     .map((line) => {
       const claim = /^(.*?);?\s*\/\/ => (.*)$/.exec(line);
       return claim === null ? line : `claim(${JSON.stringify(claim[1])}, (${claim[1] ?? ''}), (${claim[2] ?? ''}));`;
     })
     .join('\n');
-  const { outputFiles } = buildSync({
-    stdin: { contents: `${imports.join('\n')}\n${code}`, resolveDir: root, loader: 'ts' },
-    alias: { latentry: path.join(root, 'core/index.ts') },
-    bundle: true,
-    write: false,
-    format: 'iife',
-    target: 'node20',
-    logLevel: 'silent',
-  });
   const claims: Claim[] = [];
   const claim = (shown: string, value: unknown, claimed: unknown): void => void claims.push({ shown, value, claimed });
-  vm.runInNewContext(outputFiles[0]?.text ?? '', { claim });
+  const context = vm.createContext({ claim });
+  vm.runInContext(`${library ?? ''}; Object.assign(globalThis, latentry);`, context);
+  vm.runInContext(transformSync(code, { loader: 'ts' }).code, context);
   return claims;
 }
 

@@ -24,7 +24,9 @@ export function call(
   settings: readonly unknown[] = [],
 ): unknown {
   const matrix = (value: unknown): unknown => (value === undefined || Array.isArray(value) ? value : [[value]]);
-  return fn(...args.map(matrix), settings.map(matrix), {});
+  // Every cell function ends with the settings and the invocation.
+  const positional = [...args.map(matrix), ...new Array<undefined>(Math.max(0, fn.length - 2 - args.length))];
+  return fn(...positional, settings.map(matrix), {});
 }
 
 /** The single cell of a 1 × 1 result. */
