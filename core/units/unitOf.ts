@@ -23,7 +23,7 @@ const remembered = new Map<UnitKind | undefined, Map<string, Unit>>();
  */
 export function unitOf(text: string, kind?: UnitKind, argument = 'unit'): Unit {
   let units = remembered.get(kind);
-  if (units === undefined) remembered.set(kind, (units = new Map()));
+  if (units === undefined) remembered.set(kind, (units = new Map<string, Unit>()));
   const found = units.get(text);
   if (found !== undefined) return found;
   const unit = checked(text, kind, argument);
