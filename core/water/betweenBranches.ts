@@ -4,7 +4,7 @@ import type { Change, Curve, Phase } from '../substance';
 import { noSuchChange } from './coexistenceCurves';
 import { fastFusionHeat, fastFusionSlope } from './fastLines';
 import { idealGasBranch, phaseBranch, type PhaseBranch } from './phaseBranch';
-import { NORMAL_PRESSURE_PA, STANDARD_PRESSURE_PA } from './ranges';
+import { LOWEST_PRESSURE_PA, NORMAL_PRESSURE_PA, STANDARD_PRESSURE_PA } from './ranges';
 import { CRITICAL_PRESSURE_PA } from './saturationAuxiliary';
 import { waterCurve } from './waterCurve';
 
@@ -24,7 +24,7 @@ function pair(change: Change, kind: LatentKind, pressurePa: number): readonly [P
       argument: 'pressure',
       quantity: 'pressure',
       received: pressurePa,
-      from: 0,
+      from: LOWEST_PRESSURE_PA,
       to: CRITICAL_PRESSURE_PA,
       subject: 'vaporization of water',
     });

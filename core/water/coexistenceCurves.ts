@@ -44,7 +44,7 @@ const BELOW_TRIPLE: readonly Mark[] = [
 export const NEAR_CRITICAL: readonly Mark[] = [
   {
     code: 'near-critical',
-    text: 'within 0.1 K of the critical point: the equation is least certain here, and few digits of the number hold',
+    text: 'within 0.1 K of the critical point, where the equation of state is least certain',
   },
 ];
 

@@ -14,6 +14,7 @@ import {
   COLDEST_VAPOUR_K,
   HIGHEST_PRESSURE_PA,
   HOTTEST_FLUID_K,
+  LOWEST_PRESSURE_PA,
   TRIPLE_K,
   TRIPLE_PRESSURE_PA,
 } from './ranges';
@@ -50,14 +51,14 @@ const ICE_OVERHEAT_K = 1;
 const fluid = emptyFluidState();
 const ice = emptyIceState();
 
-export function requirePressure(pressurePa: number, to: number, subject: string): void {
-  if (pressurePa > 0 && pressurePa <= to) return;
+function requirePressure(pressurePa: number, to: number, subject: string): void {
+  if (pressurePa >= LOWEST_PRESSURE_PA && pressurePa <= to) return;
   throw new Problem({
     code: 'range',
     argument: 'pressure',
     quantity: 'pressure',
     received: pressurePa,
-    from: 0,
+    from: LOWEST_PRESSURE_PA,
     to,
     subject,
   });

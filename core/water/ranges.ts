@@ -6,6 +6,8 @@ export const MOLAR_MASS = 0.018015268;
 /** Highest temperature and pressure of R6-95. */
 export const HOTTEST_FLUID_K = 1273;
 export const HIGHEST_PRESSURE_PA = 1000e6;
+/** Below any pressure of the ice-vapour line from 130 K: there is vapour only. */
+export const LOWEST_PRESSURE_PA = 1e-8;
 /** The ideal-gas part of R6-95 starts here. */
 export const COLDEST_VAPOUR_K = 130;
 /**

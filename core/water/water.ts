@@ -19,7 +19,14 @@ const DEFAULT_KINDS: Readonly<Record<string, LatentKind>> = {
  * Water and ice Ih, after IAPWS R6-95(2018) and R10-06(2009).
  *
  * All three phases share one enthalpy reference and meet at the triple point, so that latent heats are differences and
- * cycles close.
+ * cycles close. Supercooled liquid is followed to 235 K, metastable vapour and superheated liquid until their heat
+ * capacity is one and a half times that of the saturated phase; vapour begins at 130 K.
+ *
+ * @example
+ * import { water } from 'latentry';
+ * water.latent('vaporization', 'coexistence').at(333.15) / water.molarMass // => 2357654.5
+ * water.latent('fusion', 'isobaric').at(263.15) / water.molarMass // => 311597.3
+ * water.saturationPressure('stable').at(253.15) // => 103.243
  */
 export const water: Substance = {
   name: 'water',
