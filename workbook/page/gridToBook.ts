@@ -138,9 +138,14 @@ function heights(
   return found;
 }
 
+/** Choices of the grid; what it doesn't keep of them is taken from the book that was opened. */
 function lists(rules: readonly ISheetDataValidationRule[], origin: BookSheet | undefined): BookList[] {
-  const before = new Map(origin?.lists.filter((list) => list.source !== undefined).map((list) => [list.source, list]));
+  const choice = ({ source, values }: BookList) => source ?? values.join('\n');
+  const before = new Map(origin?.lists.map((list) => [choice(list), list]));
   return rules
     .flatMap((rule) => bookLists(rule, addressOf) ?? [])
-    .map((list) => ({ ...list, values: before.get(list.source)?.values ?? list.values }));
+    .map((list) => {
+      const { values = list.values, open } = before.get(choice(list)) ?? {};
+      return { ...list, values, ...(open === undefined ? {} : { open }) };
+    });
 }

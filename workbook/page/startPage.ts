@@ -8,6 +8,8 @@ import { notice, wordsOf } from './bar/notice';
 import { showCellLine } from './cell/showCellLine';
 import { showHoverWords } from './cell/showHoverWords';
 import { openGrid, type Grid } from './grid/openGrid';
+import { autoHeights } from './grid/autoHeights';
+import { showFittedNumbers } from './grid/showFittedNumbers';
 import { showNoteMarks } from './grid/showNoteMarks';
 import { gridHost } from './gridHost';
 import { startKeeper, type Keeper } from './keep/keeper';
@@ -15,6 +17,8 @@ import { loadFunctions } from './loadFunctions';
 import { openWorkbook } from './openWorkbook';
 import { paneToggle } from './paneToggle';
 import { readWorkbook } from './workbookFile';
+
+const LONGEST_CALCULATION_MS = 60_000;
 
 /** What the page shows: for tests, and for whoever looks with the browser's tools. */
 export interface RunningPage {
@@ -34,6 +38,7 @@ export async function startPage(elements: PageElements, standard: () => Book): P
   showCellLine(grid, list);
   showHoverWords(grid, list);
   showNoteMarks(grid);
+  showFittedNumbers(grid);
   undoButtons(grid, elements);
 
   const pane = paneToggle(elements.buttons['pane-toggle'], elements.pane);
@@ -42,9 +47,11 @@ export async function startPage(elements: PageElements, standard: () => Book): P
     openSettings.stop();
     settingsStore.publish({ state: 'unread' });
   });
-  const begin = async () => {
+  const begin = async (): Promise<void> => {
     await openSettings.start();
     pane.use(host);
+    await grid.api.getFormula().onCalculationResultApplied(LONGEST_CALCULATION_MS);
+    autoHeights(grid);
   };
   grid.onOpened(() => void begin());
   const name = kept?.name ?? 'Standard workbook.xlsx';

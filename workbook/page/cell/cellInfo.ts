@@ -12,6 +12,7 @@ export interface CellInfo {
 }
 
 const HINT = `Type = and ${NAMESPACE}. to see the functions.`;
+const CAUTION = 'Answers serve engineering calculation only: someone qualified checks them before they are used.';
 
 /** The words for a cell: its error, its note, what its function answers, or where its value comes from. */
 export function cellInfo(grid: Grid, list: FunctionList, sheetId: string, row: number, column: number): CellInfo {
@@ -30,12 +31,19 @@ export function cellInfo(grid: Grid, list: FunctionList, sheetId: string, row: n
   const note: unknown = data?.custom?.['note'];
   if (typeof note === 'string') return { tone: 'note', text: `${here}, note: ${note}` };
   const formula = cells.formula(row, column);
-  if (formula !== '') return { tone: 'plain', text: functionWords(formula, list) };
+  if (formula !== '') {
+    const holds = typeof value === 'number' ? `${here} holds ${value}. ` : '';
+    return { tone: 'plain', text: holds + functionWords(formula, list) };
+  }
   if (anchor.row !== row || anchor.column !== column) {
     const from = formatArea({ top: anchor.row, left: anchor.column, rows: 1, columns: 1 });
-    return { tone: 'plain', text: `${here} is filled by the formula in ${from}.` };
+    const holds = typeof value === 'number' ? ` with ${value}` : '';
+    return { tone: 'plain', text: `${here} is filled${holds} by the formula in ${from}.` };
   }
-  return { tone: 'plain', text: value === null ? HINT : '' };
+  return {
+    tone: 'plain',
+    text: value === null ? HINT : typeof value === 'number' ? `${here} holds ${value}.` : CAUTION,
+  };
 }
 
 /** Name and description of the first function of ours in a formula. */

@@ -52,6 +52,8 @@ export function startUniver(
     formulaBar: true,
     footer: { menus: false },
     disableAutoFocus: true,
+    disableTextFormatAlert: true,
+    disableTextFormatMark: true,
     sheets: { disableForceStringAlert: true, disableForceStringMark: true, protectedRangeShadow: false },
     formula: {
       function: functionClasses(list, mappings, listeners),

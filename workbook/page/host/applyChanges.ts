@@ -12,6 +12,7 @@ import {
   RemoveSheetMutation,
   SetRangeValuesMutation,
   SetRangeValuesUndoMutationFactory,
+  SetWorksheetActiveOperation,
   SetWorksheetColumnCountMutation,
   SetWorksheetRowCountMutation,
 } from '@univerjs/sheets';
@@ -43,9 +44,15 @@ function addSheet(grid: Grid, step: Step, name: string): void {
   const id = crypto.randomUUID();
   const sheet = mergeWorksheetSnapshotWithDefault({ id, name, rowCount: 400, columnCount: 26 });
   const index = grid.workbook().getSheets().length;
+  const active = grid.workbook().getActiveSheet().getSheetId();
   step.run(
     { id: InsertSheetMutation.id, params: { unitId, index, sheet } },
     { id: RemoveSheetMutation.id, params: { unitId, subUnitId: id, subUnitName: name } },
+  );
+  // Undone, the sheet may be the one in view, and the grid can't show a sheet that is gone.
+  step.run(
+    { id: SetWorksheetActiveOperation.id, params: { unitId, subUnitId: active } },
+    { id: SetWorksheetActiveOperation.id, params: { unitId, subUnitId: active } },
   );
 }
 
