@@ -1,4 +1,5 @@
 import { settingsStore } from '../../functions/settings/store';
+import { parseArea } from '../hosts/address';
 import type { HostEvent, Ref, WorkbookHost } from '../port';
 import { coalesced } from './coalesced';
 import { OUR_FORMULA } from './formulaCells';
@@ -24,6 +25,12 @@ export async function startSettings(host: WorkbookHost): Promise<() => void> {
   return () => {
     watch.stop();
   };
+}
+
+/** A first formula of ours is looked for in edits of ordinary size only. */
+function isSmall(ref: Ref): boolean {
+  const area = parseArea(ref.address);
+  return area !== null && area.rows * area.columns <= 10_000;
 }
 
 class SettingsWatch {
@@ -74,7 +81,7 @@ class SettingsWatch {
     if (!remote) this.onlyRemote = false;
     const sheet = ref?.sheet.toLowerCase();
     const settings = sheet === undefined || this.snapshot === undefined || this.snapshot.sheets.has(sheet);
-    const unstamped = this.stamp === null && ref !== undefined && !remote;
+    const unstamped = this.stamp === null && ref !== undefined && !remote && isSmall(ref);
     if (unstamped) this.edited.push(ref);
     if (settings || unstamped) this.refreshes.request(own ? 0 : AFTER_EDIT_MS);
   }

@@ -22,6 +22,13 @@ async function changedRef({ worksheetId, address }: Excel.WorksheetChangedEventA
   });
 }
 
+/** Excel says who wrote since ExcelApi 1.14; before, what this add-in was about to write is compared. */
+function wroteItself(args: Excel.WorksheetChangedEventArgs, ref: Ref | null, writes: OwnWrites): boolean {
+  const expected = ref !== null && writes.recognise(ref);
+  const { triggerSource: trigger }: { readonly triggerSource?: string } = args;
+  return trigger === undefined ? expected : trigger === 'ThisLocalAddin';
+}
+
 function attach(context: Excel.RequestContext, name: EventName, emit: Emit, writes: OwnWrites): Registration {
   const { workbook } = context;
   const { worksheets } = workbook;
@@ -35,8 +42,7 @@ function attach(context: Excel.RequestContext, name: EventName, emit: Emit, writ
       return worksheets.onChanged.add(async (args) => {
         const ref = await changedRef(args);
         const remote = args.source === Excel.EventSource.remote;
-        const mine = !remote && ref !== null && writes.recognise(ref);
-        const own = mine || args.triggerSource === Excel.EventTriggerSource.thisLocalAddin;
+        const own = !remote && wroteItself(args, ref, writes);
         emit(ref === null ? { remote, own } : { ref, remote, own });
       });
     case 'calculated':

@@ -209,6 +209,9 @@ describe('startSettings', () => {
       await start(host);
       host.type(data('A1'), [['no formula']]);
       await settle();
+      // Whole rows, as Excel reports an insertion: nothing to read there.
+      host.book.emit('change', { ref: data('5:5'), remote: false, own: false });
+      await settle();
       expect(host.book.state.size).toBe(0);
       host.type(data('A2'), [['=LATENTRY.EDITION()']]);
       await settle();

@@ -210,6 +210,19 @@ describe('the Excel host', () => {
     expect(seen.at(-1)).toEqual({ ref: at('A1'), remote: false, own: false });
   });
 
+  it('believes Excel where it says who wrote: a person’s edit right after a step that failed is no own change', async () => {
+    const { fake, host } = await open();
+    const seen: HostEvent[] = [];
+    host.on('change', (event) => seen.push(event));
+    fake.failWrite = { at: 'Sheet1!A1', code: 'GeneralException' };
+    await expect(host.apply([{ kind: 'cells', ref: at('A1'), values: [[1]] }], 'never')).rejects.toThrow();
+    await vi.waitFor(() => {
+      expect(seen.length).toBeGreaterThan(0);
+    });
+    await fake.type(at('A1'), [[5]]);
+    expect(seen.at(-1)).toEqual({ ref: at('A1'), remote: false, own: false });
+  });
+
   it('draws a scatter chart of the given series only', async () => {
     const { fake, host } = await open();
     await host.chart(
