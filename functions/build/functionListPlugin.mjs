@@ -3,6 +3,7 @@ import path from 'node:path';
 import { fileURLToPath } from 'node:url';
 import webpack from 'webpack';
 import { enumLists } from './enumLists.mjs';
+import { helpPages } from './helpPages.mjs';
 
 const here = path.dirname(fileURLToPath(import.meta.url));
 const functionsRoom = path.dirname(here);
@@ -21,8 +22,8 @@ const released = JSON.parse(readFileSync(path.join(here, 'releasedIds.json'), 'u
 const HELP_ROOT = 'https://localhost:3000/help/';
 
 /**
- * Finishes functions.json after the metadata generator: lets error cells through, adds autocomplete lists and
- * help addresses, sorts by id, and refuses a function whose result is no matrix or whose id vanished.
+ * Finishes functions.json after the metadata generator: lets error cells through, adds autocomplete lists, help
+ * addresses and the help pages themselves, sorts by id, and refuses a function whose result is no matrix or whose id vanished.
  */
 export class FunctionListPlugin {
   apply(compiler) {
@@ -36,6 +37,8 @@ export class FunctionListPlugin {
           const { finished, errors } = finishFunctionList(list, released, enumLists());
           for (const error of errors) compilation.errors.push(new webpack.WebpackError(`functions.json: ${error}`));
           compilation.updateAsset('functions.json', new webpack.sources.RawSource(JSON.stringify(finished, null, 1)));
+          for (const [name, html] of helpPages(finished))
+            compilation.emitAsset(name, new webpack.sources.RawSource(html));
         },
       );
     });
