@@ -15,6 +15,7 @@ for (let n = 0; n < 256; n++) {
  */
 export function crc32(bytes: Uint8Array): number {
   let crc = 0xffffffff;
-  for (const byte of bytes) crc = (table[(crc ^ byte) & 0xff] ?? 0) ^ (crc >>> 8);
+  // Counted, not iterated: an iterator costs several times the work on each byte.
+  for (let at = 0; at < bytes.length; at++) crc = (table[(crc ^ (bytes[at] ?? 0)) & 0xff] ?? 0) ^ (crc >>> 8);
   return (crc ^ 0xffffffff) >>> 0;
 }

@@ -25,7 +25,7 @@ export function checksSheet(): BookSheet {
     for (let row = HEAD; row <= HEAD + checks.length; row++) {
       const address = `${letter}${row}`;
       const { value = null, formula, spill } = cells[address] ?? {};
-      const style = row === HEAD ? 'heading' : i === 0 || i > 4 ? 'label' : 'data';
+      const style = row === HEAD ? (i > 0 && i < 5 ? 'columnHead' : 'heading') : i === 0 || i > 4 ? 'label' : 'data';
       cells[address] = {
         value,
         ...(formula === undefined || spill === undefined ? {} : { formula, spill }),
@@ -37,9 +37,9 @@ export function checksSheet(): BookSheet {
   return {
     ...emptySheet('Checks'),
     cells,
-    columnWidths: { A: 64, B: 18, C: 18, D: 12, E: 12, F: 16, G: 70 },
+    columnWidths: { A: 104, B: 18, C: 18, D: 12, E: 12, F: 16, G: 84 },
     rowHeights: { '1': 34, '2': 34, [String(HEAD)]: 24 },
-    merges: ['A2:E2'],
+    merges: ['A2:G2'],
     freeze: { rows: HEAD, columns: 0 },
     gridLines: false,
     print: { landscape: true, fitWidth: true },

@@ -67,19 +67,21 @@ export function coverSheet(revisionDate: string): BookSheet {
   row++;
   section('Sheets');
   for (const [name, purpose] of SHEETS) {
-    put(cells, `B${row}`, name, 'label');
+    put(cells, `B${row}`, name, 'text');
     put(cells, `C${row}`, purpose, 'text');
     merges.push(`C${row}:D${row}`);
+    rowHeights[String(row)] = 20;
     row++;
   }
   row++;
   section('How to use it');
-  STEPS.forEach((text, i) => wide(`${i + 1}.  ${text}`, 'text', 34));
+  STEPS.forEach((text, i) => wide(`${i + 1}.  ${text}`, 'text', text.length > 100 ? 34 : 20));
   row++;
   section('Colours');
   for (const [style, name, meaning] of LEGEND) {
     put(cells, `B${row}`, name, style);
-    put(cells, `C${row}`, meaning, 'text');
+    put(cells, `C${row}`, meaning, 'label');
+    rowHeights[String(row)] = 20;
     row++;
   }
   row++;
@@ -96,7 +98,7 @@ export function coverSheet(revisionDate: string): BookSheet {
   return {
     ...emptySheet('Cover'),
     cells,
-    columnWidths: { A: 3, B: 22, C: 70, D: 18 },
+    columnWidths: { A: 3, B: 22, C: 78, D: 18 },
     rowHeights,
     merges,
     gridLines: false,

@@ -55,7 +55,7 @@ export function deltaCpSheet(): BookSheet {
   section(HEAD - 1, 'HIJKLMN', 'What the line says');
   putData(cells);
   putFitTable(cells);
-  const carry = LAST + 2;
+  const carry = HEAD + TABLE_ROWS.length + 2;
   section(carry, 'ABCDEF', 'Carried by Kirchhoff’s law');
   rowHeights[String(carry + 1)] = 48;
   rowHeights[String(carry + 3)] = 48;
@@ -76,7 +76,7 @@ const down = (from: string, to = from) => `${from}${FIRST}:${to}${LAST}`;
 function putData(cells: Record<string, BookCell>): void {
   const heads = ['T / K', 'ΔHvap / (kJ/kg)', 'On the line, kJ/kg', 'Its standard uncertainty', 'Off the line, kJ/kg'];
   [...heads, 'IAPWS-95 at T, kJ/kg'].forEach((words, i) =>
-    put(cells, `${'ABCDEF'.charAt(i)}${HEAD}`, words, 'heading'),
+    put(cells, `${'ABCDEF'.charAt(i)}${HEAD}`, words, 'columnHead'),
   );
   WATER_SR1_86.forEach(([temperatureK, latent], i) => {
     put(cells, `A${FIRST + i}`, temperatureK, 'input', '0.00');
@@ -99,7 +99,7 @@ function putFitTable(cells: Record<string, BookCell>): void {
       const key = TABLE_ROWS[row - 1];
       const numeric = column > 0 && column < 5 && key !== undefined;
       const format = numeric ? TABLE_FORMATS[key] : undefined;
-      const style = row === 0 ? 'heading' : numeric ? 'data' : 'label';
+      const style = row === 0 ? (column > 0 && column < 5 ? 'columnHead' : 'heading') : numeric ? 'data' : 'label';
       const { value = null, formula, spill } = cells[address] ?? {};
       cells[address] = {
         value,
@@ -120,7 +120,7 @@ function putKirchhoff(cells: Record<string, BookCell>, head: number): void {
     'Latent heat there, kJ/kg',
   ];
   [...heads, 'IAPWS-95 there, kJ/kg'].forEach((words, i) =>
-    put(cells, `${'ABCDEF'.charAt(i)}${head}`, words, 'heading'),
+    put(cells, `${'ABCDEF'.charAt(i)}${head}`, words, 'columnHead'),
   );
   const row = head + 1;
   put(cells, `A${row}`, 373.15, 'input', '0.00');

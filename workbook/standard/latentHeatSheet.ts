@@ -99,14 +99,14 @@ export function latentHeatSheet(settings: Settings): BookSheet {
     rowHeights[String(top)] = 24;
     rowHeights[String(head)] = 48;
     const temperature = unitHead('Temperature', 'temperature', settings);
-    putFormula(cells, `A${head}`, temperature.formula, 'heading', temperature.shown);
+    putFormula(cells, `A${head}`, temperature.formula, 'columnHead', temperature.shown);
     temperatures.forEach((t, i) => put(cells, `A${first + i}`, t, 'input', '0.0'));
     columns.forEach(({ words, unit, call, format }, i) => {
       const letter = String.fromCharCode(66 + i);
-      if ('fixed' in unit) put(cells, `${letter}${head}`, `${words}, ${unit.fixed}`, 'heading');
+      if ('fixed' in unit) put(cells, `${letter}${head}`, `${words}, ${unit.fixed}`, 'columnHead');
       else {
         const { formula, shown } = unitHead(words, unit.key, settings);
-        putFormula(cells, `${letter}${head}`, formula, 'heading', shown);
+        putFormula(cells, `${letter}${head}`, formula, 'columnHead', shown);
       }
       const formula = `=LATENTRY.${call.replace(/\bT\b/, `A${first}:A${last}`)}`;
       putSpill(cells, `${letter}${first}:${letter}${last}`, formula, 'answer', format);

@@ -18,12 +18,14 @@ export const standardStyles = {
   subtitle: { size: 12, color: SLATE, wrap: true, valign: 'top' },
   section: { bold: true, size: 13, color: SHORE, under: TIDE, valign: 'center' },
   heading: { bold: true, color: INK, fill: FOAM, under: SHORE, wrap: true, valign: 'center' },
+  columnHead: { bold: true, color: INK, fill: FOAM, under: SHORE, wrap: true, align: 'right', valign: 'center' },
   label: { color: INK, valign: 'center' },
   input: { color: AMBER, fill: SAND, box: SAND_LINE, valign: 'center' },
   answer: { color: KELP, under: FOAM, align: 'right' },
   data: { color: INK, under: FOAM, align: 'right' },
   text: { color: INK, wrap: true, valign: 'top' },
   note: { italic: true, color: SLATE, wrap: true, valign: 'top' },
+  remark: { italic: true, color: SLATE, valign: 'center' },
   caution: { color: RUST, fill: CORAL, wrap: true, valign: 'center' },
 } as const satisfies Record<string, BookStyle>;
 

@@ -48,8 +48,8 @@ export function unitsSheet(settings: Settings): BookSheet {
     const { key = '', choices = [], kind = 'unit' } = SETTINGS[i] ?? {};
     put(cells, `A${row}`, label, 'label');
     put(cells, `B${row}`, value, 'input', '@');
-    put(cells, `C${row}`, NOTES[key] ?? null, 'note');
-    rowHeights[String(row)] = 32;
+    put(cells, `C${row}`, NOTES[key] ?? null, 'remark');
+    rowHeights[String(row)] = 22;
     if (choices.length === 0) return;
     const open = kind === 'unit' ? { open: true } : {};
     lists.push({ range: `B${row}`, values: choices, source: choiceSource(key), ...open });
@@ -57,7 +57,7 @@ export function unitsSheet(settings: Settings): BookSheet {
   return {
     ...emptySheet('Units'),
     cells,
-    columnWidths: { A: 22, B: 20, C: 64 },
+    columnWidths: { A: 22, B: 20, C: 92 },
     rowHeights,
     merges: ['A2:C2'],
     lists,
