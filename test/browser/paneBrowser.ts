@@ -5,7 +5,12 @@ import path from 'node:path';
 import { build } from 'esbuild';
 import { chromium, type Browser, type BrowserContextOptions, type Page } from 'playwright-core';
 
-const CANDIDATES = ['/usr/bin/chromium', '/usr/bin/chromium-browser', '/usr/bin/google-chrome', '/usr/bin/microsoft-edge'];
+const CANDIDATES = [
+  '/usr/bin/chromium',
+  '/usr/bin/chromium-browser',
+  '/usr/bin/google-chrome',
+  '/usr/bin/microsoft-edge',
+];
 const ORIGIN = 'http://pane.test';
 
 const html = `<!doctype html><html lang="en"><head><meta charset="utf-8"><title>Pane</title>

@@ -169,17 +169,26 @@ export class MemoryWorkbook {
     const places = result
       .flatMap((line, r) => line.map((value, c) => ({ place: key(row + r, column + c), value })))
       .slice(1);
-    if (places.some((p) => sheet.cells.has(p.place))) {
+    if (places.some((p) => isFilled(sheet.cells.get(p.place)))) {
       cell.value = { error: '#SPILL!' };
       return;
     }
     cell.value = result[0]?.[0] ?? null;
-    for (const p of places) sheet.cells.set(p.place, { value: p.value, formula: '', spilledFrom: place });
+    for (const p of places) {
+      const format = sheet.cells.get(p.place)?.format;
+      const spilled = { value: p.value, formula: '', spilledFrom: place };
+      sheet.cells.set(p.place, format === undefined ? spilled : { ...spilled, format });
+    }
   }
 }
 
 function isGrid(result: Cell | readonly (readonly Cell[])[]): result is readonly (readonly Cell[])[] {
   return Array.isArray(result);
+}
+
+/** A cell that has nothing but a format is no obstacle to a spill. */
+function isFilled(cell: MemoryCell | undefined): boolean {
+  return cell !== undefined && (cell.value !== null || cell.formula !== '');
 }
 
 function inside(area: Area, row: number, column: number): boolean {

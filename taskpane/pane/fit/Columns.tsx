@@ -30,9 +30,18 @@ export function Columns({ found, choice, settings, onChoice }: ColumnsProps) {
         const header = place === undefined ? undefined : found.columns[place]?.header;
         const stated = header?.unit?.kind === kind ? header.unit.symbol : undefined;
         const choices = SETTINGS.find((row) => row.unit === kind)?.choices ?? [];
+        const unread = header?.unread?.message;
+        const message =
+          unread === undefined
+            ? {}
+            : { validationState: 'error' as const, validationMessage: `${unread}. Correct the header.` };
         return (
-          <div key={part} className={look.pair}>
-            <Field label={label}>
+          <div key={part} className={look.tight}>
+            <Field
+              label={label}
+              hint={stated === undefined ? '' : `in ${prettyUnit(stated)}, as its header says`}
+              {...message}
+            >
               <Select
                 className={look.narrow}
                 value={place === undefined ? '' : String(place)}
@@ -48,8 +57,11 @@ export function Columns({ found, choice, settings, onChoice }: ColumnsProps) {
                 ))}
               </Select>
             </Field>
-            {stated === undefined ? (
-              <Field label="in" hint={choice[unit] === '' ? 'No unit in the header: the workbook’s unit is taken' : ''}>
+            {stated === undefined && unread === undefined && (
+              <Field
+                label={`Unit of the ${label.toLowerCase()}`}
+                hint={choice[unit] === '' ? 'The header names none, so the workbook’s unit is taken' : ''}
+              >
                 <Select
                   className={look.narrow}
                   value={choice[unit]}
@@ -63,10 +75,6 @@ export function Columns({ found, choice, settings, onChoice }: ColumnsProps) {
                   ))}
                 </Select>
               </Field>
-            ) : (
-              <p className={look.quiet} style={{ paddingTop: 28 }}>
-                in {prettyUnit(stated)}, from the header
-              </p>
             )}
           </div>
         );

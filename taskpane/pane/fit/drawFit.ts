@@ -1,3 +1,4 @@
+import { number } from '../look/number';
 import { areaY, dot, line, plot, ruleX, ruleY } from '@observablehq/plot';
 
 export interface DrawnPoint {
@@ -40,7 +41,8 @@ const image = (svg: SVGSVGElement | HTMLElement, words: string) => {
 
 /** Draws the points with line and band, and the strip of residuals below; both share one temperature axis. */
 export function drawFit({ points, band, xLabel, yLabel, width, words }: FitPicture): (SVGSVGElement | HTMLElement)[] {
-  const x = { label: null, nice: false, inset: 6, ticks: Math.max(3, Math.floor(width / 70)) } as const;
+  const tickFormat = (value: number) => number(value);
+  const x = { label: null, nice: false, inset: 6, tickFormat, ticks: Math.max(3, Math.floor(width / 70)) } as const;
   const shared = { width, marginLeft: 54, marginRight: 8, style } as const;
   const radius = points.length > 400 ? 1.3 : 3;
   const mark = {
@@ -56,7 +58,7 @@ export function drawFit({ points, band, xLabel, yLabel, width, words }: FitPictu
     marginTop: 24,
     marginBottom: 22,
     x,
-    y: { label: yLabel, labelArrow: 'none', grid: true, ticks: 5, inset: 4, labelAnchor: 'top' },
+    y: { label: yLabel, tickFormat, labelArrow: 'none', grid: true, ticks: 5, inset: 4, labelAnchor: 'top' },
     marks: [
       areaY(band, { x: 'x', y1: 'low', y2: 'high', fill: 'var(--plotBand)' }),
       line(band, { x: 'x', y: 'y', stroke: 'var(--plotLine)', strokeWidth: 2 }),
@@ -69,7 +71,15 @@ export function drawFit({ points, band, xLabel, yLabel, width, words }: FitPictu
     marginTop: 24,
     marginBottom: 36,
     x: { ...x, label: xLabel, labelArrow: 'none', labelAnchor: 'center' },
-    y: { label: 'residual', labelArrow: 'none', grid: true, ticks: 3, inset: 4, labelAnchor: 'top' },
+    y: {
+      label: 'residual, same unit',
+      tickFormat,
+      labelArrow: 'none',
+      grid: true,
+      ticks: 3,
+      inset: 4,
+      labelAnchor: 'top',
+    },
     marks: [
       ruleY([0], { stroke: 'var(--plotLine)', strokeWidth: 1.5 }),
       ruleX(points, {

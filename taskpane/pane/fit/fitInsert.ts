@@ -6,7 +6,7 @@ import type { Settings } from '../../../functions/settings/settings';
 import { parseArea } from '../../hosts/address';
 import type { FitInsert } from '../../plan/planFit';
 import { within } from '../../plan/unitsBlock';
-import type { Ref } from '../../port';
+import type { Cell, Ref } from '../../port';
 import type { FitChoice } from './fitChoice';
 import type { FitView } from './fitView';
 import type { FitData } from './useFitData';
@@ -20,17 +20,7 @@ export function fitInsert(at: Ref, data: FitData, view: FitView, choice: FitChoi
     temperatures: refOf(data, choice.temperature),
     latents: refOf(data, choice.latent),
     settings: [...unitTexts(settings, workbook), ...optionTexts(view, choice)].join('; '),
-    table: withSlopeUnit(
-      fitTable(fit, {
-        temperatureUnit: units.temperature.symbol,
-        heatUnit: units.heat.symbol,
-        heatCapacityUnit: units.heatCapacity.symbol,
-        curvatureUnit: `${units.heatCapacity.symbol} / ${differenceUnit(units.temperature).symbol}`,
-        kind: choice.kind,
-        substance: choice.substance === '' ? undefined : choice.substance,
-      }),
-      units.slopeFactor,
-    ),
+    table: tableOf(view, choice),
     example: {
       temperature: fit.reference,
       temperatureUnit: units.temperature.symbol,
@@ -40,6 +30,20 @@ export function fitInsert(at: Ref, data: FitData, view: FitView, choice: FitChoi
       settings: unitTexts({ ...settings, units: { ...settings.units, heat: units.heat } }, workbook).join('; '),
     },
   };
+}
+
+/** The same cells that FITDELTACP spills. */
+function tableOf({ fit, units }: FitView, choice: FitChoice): Cell[][] {
+  const table = fitTable(fit, {
+    temperatureUnit: units.temperature.symbol,
+    heatUnit: units.heat.symbol,
+    heatCapacityUnit: units.heatCapacity.symbol,
+    curvatureUnit: `${units.heatCapacity.symbol} / ${differenceUnit(units.temperature).symbol}`,
+    kind: choice.kind,
+    substance: choice.substance === '' ? undefined : choice.substance,
+  });
+  const slopes = withSlopeUnit(table, units.slopeFactor);
+  return slopes.map((row) => row.map((cell) => (typeof cell === 'number' || typeof cell === 'string' ? cell : null)));
 }
 
 /** The cell beside the data: one column of air, then the first free column to the right of the ranges. */

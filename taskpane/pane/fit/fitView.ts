@@ -40,7 +40,7 @@ export function chosenUnit(
   chosen: string,
   settings: Settings,
 ): ChosenUnit {
-  if (column?.header?.unread !== undefined && chosen === '') throw column.header.unread;
+  if (column?.header?.unread !== undefined) throw column.header.unread;
   const stated = column?.header?.unit;
   if (stated?.kind === kind) return { unit: stated, from: 'header' };
   if (chosen !== '') return { unit: unitOf(chosen, kind), from: 'choice' };

@@ -21,9 +21,9 @@ export function curvatureWords(curvature: Curvature | undefined): string {
 
 /** Short names of the three kinds. */
 export const KIND_NAMES: Readonly<Record<LatentKind, string>> = {
-  coexistence: 'coexistence (both phases on their line)',
-  isobaric: 'isobaric (one stated pressure)',
-  standard: 'standard (1 bar, ideal gas)',
+  coexistence: 'coexistence, two-phase line',
+  isobaric: 'isobaric, one pressure',
+  standard: 'standard, 1 bar, ideal gas',
 };
 
 /** What the slope of data of a kind is. */

@@ -40,7 +40,7 @@ export const useLook = makeStyles({
       verticalAlign: 'top',
     },
     '& thead th': { color: tokens.colorNeutralForeground3, fontWeight: 600, fontSize: '12px' },
-    '& tbody th': { fontWeight: 400 },
+    '& tbody th': { fontWeight: 400, minWidth: '76px' },
   },
   scroll: { overflow: 'auto', maxHeight: '280px', maxWidth: '100%' },
   summary: { cursor: 'pointer', color: tokens.colorBrandForeground1, lineHeight: '22px' },
