@@ -1,0 +1,22 @@
+import { benchCore } from './benchCore';
+import { benchFit } from './benchFit';
+import { benchFunctions } from './benchFunctions';
+import { benchGrid } from './benchGrid';
+import { benchSizes } from './benchSizes';
+
+const PARTS: Readonly<Record<string, () => void | Promise<void>>> = {
+  core: benchCore,
+  functions: benchFunctions,
+  fit: benchFit,
+  sizes: benchSizes,
+  grid: benchGrid,
+};
+
+/** Runs the named parts, or all of them. Ratios hold within one run; absolute times depend on the machine. */
+export async function bench(names: readonly string[]): Promise<void> {
+  for (const name of names.length === 0 ? Object.keys(PARTS) : names) {
+    const part = PARTS[name];
+    if (part === undefined) throw new Error(`no part ${name}; allowed ${Object.keys(PARTS).join(', ')}`);
+    await part();
+  }
+}
