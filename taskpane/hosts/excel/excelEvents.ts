@@ -25,7 +25,7 @@ async function changedRef({ worksheetId, address }: Excel.WorksheetChangedEventA
 /** Excel says who wrote since ExcelApi 1.14; before, what this add-in was about to write is compared. */
 function wroteItself(args: Excel.WorksheetChangedEventArgs, ref: Ref | null, writes: OwnWrites): boolean {
   const expected = ref !== null && writes.recognise(ref);
-  const { triggerSource: trigger }: { readonly triggerSource?: string } = args;
+  const trigger = args.triggerSource as string | undefined;
   return trigger === undefined ? expected : trigger === 'ThisLocalAddin';
 }
 
