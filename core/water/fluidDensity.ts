@@ -45,7 +45,14 @@ export function fluidDensity(
     else low = density;
     let next = density - gap / state.pressureByDensity;
     const step = Math.abs(next - density);
-    if (!unstable && (step <= 1e-15 * density || (step < 1e-10 * density && step >= lastStep))) return density;
+    if (!unstable) {
+      if (step <= 1e-15 * density || (step < 1e-10 * density && step >= lastStep)) return density;
+      if (step < 1e-8 * density && step < 1e-3 * lastStep) {
+        // converging quadratically: the next step would be below rounding
+        fluidState(temperatureK, next, state);
+        return next;
+      }
+    }
     lastStep = step;
     if (unstable || !(next > low && next < high)) next = 0.5 * (low + high);
     if (high - low <= 1e-15 * high) return settled(state, pressurePa) ? density : Number.NaN;

@@ -45,10 +45,16 @@ export function solveSaturation(temperatureK: number, out: SaturationState): Sat
     const step = Math.max(Math.abs(vapourStep), Math.abs(liquidStep));
     if (!(step < Infinity)) break;
     if (step < 1e-14 || (step < 1e-6 && step >= lastStep)) break;
-    lastStep = step;
     const damping = step > 0.3 ? 0.3 / step : 1;
     vapourDensity *= 1 + damping * vapourStep;
     liquidDensity *= 1 + damping * liquidStep;
+    if (step < 1e-8 && step < 1e-3 * lastStep) {
+      // converging quadratically: the next step would be below rounding
+      fluidState(temperatureK, liquidDensity, liquid);
+      fluidState(temperatureK, vapourDensity, vapour);
+      break;
+    }
+    lastStep = step;
   }
   out.pressure = vapour.pressure;
   out.slope = (vapour.entropy - liquid.entropy) / (vapour.volume - liquid.volume);
