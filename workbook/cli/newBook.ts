@@ -34,8 +34,9 @@ export async function newBook(args: readonly string[], io: Io): Promise<Exit> {
   if (!/\.xlsx$/i.test(file)) throw new Usage(`new: the file is to end in .xlsx; received ${file}`, HELP);
 
   const engine = await openEngine({ bundlePath: io.bundlePath });
-  const settings = readUnits(() => engine.readSettings(values.units ?? ''));
-  const book = await engine.calculate(standardBook({ settings, revisionDate: today() }));
+  const { units } = values;
+  const settings = units === undefined ? {} : { settings: readUnits(() => engine.readSettings(units)) };
+  const book = await engine.calculate(standardBook({ ...settings, revisionDate: today() }));
   try {
     await writeFile(file, writeXlsx(book), { flag: values.force === true ? 'w' : 'wx' });
   } catch (thrown) {

@@ -2,10 +2,10 @@ import { formatArea, parseArea } from '../../taskpane/hosts/address';
 import type { Cell } from '../../taskpane/port';
 import type { Book, BookCell, BookSheet } from '../book';
 import { spilledCells } from '../spilledCells';
-import type { EngineCells } from './engineBook';
+import type { EngineCells, EngineValue } from './engineBook';
 
 /** Turns what the engine says of one cell into the cell's value; `row` and `column` are the offset within the spill. */
-export type CellReader = (cells: EngineCells, anchor: Anchor, row: number, column: number) => Cell;
+export type CellReader = (value: EngineValue, anchor: Anchor, row: number, column: number) => Cell;
 
 /** A cell with a formula, counted from zero. */
 export interface Anchor {
@@ -45,7 +45,9 @@ function calculatedSheet(sheet: BookSheet, index: number, calculated: EngineCell
         const row = fixed !== null && extent.rows === 1 ? 0 : r;
         const column = fixed !== null && extent.columns === 1 ? 0 : c;
         const beyond = row >= extent.rows || column >= extent.columns;
-        const value: Cell = beyond ? { error: '#N/A' } : read(calculated, anchor, row, column);
+        const value: Cell = beyond
+          ? { error: '#N/A' }
+          : read(calculated.value(area.top + row, area.left + column), anchor, row, column);
         cells[at] = r === 0 && c === 0 ? withValue(cell, value, area, extent) : { ...cells[at], value };
       }
     }

@@ -28,6 +28,9 @@ export interface EngineName {
 
 export type EngineValue = number | string | boolean | null | { readonly code: string };
 
+/** A whole result, row by row. */
+export type EngineMatrix = readonly (readonly EngineValue[])[];
+
 /** One sheet after calculation: cells with a formula, and those that a formula spilled into. */
 export interface EngineCells {
   value(row: number, column: number): EngineValue;

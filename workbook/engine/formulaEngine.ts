@@ -28,8 +28,9 @@ import { functionClasses, type CallListeners } from '../grid/adapter';
 import type { CellFunction } from '../grid/customFunctions';
 import type { FunctionList } from '../grid/functionList';
 import { mendEngine } from '../grid/mendEngine';
+import { COLLECTOR, collectorClass } from './collector';
 import { cyclicCells } from './cyclicCells';
-import { sheetId, type EngineBook, type EngineCells } from './engineBook';
+import { sheetId, type EngineBook, type EngineCells, type EngineMatrix } from './engineBook';
 import { engineCells } from './engineCells';
 import { snapshot } from './snapshot';
 
@@ -37,6 +38,8 @@ import { snapshot } from './snapshot';
 export interface FormulaEngine {
   /** Calculates every formula of the book; one calculation at a time. */
   calculate(book: EngineBook): Promise<readonly EngineCells[]>;
+  /** Gives the whole result of each formula; they may point into the book. Formulas stand in one column, by their order. */
+  evaluate(book: EngineBook, formulas: readonly string[]): Promise<readonly EngineMatrix[]>;
   /** False where brackets, quotes or operators of a formula do not agree. */
   isWellFormed(formula: string): boolean;
   /** Every function that a formula may call, in capital letters. */
@@ -56,6 +59,9 @@ const CALCULATE_ALL = {
   options: undefined,
 };
 
+/** No sheet of a file can be called so: a colon is not allowed there. */
+const OWN_SHEET = 'formulas:';
+
 /** The library keeps parsed formulas by book for the whole process, so no two books may be called the same. */
 let booksSoFar = 0;
 
@@ -66,7 +72,10 @@ export function startFormulaEngine(
   listeners: CallListeners,
 ): FormulaEngine {
   const univer = new Univer({ locale: LocaleType.EN_US, locales: {}, logLevel: LogLevel.SILENT });
-  univer.registerPlugin(UniverFormulaEnginePlugin, { function: functionClasses(list, mappings, listeners) });
+  const collected = new Map<number, EngineMatrix>();
+  univer.registerPlugin(UniverFormulaEnginePlugin, {
+    function: [...functionClasses(list, mappings, listeners), [collectorClass(collected), COLLECTOR]],
+  });
   const injector = univer.__getInjector();
   mendEngine(injector);
   const commands = injector.get(ICommandService);
@@ -155,18 +164,37 @@ export function startFormulaEngine(
     return (await withUnit(broken, (unitId) => calculateUnit(unitId, book.sheets.length))) ?? [];
   };
 
+  const evaluate = async (book: EngineBook, formulas: readonly string[]): Promise<readonly EngineMatrix[]> => {
+    collected.clear();
+    const cells = formulas.map((formula, row) => ({
+      row,
+      column: 0,
+      value: null,
+      formula: `=${COLLECTOR}(${formula.slice(1)})`,
+    }));
+    const own = { name: OWN_SHEET, rows: formulas.length, columns: 1, cells };
+    const calculated = await run({ ...book, sheets: [...book.sheets, own] });
+    // Where the formula never came to a result, its cell says why.
+    return formulas.map((_formula, row) => collected.get(row) ?? [[calculated.at(-1)?.value(row, 0) ?? null]]);
+  };
+
+  const inTurn = <T>(work: () => Promise<T>): Promise<T> => {
+    const next = queue.then(work);
+    queue = next.catch(() => undefined);
+    return next;
+  };
+
   return {
-    calculate: (book) => {
-      const next = queue.then(() => run(book));
-      queue = next.catch(() => undefined);
-      return next;
-    },
+    calculate: (book) => inTurn(() => run(book)),
+    evaluate: (book, formulas) => inTurn(() => evaluate(book, formulas)),
     isWellFormed: (formula) => {
       const tree = injector.get(LexerTreeBuilder).treeBuilder(formula);
       return tree !== undefined && typeof tree !== 'string';
     },
     functionNames: () =>
-      [...injector.get(IFunctionService).getExecutors().keys()].map((name) => String(name).toUpperCase()),
+      [...injector.get(IFunctionService).getExecutors().keys()]
+        .map((name) => String(name).toUpperCase())
+        .filter((name) => name !== COLLECTOR),
   };
 }
 

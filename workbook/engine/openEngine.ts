@@ -4,8 +4,8 @@ import type { Book } from '../book';
 import { createCellMessages } from '../grid/cellMessages';
 import { createLateAnswers } from '../grid/lateAnswers';
 import { bookSettings } from './bookSettings';
-import { calculatedBook, type Anchor, type CellReader } from './calculatedBook';
-import { sheetId, type EngineBook, type EngineCells, type EngineSheet } from './engineBook';
+import { calculatedBook, type Anchor } from './calculatedBook';
+import { sheetId, type EngineBook, type EngineValue } from './engineBook';
 import { engineBookOf } from './engineBookOf';
 import { errorWords } from './errorWords';
 import { malformed, refusalOf } from './refusalOf';
@@ -47,11 +47,7 @@ const MOST_ROUNDS = 64;
 /** Settings that are calculated from settings are followed so far. */
 const MOST_SETTINGS_ROUNDS = 3;
 
-/** A formula given by itself stands on a sheet of its own, with room for whatever it spills. */
-const WHOLE_SHEET = { rows: 1_048_576, columns: 16_384 };
-
-/** No sheet of a file can be called so: a colon is not allowed there. */
-const OWN_SHEET = 'formula:';
+const NO_BOOK: EngineBook = { sheets: [], names: [] };
 
 /**
  * Opens the headless engine on a functions bundle.
@@ -75,16 +71,16 @@ export async function openEngine(options: { readonly bundlePath: string }): Prom
     return next;
   };
 
-  const run = async (book: EngineBook): Promise<readonly EngineCells[]> => {
+  /** Calculates until no answer comes late any more. */
+  const untilSettled = async <T>(work: () => Promise<T>): Promise<T> => {
     for (let round = 1; ; round++) {
       messages = createCellMessages();
-      const cells = await formulas.calculate(book);
-      if (!(await late.whenSettled()) || round === MOST_ROUNDS) return cells;
+      const result = await work();
+      if (!(await late.whenSettled()) || round === MOST_ROUNDS) return result;
     }
   };
 
-  const readCell: CellReader = (cells, anchor, row, column) => {
-    const value = cells.value(anchor.row + row, anchor.column + column);
+  const readValue = (value: EngineValue, anchor: Anchor, row: number, column: number): Cell => {
     if (typeof value !== 'object' || value === null) return value;
     if (!formulas.isWellFormed(anchor.formula)) return malformed(anchor.formula);
     const said = messages.at(sheetId(anchor.sheet), anchor.row, anchor.column, value.code, { row, column });
@@ -98,40 +94,29 @@ export async function openEngine(options: { readonly bundlePath: string }): Prom
     for (let round = 1; ; round++) {
       const changed = latentry.settings.publish(bookSettings(known, unitsText, latentry));
       if (round > 1 && !changed) return known;
-      known = withKeptFormulas(calculatedBook(followed, await run(cells), readCell), book);
+      const calculated = await untilSettled(() => formulas.calculate(cells));
+      known = withKeptFormulas(calculatedBook(followed, calculated, readValue), book);
       // Unit settings may themselves be calculated: then again, with what they came to.
       if (round === MOST_SETTINGS_ROUNDS) return known;
     }
   };
 
-  const evaluate = async (
-    texts: readonly string[],
-    { book, unitsText }: EvaluateOptions,
-  ): Promise<readonly Evaluated[]> => {
+  const evaluate = async (texts: readonly string[], { book, unitsText }: EvaluateOptions): Promise<Evaluated[]> => {
     const known = book === undefined ? undefined : await calculate(book, unitsText);
     if (known === undefined) latentry.settings.publish(bookSettings(undefined, unitsText, latentry));
-    const base = known === undefined ? { sheets: [], names: [] } : engineBookOf(followedBook(known));
-    const anchors = texts.map((text, i): Anchor => ({
-      sheet: base.sheets.length + i,
-      row: 0,
-      column: 0,
-      formula: asFormula(text),
-    }));
-    const refusals = anchors.map(({ formula }) =>
+    const base = known === undefined ? NO_BOOK : engineBookOf(followedBook(known));
+    const asked = texts.map(asFormula);
+    const refusals = asked.map((formula) =>
       refusalOf(formula, (text) => formulas.isWellFormed(text), known !== undefined),
     );
-    const sheets = anchors.map(({ formula }, i): EngineSheet => {
-      const cell = { row: 0, column: 0, value: null, formula };
-      return { name: `${OWN_SHEET} ${i + 1}`, ...WHOLE_SHEET, cells: refusals[i] === undefined ? [cell] : [] };
-    });
-    const calculated = await run({ sheets: [...base.sheets, ...sheets], names: base.names });
-    return anchors.map((anchor, i): Evaluated => {
-      const cells = calculated[anchor.sheet];
-      const refusal = refusals[i];
-      const formula = texts[i] ?? '';
-      if (refusal !== undefined || cells === undefined) return { formula, values: [[refusal ?? null]] };
-      const { rows, columns } = cells.extent(0, 0);
-      return { formula, values: matrix(rows, columns, (r, c) => readCell(cells, anchor, r, c)) };
+    const calculable = asked.map((formula, i) => (refusals[i] === undefined ? formula : '=0'));
+    const matrices = await untilSettled(() => formulas.evaluate(base, calculable));
+    return texts.map((formula, row): Evaluated => {
+      const refusal = refusals[row];
+      if (refusal !== undefined) return { formula, values: [[refusal]] };
+      const anchor = { sheet: base.sheets.length, row, column: 0, formula: asked[row] ?? '' };
+      const values = (matrices[row] ?? []).map((cells, r) => cells.map((cell, c) => readValue(cell, anchor, r, c)));
+      return { formula, values };
     });
   };
 
@@ -146,8 +131,4 @@ export async function openEngine(options: { readonly bundlePath: string }): Prom
 function asFormula(text: string): string {
   const trimmed = text.trim();
   return trimmed.startsWith('=') ? trimmed : `=${trimmed}`;
-}
-
-function matrix<T>(rows: number, columns: number, at: (row: number, column: number) => T): T[][] {
-  return Array.from({ length: rows }, (_row, r) => Array.from({ length: columns }, (_column, c) => at(r, c)));
 }

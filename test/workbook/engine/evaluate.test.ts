@@ -49,7 +49,7 @@ describe('arguments arrive as Excel hands them over', () => {
       [[60]],
       [['140 degF']],
       [[['a=b']], [['c=d']]],
-      { functionName: 'ECHO', address: "'formula: 1'!A1", parameterAddresses: [null, null, null, null] },
+      { functionName: 'ECHO', address: "'formulas:'!A1", parameterAddresses: [null, null, null, null] },
     ]);
   });
 
@@ -72,7 +72,7 @@ describe('arguments arrive as Excel hands them over', () => {
         [null, { code: '#N/A' }],
       ],
       [],
-      { functionName: 'ECHO', address: "'formula: 1'!A1", parameterAddresses: ['Data!A1:B2', 'Data!A1:B2'] },
+      { functionName: 'ECHO', address: "'formulas:'!A1", parameterAddresses: ['Data!A1:B2', 'Data!A1:B2'] },
     ]);
   });
 

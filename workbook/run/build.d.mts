@@ -1,0 +1,2 @@
+export function isBuilt(folder: string): boolean;
+export function build(): Promise<void>;

@@ -1,0 +1,6 @@
+export function withLock<T>(
+  folder: string,
+  name: string,
+  work: () => Promise<T>,
+  onWait?: (holder: number) => void,
+): Promise<T>;

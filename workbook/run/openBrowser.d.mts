@@ -1,0 +1,1 @@
+export function openerOf(platform: string, env: Readonly<Record<string, string | undefined>>): string[] | null;

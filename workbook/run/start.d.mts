@@ -1,0 +1,1 @@
+export function startOptions(args: readonly string[]): { port: number; open: boolean } | string;
