@@ -1,20 +1,13 @@
 import type { Mark } from '../answer';
 import type { OutOfRange } from '../evaluate';
 import { Problem } from '../problem';
-import type { Gap, Ladder, Substance } from '../substance';
+import type { Ladder, Substance } from '../substance';
+import { climb, type HeatStep } from './climb';
 import type { Place } from './place';
-import { placeState } from './placeState';
+import { placeState, transitionAt } from './placeState';
 import type { State } from './state';
 
-/** One leg of a path: along a phase, or across a transition. */
-export interface HeatStep {
-  /** `liquid`, `vaporization`; `condensation` where the path goes down; `liquid to solid` where a metastable state ends. */
-  readonly label: string;
-  readonly fromK: number;
-  readonly toK: number;
-  /** J/mol taken up. */
-  readonly heat: number;
-}
+export type { HeatStep };
 
 export interface HeatPath {
   readonly steps: readonly HeatStep[];
@@ -26,20 +19,14 @@ export interface HeatPath {
   readonly ladder: Ladder;
 }
 
-const DOWNWARD: Readonly<Record<string, string>> = {
-  fusion: 'freezing',
-  vaporization: 'condensation',
-  sublimation: 'deposition',
-};
-
 /**
  * The path between two states at one pressure, leg by leg: along each phase and across each transition between them.
  *
  * heat = h(to) − h(from), so that the legs add up to it and the way back gives it with the sign turned.
  *
  * An end that is a bare temperature exactly on a transition is taken on the side of the other end: the transition is
- * not crossed. A metastable end first changes to the stable phase at its own temperature; between two states of one
- * phase the path stays in that phase.
+ * not crossed. A metastable end is followed along its own phase where the path leads through that phase, and changes to
+ * the stable phase at its own temperature where it does not.
  *
  * @param substance the substance
  * @param from first state
@@ -62,16 +49,15 @@ export function heatSteps(
     placeState(substance, to, pressurePa, policy),
     ladder,
   );
-  const steps = staysInPhase(a, b)
-    ? [{ label: a.phase, fromK: a.temperatureK, toK: b.temperatureK, heat: b.enthalpy - a.enthalpy }]
-    : [...leaving(a, ladder), ...climb(stable(a, ladder), stable(b, ladder), ladder), ...arriving(b, ladder)];
+  const steps = staysInPhase(a, b) ? alongPhase(a, b) : between(joined(a, b, ladder), joined(b, a, ladder), ladder);
   return { steps, heat: b.enthalpy - a.enthalpy, marks: [...a.marks, ...b.marks], from: a, to: b, ladder };
 }
 
 /** Puts an end that lies on a transition on the side of the other end. */
 function decided(a: Place, b: Place, ladder: Ladder): [Place, Place] {
   if (a.undecided !== true && b.undecided !== true) return [a, b];
-  if (a.undecided === true && b.undecided === true && a.temperatureK === b.temperatureK) {
+  const gapOfA = transitionAt(ladder, a.temperatureK);
+  if (a.undecided === true && b.undecided === true && gapOfA?.index === transitionAt(ladder, b.temperatureK)?.index) {
     throw new Problem({
       code: 'argument',
       argument: 'from and to',
@@ -80,10 +66,9 @@ function decided(a: Place, b: Place, ladder: Ladder): [Place, Place] {
     });
   }
   const sided = (place: Place, other: Place): Place => {
-    if (place.undecided !== true) return place;
-    const gapIndex = ladder.gaps.findIndex((gap) => gap.temperatureK === place.temperatureK);
-    const gap = ladder.gaps[gapIndex];
-    if (gap === undefined) return place;
+    const found = transitionAt(ladder, place.temperatureK);
+    if (place.undecided !== true || found === undefined) return place;
+    const { gap, index: gapIndex } = found;
     const above =
       other.segment > 2 * gapIndex + 1 || (other.segment === 2 * gapIndex + 1 && other.enthalpy > gap.below);
     const rung = ladder.rungs[above ? gapIndex + 1 : gapIndex];
@@ -91,6 +76,7 @@ function decided(a: Place, b: Place, ladder: Ladder): [Place, Place] {
     const text = `exactly at ${gap.change}: taken as ${rung.phase}, the side of the other end; name the phase to be sure`;
     return {
       ...place,
+      temperatureK: gap.temperatureK,
       enthalpy: above ? gap.above : gap.below,
       segment: above ? 2 * gapIndex + 2 : 2 * gapIndex,
       phase: rung.phase,
@@ -111,60 +97,51 @@ function stable(place: Place, ladder: Ladder): Place {
   return { ...place, enthalpy: rung.enthalpy(place.temperatureK), phase: rung.phase };
 }
 
-function leaving(place: Place, ladder: Ladder): HeatStep[] {
-  return place.metastable === undefined ? [] : [change(place, stable(place, ladder))];
+function alongPhase(a: Place, b: Place): HeatStep[] {
+  return a.temperatureK === b.temperatureK ? [] : [leg(a.phase, a, b)];
 }
 
-function arriving(place: Place, ladder: Ladder): HeatStep[] {
-  return place.metastable === undefined ? [] : [change(stable(place, ladder), place)];
+/** A place on the ladder, and the leg that leads there from a metastable state. */
+interface Joined {
+  readonly place: Place;
+  readonly leg: HeatStep | undefined;
 }
 
-function change(a: Place, b: Place): HeatStep {
-  return {
-    label: `${a.phase} to ${b.phase}`,
-    fromK: a.temperatureK,
-    toK: b.temperatureK,
-    heat: b.enthalpy - a.enthalpy,
-  };
-}
-
-/** The legs between two stable places; downward they are the upward legs turned round. */
-function climb(a: Place, b: Place, ladder: Ladder): HeatStep[] {
-  if (a.segment < b.segment || (a.segment === b.segment && a.enthalpy <= b.enthalpy)) return upward(a, b, ladder);
-  return upward(b, a, ladder)
-    .reverse()
-    .map(({ label, fromK, toK, heat }) => ({ label: DOWNWARD[label] ?? label, fromK: toK, toK: fromK, heat: -heat }));
-}
-
-function upward(a: Place, b: Place, ladder: Ladder): HeatStep[] {
-  const steps: HeatStep[] = [];
-  for (let segment = a.segment; segment <= b.segment; segment++) {
-    const span = spanOf(segment, ladder);
-    const start = segment === a.segment ? a : span.start;
-    const end = segment === b.segment ? b : span.end;
-    const heat = end.enthalpy - start.enthalpy;
-    if (start.temperatureK === end.temperatureK && heat === 0) continue;
-    steps.push({ label: span.label, fromK: start.temperatureK, toK: end.temperatureK, heat });
+function joined(place: Place, other: Place, ladder: Ladder): Joined {
+  if (place.metastable === undefined) return { place, leg: undefined };
+  const door = ownPhaseDoor(place, ladder);
+  const warmer = door !== undefined && door.temperatureK > place.temperatureK;
+  if (door !== undefined && (warmer ? other.segment >= door.segment : other.segment <= door.segment)) {
+    return { place: door, leg: leg(`metastable ${place.phase}`, place, door) };
   }
-  return steps;
+  const end = stable(place, ladder);
+  return { place: end, leg: leg(`${place.phase} to ${end.phase}`, place, end) };
 }
 
-interface Point {
-  readonly temperatureK: number;
-  readonly enthalpy: number;
+/** The end of the phase's own rung that a metastable state comes from: there it is stable again. */
+function ownPhaseDoor(place: Place, ladder: Ladder): Place | undefined {
+  const index = ladder.rungs.findIndex((rung) => rung.phase === place.metastable);
+  const rung = ladder.rungs[index];
+  if (rung === undefined) return undefined;
+  const cold = place.temperatureK < rung.fromK;
+  const gap = ladder.gaps[cold ? index - 1 : index];
+  if (gap === undefined) return undefined;
+  const enthalpy = cold ? gap.above : gap.below;
+  return { temperatureK: gap.temperatureK, enthalpy, segment: 2 * index, phase: rung.phase, marks: [] };
 }
 
-/** The whole of a segment: a rung between the gaps at its ends, or a gap from its lower side to its upper. */
-function spanOf(segment: number, ladder: Ladder): { label: string; start: Point; end: Point } {
-  const open: Point = { temperatureK: NaN, enthalpy: NaN };
-  const side = (gap: Gap | undefined, at: 'below' | 'above'): Point =>
-    gap === undefined ? open : { temperatureK: gap.temperatureK, enthalpy: gap[at] };
-  const index = Math.floor(segment / 2);
-  const gap = ladder.gaps[index];
-  if (segment % 2 === 1) return { label: gap?.change ?? '', start: side(gap, 'below'), end: side(gap, 'above') };
-  return {
-    label: ladder.rungs[index]?.phase ?? '',
-    start: side(ladder.gaps[index - 1], 'above'),
-    end: side(gap, 'below'),
-  };
+function leg(label: string, a: Place, b: Place): HeatStep {
+  return { label, fromK: a.temperatureK, toK: b.temperatureK, heat: b.enthalpy - a.enthalpy };
+}
+
+/** From one end to the other by way of the ladder; the last leg is that of a metastable end turned round. */
+function between(a: Joined, b: Joined, ladder: Ladder): HeatStep[] {
+  const legs = climb(a.place, b.place, ladder);
+  if (a.leg !== undefined) legs.unshift(a.leg);
+  if (b.leg !== undefined) {
+    const { label, fromK, toK, heat } = b.leg;
+    const words = label.split(' to ').reverse().join(' to ');
+    legs.push({ label: words, fromK: toK, toK: fromK, heat: -heat });
+  }
+  return legs;
 }

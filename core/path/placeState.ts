@@ -8,6 +8,16 @@ import type { State } from './state';
 /** A bare temperature this near to a transition is answered with a warning, K. */
 const NEAR_K = 0.1;
 
+/** A temperature this near is the transition temperature itself: what unit conversion and printed digits leave of it, K. */
+const SAME_K = 1e-6;
+
+/** The transition that a temperature stands on. */
+export function transitionAt(ladder: Ladder, temperatureK: number): FoundGap | undefined {
+  const index = ladder.gaps.findIndex((gap) => Math.abs(gap.temperatureK - temperatureK) <= SAME_K);
+  const gap = ladder.gaps[index];
+  return gap === undefined ? undefined : { gap, index };
+}
+
 /**
  * Finds a state on the ladder of a substance at a pressure.
  *
@@ -57,7 +67,7 @@ function bareTemperature(substance: Substance, ladder: Ladder, temperatureK: num
     enthalpy: rung.enthalpy(temperatureK),
     segment: 2 * index,
     phase: rung.phase,
-    undecided: near?.temperatureK === temperatureK,
+    undecided: transitionAt(ladder, temperatureK) !== undefined,
     marks,
   };
 }
@@ -69,6 +79,10 @@ function namedPhase(
   phase: Phase,
   policy: OutOfRange,
 ): Place {
+  const found = transitionAt(ladder, temperatureK);
+  const side =
+    found === undefined ? -1 : ladder.rungs.slice(found.index, found.index + 2).findIndex((r) => fits(r, phase));
+  if (found !== undefined && side >= 0) return onGap(ladder, found, side);
   const index = ladder.rungs.findIndex(
     (rung) => fits(rung, phase) && temperatureK >= rung.fromK && temperatureK <= rung.toK,
   );
@@ -86,7 +100,10 @@ function namedPhase(
     segment: 2 * stable.index,
     phase,
     metastable: phase,
-    marks: [{ code: 'metastable', text }],
+    marks: [
+      { code: 'metastable', text },
+      ...(curve.marksAt?.(temperatureK) ?? []).filter((m) => m.code !== 'metastable'),
+    ],
   };
 }
 
@@ -121,7 +138,7 @@ function rungAt(
   });
 }
 
-interface FoundGap {
+export interface FoundGap {
   readonly gap: Gap;
   readonly index: number;
 }

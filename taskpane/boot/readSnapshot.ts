@@ -1,6 +1,4 @@
-import { Problem } from '../../core/problem';
-import { settingCell } from '../../functions/settings/settingCell';
-import { DEFAULT_SETTINGS, parseSettingsBlock, settingsStamp } from '../../functions/settings/settings';
+import { DEFAULT_SETTINGS, readSettingsBlock, settingsStamp } from '../../functions/settings/settings';
 import type { StoreState } from '../../functions/settings/store';
 import { formatArea, parseArea } from '../hosts/address';
 import type { Block, Ref, WorkbookHost } from '../port';
@@ -20,18 +18,18 @@ export interface Snapshot {
   readonly sheets: ReadonlySet<string>;
 }
 
-/** The parser names the row by its number in the block. */
-function brokenAt({ ref, values }: Block, problem: Problem): Snapshot['store'] {
-  const { data } = problem;
+/** The store's state for a block that names a damaged cell, or lacks a row: no default steps in for either. */
+function brokenAt(
+  { ref, values }: Block,
+  row: number,
+  column: number,
+  text: string,
+  message: string,
+): Snapshot['store'] {
   const area = parseArea(ref.address);
-  const row = data.code === 'argument' ? Number(/\brow (\d+)\b/.exec(data.argument)?.[1]) - 1 : Number.NaN;
-  const message = data.code === 'argument' ? data.allowed : problem.message;
-  if (area === null || !(row >= 0 && row < area.rows)) {
-    return { state: 'broken', cell: ref.address, text: '', message };
-  }
-  const column = Math.min(1, area.columns - 1);
-  const cell = formatArea({ top: area.top + row, left: area.left + column, rows: 1, columns: 1 });
-  return { state: 'broken', cell, text: settingCell(values[row]?.[column]), message };
+  if (area === null || row < 0 || row >= values.length) return { state: 'broken', cell: ref.address, text, message };
+  const left = area.left + Math.min(column, area.columns - 1);
+  return { state: 'broken', cell: formatArea({ top: area.top + row, left, rows: 1, columns: 1 }), text, message };
 }
 
 function storeOf(units: Ref | 'broken' | undefined, block: Block | undefined): Snapshot['store'] {
@@ -44,13 +42,10 @@ function storeOf(units: Ref | 'broken' | undefined, block: Block | undefined): S
       message: 'the name has to lead to the rows of the Units sheet',
     };
   }
-  try {
-    const settings = parseSettingsBlock(block.values, DEFAULT_SETTINGS);
-    return { state: 'ready', settings, stamp: settingsStamp(settings, '') };
-  } catch (error) {
-    if (!(error instanceof Problem)) throw error;
-    return brokenAt(block, error);
-  }
+  const { settings, missing, fault } = readSettingsBlock(block.values, DEFAULT_SETTINGS);
+  if (fault !== undefined) return brokenAt(block, fault.row, fault.column, fault.text, fault.message);
+  if (missing.length > 0) return brokenAt(block, -1, 0, '', `a row for ${missing.join(', ')}: it is missing`);
+  return { state: 'ready', settings, stamp: settingsStamp(settings, '') };
 }
 
 function nameIn(names: ReadonlyMap<string, Ref | 'broken'>, wanted: string): Ref | 'broken' | undefined {

@@ -60,21 +60,21 @@ function tablesOf(full) {
   const critical = { towardsEnd: full.CRITICAL_PIECES };
   const middle = { range: [full.SUPERCOOLED_TO_K, full.CRITICAL_FROM_K], pieces: 10 };
   const sublimation = { range: [full.COLDEST_VAPOUR_K, full.TRIPLE_K], pieces: 10 };
-  const melting = { range: [full.COLDEST_MELTING_K, full.TRIPLE_K], pieces: 8, terms: 9 };
+  const melting = { range: [full.COLDEST_MELTING_K, full.TRIPLE_K], pieces: 8, terms: 11 };
   const lnCritical = Math.log(full.CRITICAL_PRESSURE_PA);
   return {
-    SUPERCOOLED_HEAT: { ...supercooled, terms: 8, of: fromCold(heat) },
-    SUPERCOOLED_SLOPE: { ...supercooled, terms: 10, of: fromCold(slope) },
-    SUPERCOOLED_LN_PRESSURE: { ...supercooled, terms: 8, of: fromCold(lnLiquid) },
-    VAPORIZATION_HEAT: { ...middle, terms: 8, of: heat },
-    VAPORIZATION_SLOPE: { ...middle, terms: 10, of: slope },
-    VAPORIZATION_LN_PRESSURE: { ...middle, terms: 8, of: lnLiquid },
-    CRITICAL_HEAT: { ...critical, terms: 9, of: fromCritical(heat) },
-    CRITICAL_SLOPE: { ...critical, terms: 10, of: fromCritical(slope) },
-    CRITICAL_LN_PRESSURE: { ...critical, terms: 7, of: fromCritical(lnLiquid) },
+    SUPERCOOLED_HEAT: { ...supercooled, terms: 11, of: fromCold(heat) },
+    SUPERCOOLED_SLOPE: { ...supercooled, terms: 12, of: fromCold(slope) },
+    SUPERCOOLED_LN_PRESSURE: { ...supercooled, terms: 11, of: fromCold(lnLiquid) },
+    VAPORIZATION_HEAT: { ...middle, terms: 12, of: heat },
+    VAPORIZATION_SLOPE: { ...middle, terms: 13, of: slope },
+    VAPORIZATION_LN_PRESSURE: { ...middle, terms: 12, of: lnLiquid },
+    CRITICAL_HEAT: { ...critical, terms: 11, of: fromCritical(heat) },
+    CRITICAL_SLOPE: { ...critical, terms: 11, of: fromCritical(slope) },
+    CRITICAL_LN_PRESSURE: { ...critical, terms: 9, of: fromCritical(lnLiquid) },
     BOILING_INVERSE: {
       towardsEnd: full.BOILING_PIECES,
-      terms: 8,
+      terms: 10,
       of: (distance) => 1 / full.liquidVapourTemperature(Math.exp(lnCritical - distance / LN_PRESSURE_SCALE)),
     },
     SUPERCOOLED_INVERSE: {
@@ -83,22 +83,22 @@ function tablesOf(full) {
         lnCritical - full.pieceTowardsEnd(full.BOILING_PIECES[1])[1] / LN_PRESSURE_SCALE,
       ],
       pieces: 8,
-      terms: 9,
+      terms: 12,
       of: (lnP) => 1 / full.liquidVapourTemperature(Math.exp(lnP)),
     },
-    SUBLIMATION_HEAT: { ...sublimation, terms: 7, of: (t) => m * full.sublimationHeat(t) },
-    SUBLIMATION_SLOPE: { ...sublimation, terms: 9, of: (t) => m * full.sublimationSlope(t) },
-    SUBLIMATION_LN_PRESSURE: { ...sublimation, terms: 9, of: lnIce },
+    SUBLIMATION_HEAT: { ...sublimation, terms: 9, of: (t) => m * full.sublimationHeat(t) },
+    SUBLIMATION_SLOPE: { ...sublimation, terms: 11, of: (t) => m * full.sublimationSlope(t) },
+    SUBLIMATION_LN_PRESSURE: { ...sublimation, terms: 12, of: lnIce },
     FROST_INVERSE: {
       range: [lnIce(full.COLDEST_VAPOUR_K), lnIce(full.TRIPLE_K)],
       pieces: 6,
-      terms: 9,
+      terms: 12,
       of: (lnP) => 1 / full.sublimationTemperature(Math.exp(lnP)),
     },
     MELTING_HEAT: { ...melting, of: (t) => m * full.meltingHeat(t) },
     MELTING_SLOPE: { ...melting, of: (t) => m * full.meltingSlope(t) },
-    FUSION_HEAT: { ...supercooled, terms: 8, of: fromCold((t) => m * (liquid.enthalpy(t) - ice(t).enthalpy)) },
-    FUSION_SLOPE: { ...supercooled, terms: 10, of: fromCold((t) => m * (liquid.heatCapacity(t) - ice(t).cp)) },
+    FUSION_HEAT: { ...supercooled, terms: 11, of: fromCold((t) => m * (liquid.enthalpy(t) - ice(t).enthalpy)) },
+    FUSION_SLOPE: { ...supercooled, terms: 12, of: fromCold((t) => m * (liquid.heatCapacity(t) - ice(t).cp)) },
   };
 }
 
