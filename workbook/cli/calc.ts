@@ -1,6 +1,6 @@
 import { readFile } from 'node:fs/promises';
 import type { Book } from '../book';
-import { openEngine } from '../engine/openEngine';
+import { openEngine, type Engine } from '../engine/openEngine';
 import { readXlsx } from '../file/readXlsx';
 import { CALC_HELP } from './help';
 import type { Io } from './io';
@@ -37,7 +37,7 @@ export async function calc(args: readonly string[], io: Io): Promise<Exit> {
 
   const book = values.book === undefined ? undefined : await readBook(values.book);
   const engine = await openEngine({ bundlePath: io.bundlePath });
-  if (values.units !== undefined) readUnits(() => engine.readSettings(values.units ?? ''));
+  if (values.units !== undefined) checkUnits(engine, values.units);
   const results = await engine.evaluate(formulas, {
     ...(book === undefined ? {} : { book }),
     ...(values.units === undefined ? {} : { unitsText: values.units }),
@@ -47,12 +47,12 @@ export async function calc(args: readonly string[], io: Io): Promise<Exit> {
   return results.some(hasError) ? EXIT.formulaError : EXIT.fine;
 }
 
-/** Runs what reads the text of `--units`; what can't be read is a slip of the caller. */
-export function readUnits<T>(read: () => T): T {
+/** What can't be read is a slip of the caller. */
+function checkUnits(engine: Engine, units: string): void {
   try {
-    return read();
+    engine.readSettings(units);
   } catch (thrown) {
-    throw new Usage(`--units: ${wordsOf(thrown)}`);
+    throw new Usage(`--units: ${wordsOf(thrown)}`, HELP);
   }
 }
 

@@ -29,12 +29,11 @@ Put formulas in single quotes, so that the shell leaves them alone:
 Exit: 0 all evaluated, 1 a formula gave an error, 2 called wrongly, 3 a defect of this program.
 `;
 
-export const NEW_HELP = `latentry new -o FILE.xlsx [--units TEXT] [--force]
+export const NEW_HELP = `latentry new -o FILE.xlsx [--force]
 
 Writes the standard workbook with all its formulas calculated: Cover, Units, Latent heat, ΔCp fit, Checks.
 
   -o, --output FILE.xlsx   where to write it
-  --units TEXT             what its Units sheet starts with, as "temperature=K; heat=kJ/mol"
   --force                  write over a file that is there
 
 Exit: 0 written, 1 written but a formula in it gave an error, 2 called wrongly or the file could not be written.

@@ -2,7 +2,6 @@ import { writeFile } from 'node:fs/promises';
 import { openEngine } from '../engine/openEngine';
 import { writeXlsx } from '../file/writeXlsx';
 import { standardBook } from '../standard/standardBook';
-import { readUnits } from './calc';
 import { NEW_HELP } from './help';
 import type { Io } from './io';
 import { readOptions } from './readOptions';
@@ -11,13 +10,15 @@ import { wordsOf } from './wordsOf';
 
 const HELP = 'latentry new --help';
 
+/** So many cells with an error are named. */
+const SHOWN = 5;
+
 /** `latentry new`: writes the standard workbook, calculated. */
 export async function newBook(args: readonly string[], io: Io): Promise<Exit> {
   const { values, positionals } = readOptions(
     args,
     {
       output: { type: 'string', short: 'o' },
-      units: { type: 'string' },
       force: { type: 'boolean' },
       help: { type: 'boolean', short: 'h' },
     },
@@ -34,9 +35,7 @@ export async function newBook(args: readonly string[], io: Io): Promise<Exit> {
   if (!/\.xlsx$/i.test(file)) throw new Usage(`new: the file is to end in .xlsx; received ${file}`, HELP);
 
   const engine = await openEngine({ bundlePath: io.bundlePath });
-  const { units } = values;
-  const settings = units === undefined ? {} : { settings: readUnits(() => engine.readSettings(units)) };
-  const book = await engine.calculate(standardBook({ ...settings, revisionDate: today() }));
+  const book = await engine.calculate(standardBook({ revisionDate: today() }));
   try {
     await writeFile(file, writeXlsx(book), { flag: values.force === true ? 'w' : 'wx' });
   } catch (thrown) {
@@ -49,7 +48,8 @@ export async function newBook(args: readonly string[], io: Io): Promise<Exit> {
   );
   io.out(`wrote ${file}\n`);
   if (failed.length === 0) return EXIT.fine;
-  io.err(`latentry: errors in ${failed.join(', ')}\n`);
+  const more = failed.length > SHOWN ? `, and ${failed.length - SHOWN} more` : '';
+  io.err(`latentry: errors in ${failed.slice(0, SHOWN).join(', ')}${more}\n`);
   return EXIT.formulaError;
 }
 

@@ -193,7 +193,7 @@ describe('help and version', { timeout: 60_000 }, () => {
     [['--help'], 'latentry COMMAND --help'],
     [['-h'], 'latentry COMMAND --help'],
     [['calc', '--help'], 'latentry calc FORMULA... [--units TEXT] [--book FILE.xlsx] [--json]'],
-    [['new', '--help'], 'latentry new -o FILE.xlsx [--units TEXT] [--force]'],
+    [['new', '--help'], 'latentry new -o FILE.xlsx [--force]'],
   ] as const)('latentry %j', async (args, words) => {
     const { exit, out, err } = await latentry(args);
     expect([exit, err]).toEqual([0, '']);
