@@ -1,16 +1,11 @@
-import { existsSync, readFileSync, readdirSync } from 'node:fs';
+import { readFileSync, readdirSync } from 'node:fs';
 import { mkdtemp, rm } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { build } from 'esbuild';
-import { chromium, type Browser, type BrowserContextOptions, type Page } from 'playwright-core';
+import type { Browser, BrowserContextOptions, Page } from 'playwright-core';
+import { launchChromium } from './support/launchChromium';
 
-const CANDIDATES = [
-  '/usr/bin/chromium',
-  '/usr/bin/chromium-browser',
-  '/usr/bin/google-chrome',
-  '/usr/bin/microsoft-edge',
-];
 const ORIGIN = 'http://pane.test';
 
 const html = `<!doctype html><html lang="en"><head><meta charset="utf-8"><title>Pane</title>
@@ -40,11 +35,7 @@ export async function openPaneBrowser(): Promise<PaneBrowser> {
     logLevel: 'error',
   });
   const files = new Map(readdirSync(folder).map((name) => [`/${name}`, readFileSync(path.join(folder, name), 'utf8')]));
-  const executablePath = process.env['CHROME_PATH'] ?? CANDIDATES.find(existsSync);
-  const browser = await chromium.launch({
-    ...(executablePath === undefined ? {} : { executablePath }),
-    args: ['--no-sandbox', '--disable-gpu', '--disable-background-networking', '--no-first-run'],
-  });
+  const browser = await launchChromium();
   const foreign: string[] = [];
   return {
     foreign,

@@ -38,14 +38,14 @@ const host: MemoryHost = memoryHost({ evaluate: (formula, at) => evaluate(formul
 /** The real functions behind the formulas that the pane writes: ranges, the Units name, texts, numbers, left-out arguments. */
 function evaluate(formula: string, at: Ref): Cell | Cell[][] {
   const [, name = '', inner = ''] = /^=LATENTRY\.(\w+)\((.*)\)$/.exec(formula) ?? [];
-  const args = (inner.match(/("[^"]*"|[^,"]*)(,|$)/g) ?? []).map((part) => argument(part.replace(/,$/, ''), at));
   try {
+    const args = (inner.match(/("[^"]*"|[^,"]*)(,|$)/g) ?? []).map((part) => argument(part.replace(/,$/, ''), at));
     if (name === 'FITDELTACP')
       return fitDeltaCp(args[0] ?? [], args[1] ?? [], args[2], args[3], rest(args, 4)) as Cell[][];
     if (name === 'FITLATENT') return fitLatent(args[0] ?? [], args[1] ?? [], rest(args, 2)) as Cell[][];
     if (name === 'LATENT') return latent(args[0] ?? [], args[1] ?? [], args[2], rest(args, 3)) as Cell[][];
   } catch (error) {
-    if (error instanceof CellError) return { error: '#VALUE!', message: error.message };
+    if (error instanceof CellError) return { error: error.code as '#VALUE!', message: error.message };
     throw error;
   }
   return { error: '#NAME?' };
@@ -60,9 +60,10 @@ function argument(text: string, at: Ref): Grid | undefined {
   if (text === '') return undefined;
   if (text.startsWith('"')) return [[text.slice(1, -1)]];
   if (/^-?[\d.]+$/.test(text)) return [[Number(text)]];
-  const named = host.book.names.get(text.toLowerCase())?.ref;
-  const ref = named === undefined || named === 'broken' ? parseReference(text) : named;
-  return host.book.values(ref ?? { sheet: at.sheet, address: parseArea(text) === null ? 'A1' : text });
+  const own = parseArea(text) === null ? undefined : { sheet: at.sheet, address: text };
+  const ref = own ?? parseReference(text) ?? host.book.names.get(text.toLowerCase())?.ref;
+  if (ref === undefined || ref === 'broken') throw new CellError('#NAME?');
+  return host.book.values(ref);
 }
 
 host.book.addSheet('Data');

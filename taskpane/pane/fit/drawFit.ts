@@ -33,7 +33,9 @@ const style = {
   maxWidth: '100%',
 };
 
+/** One picture with one name: groups inside it may not carry names of their own. */
 const image = (svg: SVGSVGElement | HTMLElement, words: string) => {
+  for (const group of svg.querySelectorAll('[aria-label]')) group.removeAttribute('aria-label');
   svg.setAttribute('role', 'img');
   svg.setAttribute('aria-label', words);
   return svg;
