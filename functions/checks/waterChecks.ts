@@ -112,6 +112,15 @@ export const waterChecks: readonly Check[] = [
   },
   {
     call: 'DELTACP',
+    args: ['water', 'vaporization', 25],
+    settings: `${KJ}; kind=isobaric; at_pressure=saturation`,
+    expected: -2.26977622,
+    within: 5e-9,
+    because: LAST_DIGIT,
+    source: `${computed}: heat capacities of saturated vapour and liquid`,
+  },
+  {
+    call: 'DELTACP',
     args: ['water', 'vaporization', 298.15],
     settings: 'temperature=K; heat_capacity=J/(mol K); kind=standard',
     expected: -41.74025,

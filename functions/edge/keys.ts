@@ -50,6 +50,11 @@ export function kindOption(settings: Settings, fallback: LatentKind): LatentKind
   return wordOption(settings, 'kind', KINDS, fallback);
 }
 
+/** `at_pressure=saturation`: the isobaric kind at the pressure of the two-phase line. */
+export function onSaturation(settings: Settings, kind: LatentKind): boolean {
+  return kind === 'isobaric' && settings.options['at_pressure']?.trim().toLowerCase() === 'saturation';
+}
+
 /** `at_pressure=`, in Pa; it belongs to the isobaric kind only. */
 export function pressureOption(settings: Settings, kind: LatentKind): number | undefined {
   const text = settings.options['at_pressure'];
