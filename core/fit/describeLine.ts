@@ -2,7 +2,8 @@ import { studentTBothTails } from '../statistics/studentTBothTails';
 import { studentTQuantile } from '../statistics/studentTQuantile';
 import type { Curvature, Interval, LineDiagnostics, LineFit } from './fitTypes';
 import type { LeftOut } from './leftOut';
-import { firstHalf, type LineSolution } from './solveLine';
+import { firstHalf } from './lineSums';
+import type { LineSolution } from './solveLine';
 
 /** What goes into a description besides the numbers of the line. */
 export interface LineContext {
