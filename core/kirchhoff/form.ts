@@ -22,18 +22,22 @@ const powers = (name: string, list: readonly number[], timesGasConstant = false)
 });
 
 /** Forms that have a name of their own. */
-const NAMED: Readonly<Record<string, Form>> = {
-  constant: powers('constant', [0]),
-  linear: powers('a+bT', [0, 1]),
-  maierkelley: powers('a+bT+c/T^2', [0, 1, -2]),
-  shomate: {
-    name: 'shomate',
-    terms: [0, 1, 2, 3, -2].map((power) => ({ power, scale: 1000 ** -power })),
-    timesGasConstant: false,
-  },
-  nasa7: powers('nasa7', [0, 1, 2, 3, 4], true),
-  nasa9: powers('nasa9', [-2, -1, 0, 1, 2, 3, 4], true),
-};
+const CONSTANT = powers('constant', [0]);
+const NAMED: ReadonlyMap<string, Form> = new Map([
+  ['constant', CONSTANT],
+  ['linear', powers('a+bT', [0, 1])],
+  ['maierkelley', powers('a+bT+c/T^2', [0, 1, -2])],
+  [
+    'shomate',
+    {
+      name: 'shomate',
+      terms: [0, 1, 2, 3, -2].map((power) => ({ power, scale: 1000 ** -power })),
+      timesGasConstant: false,
+    },
+  ],
+  ['nasa7', powers('nasa7', [0, 1, 2, 3, 4], true)],
+  ['nasa9', powers('nasa9', [-2, -1, 0, 1, 2, 3, 4], true)],
+]);
 
 /** What a message offers; any other sum of powers of T is understood as well. */
 export const FORM_NAMES = [
@@ -69,11 +73,23 @@ const HIGHEST_POWER = 6;
  * readForm('a + b·T + c T⁻²').name // => 'a+bT+c/T^2'
  */
 export function readForm(text: string): Form {
+  const known = NAMED.get(text) ?? remembered.get(text);
+  if (known !== undefined) return known;
   const plain = plainForm(text);
-  const form = NAMED[plain.replace(/[-_]/g, '')] ?? readSum(plain);
-  if (form !== undefined) return form;
+  const form = NAMED.get(plain.replace(/[-_]/g, '')) ?? readSum(plain);
+  if (form === undefined) throw unknownForm(text, plain);
+  if (remembered.size >= MOST_REMEMBERED) remembered.clear();
+  remembered.set(text, form);
+  return form;
+}
+
+/** Spellings read before: a column of formulas repeats one. */
+const remembered = new Map<string, Form>();
+const MOST_REMEMBERED = 100;
+
+function unknownForm(text: string, plain: string): Problem {
   const near = nearest(plain, FORM_NAMES);
-  throw new Problem({
+  return new Problem({
     code: 'argument',
     argument: 'form',
     allowed: `${FORM_NAMES.join(', ')}, or another sum of powers of T`,
@@ -110,7 +126,7 @@ function readSum(plain: string): Form | undefined {
     letters.add(letter);
     list.push(power);
   }
-  if (list.length === 1 && list[0] === 0) return NAMED.constant;
+  if (list.length === 1 && list[0] === 0) return CONSTANT;
   return powers(nameOf(list), list);
 }
 

@@ -141,6 +141,7 @@ describe('forms of ΔCp', () => {
     ['a+bT+cT', 'received "a+bT+cT"'],
     ['', 'received ""'],
     ['a-bT', 'received "a-bT"'],
+    ['constructor', 'received "constructor"'],
   ])('%s is refused', (text, words) => {
     expect(message(() => readForm(text))).toContain(words);
   });
