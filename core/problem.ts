@@ -44,8 +44,8 @@ export function shortNumber(value: number): string {
 
 /** How a message writes a temperature or a pressure; the default is SI. */
 export interface QuantityWriter {
-  temperature(kelvin: number): string;
-  pressure(pascal: number): string;
+  readonly temperature: (kelvin: number) => string;
+  readonly pressure: (pascal: number) => string;
 }
 
 const siWriter: QuantityWriter = {

@@ -1,4 +1,3 @@
-/* eslint-disable @typescript-eslint/no-explicit-any -- the host's own type for a matrix of anything */
 import type { Answer, Datum } from '../core/answer';
 import { plainName, refused } from '../core/catalogue/find';
 import type { Substance } from '../core/substance';

@@ -1,4 +1,3 @@
-/* eslint-disable @typescript-eslint/no-explicit-any -- the host's own type for a matrix of anything */
 import { answer } from './edge/answer';
 import { EDITION, DATA_EDITION } from './edge/editionText';
 import type { BlockwiseSpec } from './edge/spec';

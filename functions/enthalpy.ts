@@ -1,4 +1,3 @@
-/* eslint-disable @typescript-eslint/no-explicit-any -- the host's own type for a matrix of anything */
 import { placeState } from '../core/path/placeState';
 import { fromMolar } from '../core/units/fromMolar';
 import { answer } from './edge/answer';

@@ -1,4 +1,3 @@
-/* eslint-disable @typescript-eslint/no-explicit-any -- the host's own type for a matrix of anything */
 import type { LatentKind } from '../core/answer';
 import { findSubstance, refused } from '../core/catalogue/find';
 import { convertLine } from '../core/fit/convertLine';

@@ -1,9 +1,9 @@
-/* eslint-disable @typescript-eslint/no-explicit-any -- the host's own type for a matrix of anything */
 import { findSubstance } from '../core/catalogue/find';
 import { latentFromFit } from '../core/fit/latentFromFit';
 import { readFitTable, type FitFromTable } from '../core/fit/readFitTable';
 import { Problem } from '../core/problem';
 import { between } from '../core/units/linear';
+import { parseQuantity } from '../core/units/parseQuantity';
 import { unitOf } from '../core/units/unitOf';
 import { answer } from './edge/answer';
 import type { Block } from './edge/block';
@@ -28,19 +28,28 @@ function table(fitBlock: Block, temperatures: Block, settings: Settings): Table 
   const name = settings.options['substance'] ?? fit.substance;
   const substance = name === undefined ? undefined : findSubstance(name);
   const factor = heatFactor(unitOf(fit.heatUnit, 'heat'), settings.units.heat, substance);
-  const toFit = between(settings.units.temperature, unitOf(fit.temperatureUnit, 'temperature'));
+  const unit = unitOf(fit.temperatureUnit, 'temperature');
+  const toFit = between(settings.units.temperature, unit);
+  const kelvinToFit = between(unitOf('K'), unit);
   const { header, cells } = numberColumn(temperatures);
   const pairs: Table = Array.from(cells, (cell, i) => {
     if (cell === null) return ['', ''];
-    if (typeof cell !== 'number') {
+    let at: number;
+    if (typeof cell === 'number') {
+      at = cell * toFit.scale + toFit.offset;
+    } else if (typeof cell === 'string') {
+      at =
+        parseQuantity(cell, 'temperature', settings, `temperature ${i + 1}`).si * kelvinToFit.scale +
+        kelvinToFit.offset;
+    } else {
       throw new Problem({
         code: 'argument',
-        argument: 'temperature',
-        allowed: "numbers in the workbook's unit",
-        received: `"${String(cell)}" in row ${i + 1}`,
+        argument: `temperature ${i + 1}`,
+        allowed: 'a temperature',
+        received: 'no number',
       });
     }
-    const { value, uLine } = latentFromFit(fit, cell * toFit.scale + toFit.offset);
+    const { value, uLine } = latentFromFit(fit, at);
     return [value * factor, uLine === undefined ? '' : uLine * Math.abs(factor)];
   });
   if (header !== undefined) pairs.unshift([`latent heat / ${settings.units.heat.symbol}`, 'standard uncertainty']);

@@ -1,4 +1,3 @@
-/* eslint-disable @typescript-eslint/no-explicit-any -- the host's own type for a matrix of anything */
 import type { Answer } from '../core/answer';
 import { evaluate, valueAt } from '../core/evaluate';
 import { meanOver } from '../core/meanOver';

@@ -1,4 +1,3 @@
-/* eslint-disable @typescript-eslint/no-explicit-any -- the host's own type for a matrix of anything */
 import { heatSteps as pathSteps } from '../core/path/heatSteps';
 import { Problem } from '../core/problem';
 import { fromMolar } from '../core/units/fromMolar';

@@ -36,7 +36,6 @@ export interface LatentryBundle {
 }
 
 declare global {
-  // eslint-disable-next-line no-var -- the only way to declare a global binding
   var Latentry: LatentryBundle;
 }
 

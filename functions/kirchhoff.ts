@@ -1,4 +1,3 @@
-/* eslint-disable @typescript-eslint/no-explicit-any -- the host's own type for a matrix of anything */
 import { findSubstance } from '../core/catalogue/find';
 import { readForm } from '../core/kirchhoff/form';
 import { kirchhoff as carry, type KirchhoffInput } from '../core/kirchhoff/kirchhoff';

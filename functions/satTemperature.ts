@@ -1,4 +1,3 @@
-/* eslint-disable @typescript-eslint/no-explicit-any -- the host's own type for a matrix of anything */
 import { answer } from './edge/answer';
 import { curvePlan } from './edge/curvePlan';
 import { substanceKey, surfaceOption } from './edge/keys';

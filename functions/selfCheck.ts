@@ -1,4 +1,3 @@
-/* eslint-disable @typescript-eslint/no-explicit-any -- the host's own type for a matrix of anything */
 import { formulaOf, type Check } from './checks/check';
 import { checks } from './checks/checks';
 import { answer } from './edge/answer';

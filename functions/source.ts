@@ -1,4 +1,3 @@
-/* eslint-disable @typescript-eslint/no-explicit-any -- the host's own type for a matrix of anything */
 import { plainName, refused } from '../core/catalogue/find';
 import type { Curve, Substance } from '../core/substance';
 import { shortNumber } from '../core/problem';

@@ -1,4 +1,3 @@
-/* eslint-disable @typescript-eslint/no-explicit-any -- the host's own type for a matrix of anything */
 import { findSubstance } from '../core/catalogue/find';
 import { convert } from '../core/units/convert';
 import { unitOf } from '../core/units/unitOf';

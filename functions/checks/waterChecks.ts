@@ -31,7 +31,7 @@ export const waterChecks: readonly Check[] = [
   latent('vaporization', 50, 2381.947127, 5e-7, computed),
   latent('vaporization', 100, 2256.403722, 5e-7, computed),
   latent('vaporization', 250, 1715.165614, 5e-7, computed),
-  latent('vaporization', 350, 892.7468042, 5e-8, computed, `${LAST_DIGIT}`),
+  latent('vaporization', 350, 892.7468042, 5e-8, computed, LAST_DIGIT),
   {
     call: 'LATENT',
     args: ['water', 'vaporization', 300],

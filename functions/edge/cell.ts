@@ -30,7 +30,7 @@ export function peel(raw: unknown): Cell {
     case 'boolean':
       return raw;
     case 'object':
-      return raw === null ? null : peelObject(raw as RichValue);
+      return raw === null ? null : peelObject(raw);
     default:
       return null;
   }

@@ -86,7 +86,7 @@ export function withSlopeUnit(table: Table, slopeFactor: number): Table {
     [FIT_ROWS.bend]: [1, 2],
   };
   return table.map((row) => {
-    const scaled = columns[String(row[0])];
+    const scaled = columns[typeof row[0] === 'string' ? row[0] : ''];
     return scaled === undefined
       ? row
       : row.map((cell, c) => (typeof cell === 'number' && scaled.includes(c) ? cell * slopeFactor : cell));

@@ -18,7 +18,7 @@ export function receive(raw: readonly unknown[]): Received {
   for (let i = raw.length - 1; i >= 0; i--) {
     const value = raw[i];
     if (typeof value === 'object' && value !== null && !Array.isArray(value) && !isCell(value)) {
-      return { args: raw.slice(0, i), invocation: value as Invocation };
+      return { args: raw.slice(0, i), invocation: value };
     }
   }
   return { args: raw, invocation: {} };

@@ -44,11 +44,15 @@ async function call(id: string, ...args: unknown[]): Promise<Outcome> {
       }
       const platform = (globalThis as unknown as { CustomFunctions: Platform }).CustomFunctions;
       const plain = (value: unknown): unknown =>
-        value instanceof platform.Error ? { code: value.code, message: value.message } : Array.isArray(value) ? value.map(plain) : value;
+        value instanceof platform.Error
+          ? { code: value.code, message: value.message }
+          : Array.isArray(value)
+            ? value.map(plain)
+            : value;
       try {
-        const fn = platform._association.mappings[name as string];
-        if (fn === undefined) throw new Error(`${String(name)} is not associated`);
-        return { value: plain(await fn(...(values as unknown[]))) };
+        const fn = platform._association.mappings[name];
+        if (fn === undefined) throw new Error(`${name} is not associated`);
+        return { value: plain(await fn(...values)) };
       } catch (thrown) {
         const error = thrown as { code: string; message: string };
         return { error: { code: error.code, message: error.message, own: thrown instanceof platform.Error } };
@@ -64,7 +68,10 @@ const ANSWERING: Readonly<Record<string, readonly unknown[]>> = {
   DELTACP: [[['water']], [['vaporization']], [[25]]],
   EDITION: [],
   ENTHALPY: [[['water']], [[25]]],
-  FITDELTACP: [[[0], [20], [40], [60]], [[2500], [2453], [2406], [2358]]],
+  FITDELTACP: [
+    [[0], [20], [40], [60]],
+    [[2500], [2453], [2406], [2358]],
+  ],
   HEAT: [[['water']], [[-20]], [[150]]],
   HEATCAP: [[['water']], [['liquid']], [[25]]],
   HEATSTEPS: [[['water']], [[-20]], [[150]]],
@@ -81,7 +88,10 @@ const ANSWERING: Readonly<Record<string, readonly unknown[]>> = {
 describe('the built functions bundle under the platform runtime', () => {
   it('associates every id of functions.json and nothing else', async () => {
     const associated = await page.evaluate(() =>
-      Object.keys((globalThis as unknown as { CustomFunctions: { _association: { mappings: object } } }).CustomFunctions._association.mappings),
+      Object.keys(
+        (globalThis as unknown as { CustomFunctions: { _association: { mappings: object } } }).CustomFunctions
+          ._association.mappings,
+      ),
     );
     expect(associated.sort()).toEqual(list.functions.map((f) => f.id).sort());
   });
@@ -114,14 +124,18 @@ describe('the built functions bundle under the platform runtime', () => {
     for (const blank of [null, '']) {
       const { value } = await call('LATENT', [['water']], [['vaporization']], [[60], [blank]], {});
       expect((value as unknown[][])[1]?.[0]).toBe('');
-      expect((await call('LATENT', [['water']], [['vaporization']], [[blank]], {})).error?.message).toMatch(/blank cell/);
+      expect((await call('LATENT', [['water']], [['vaporization']], [[blank]], {})).error?.message).toMatch(
+        /blank cell/,
+      );
     }
     const { error } = await call('LATENT', [['water']], [['vaporization']], [[0]], {});
     expect(error).toBeUndefined(); // supercooled by 0.01 K and marked, not refused as a blank
   });
 
   it('tells a real 0 degC from a blank that came as 0', async () => {
-    await page.evaluate(() => Latentry.setBlankReader((address) => Promise.resolve(address === 'S!A1:A2' ? [[false], [true]] : [[true]])));
+    await page.evaluate(() =>
+      Latentry.setBlankReader((address) => Promise.resolve(address === 'S!A1:A2' ? [[false], [true]] : [[true]])),
+    );
     const range = await call('SATPRESSURE', [['water']], [[0], [0]], null, { parameterAddresses: [null, 'S!A1:A2'] });
     const spill = range.value as unknown[][];
     expect(spill[0]?.[0]).toBeTypeOf('number');
@@ -132,7 +146,11 @@ describe('the built functions bundle under the platform runtime', () => {
   });
 
   it('finds the invocation where an older functions.json leaves it', async () => {
-    for (const tail of [[{ functionName: 'LATENT' }], [null, { functionName: 'LATENT' }], [[], { functionName: 'LATENT' }]]) {
+    for (const tail of [
+      [{ functionName: 'LATENT' }],
+      [null, { functionName: 'LATENT' }],
+      [[], { functionName: 'LATENT' }],
+    ]) {
       const { value } = await call('LATENT', [['water']], [['vaporization']], [[60]], ...tail);
       expect(Math.abs(((value as number[][])[0]?.[0] ?? NaN) - 2357.65)).toBeLessThan(0.005); // IAPWS R6-95, last printed digit
     }
