@@ -7,7 +7,6 @@ import { openPaneBrowser, type PaneBrowser } from './paneBrowser';
 import type { PaneTest } from './paneEntry';
 
 declare global {
-  // eslint-disable-next-line no-var -- the only way to declare a global binding
   var paneTest: PaneTest;
 }
 

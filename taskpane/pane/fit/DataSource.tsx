@@ -24,7 +24,7 @@ export function DataSource({ source }: { readonly source: FitDataState }) {
         />
       </Field>
       <div className={look.row}>
-        <Button type="button" appearance="primary" onClick={() => void source.useSelection()}>
+        <Button type="button" appearance="primary" onClick={() => void source.takeSelection()}>
           Use selection
         </Button>
         <Button type="submit">Fit these cells</Button>

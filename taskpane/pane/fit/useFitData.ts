@@ -22,7 +22,7 @@ export interface FitDataState {
   readonly failure: string | undefined;
   /** True once cells of the data have changed after they were read. */
   readonly changed: boolean;
-  readonly useSelection: () => Promise<void>;
+  readonly takeSelection: () => Promise<void>;
   readonly read: () => Promise<void>;
   readonly cancel: () => void;
 }
@@ -74,7 +74,7 @@ export function useFitData(host: WorkbookHost, onData: (data: FitData) => void):
     progress,
     failure,
     changed,
-    useSelection: async () => {
+    takeSelection: async () => {
       const selected = await host.selection();
       if (selected === null) setFailure('Nothing is selected: select the columns, header row included.');
       else await readText(formatReference(selected), selected.sheet);

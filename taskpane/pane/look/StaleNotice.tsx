@@ -6,9 +6,11 @@ import type { WorkbookHost } from '../../port';
 import { Notice } from './Notice';
 import { wordsOf } from './wordsOf';
 
+const subscribe = (changed: () => void) => staleness.subscribe(changed);
+
 /** Says that the values come from another edition, and computes them anew when asked to. */
 export function StaleNotice({ host }: { readonly host: WorkbookHost }) {
-  const state = useSyncExternalStore(staleness.subscribe, staleness.current);
+  const state = useSyncExternalStore(subscribe, staleness.current);
   const [failure, setFailure] = useState<string>();
   if (state.state === 'fresh') return null;
   return (

@@ -4,9 +4,12 @@ import { settingsStore, type StoreState } from '../../../functions/settings/stor
 import { UNITS_NAME } from '../../boot/readSnapshot';
 import type { Block, WorkbookHost } from '../../port';
 
+const subscribe = (changed: () => void) => settingsStore.subscribe(changed);
+const current = () => settingsStore.current();
+
 /** What the settings store knows, followed. */
 export function useStore(): StoreState {
-  return useSyncExternalStore(settingsStore.subscribe, settingsStore.current);
+  return useSyncExternalStore(subscribe, current);
 }
 
 /** The settings in force where there are any; the defaults where a workbook has none; undefined where they can't be read. */
@@ -19,12 +22,12 @@ export function settingsOf(state: StoreState): Settings | undefined {
 export function useUnitsBlock(host: WorkbookHost, state: StoreState, turn: number): Block | null {
   const [block, setBlock] = useState<Block | null>(null);
   useEffect(() => {
-    let current = true;
+    let wanted = true;
     void readUnitsBlock(host).then((read) => {
-      if (current) setBlock(read);
+      if (wanted) setBlock(read);
     });
     return () => {
-      current = false;
+      wanted = false;
     };
   }, [host, state, turn]);
   return block;
