@@ -5,6 +5,7 @@ import MetadataPlugin from 'custom-functions-metadata-plugin';
 import { EsbuildPlugin } from 'esbuild-loader';
 import webpack from 'webpack';
 import { FunctionListPlugin, functionFiles } from './functions/build/functionListPlugin.mjs';
+import { NoticePlugin } from './workbook/run/noticePlugin.mjs';
 import { version } from './workbook/run/version.mjs';
 
 const root = path.dirname(fileURLToPath(import.meta.url));
@@ -38,7 +39,8 @@ const bundle = {
   name: 'bundle',
   target: ['web', 'es2020'],
   entry: {
-    'host-shim': { import: './workbook/page/shim.ts', runtime: 'host-shim-runtime' },
+    // Without a chunk-loading runtime of its own: a second one in the page would run every chunk twice.
+    'host-shim': { import: './workbook/page/shim.ts', runtime: false },
     functions: './functions/index.ts',
     taskpane: { import: './taskpane/main.ts', dependOn: 'functions' },
     page: { import: './workbook/page/main.ts', dependOn: 'functions' },
@@ -49,13 +51,14 @@ const bundle = {
     chunkFilename: 'chunk-[name]-[contenthash:8].js',
     globalObject: 'globalThis',
     publicPath: '',
-    clean: { keep: /^(latentry\.cjs|lib\/|office\/|\.stamp|addin\/)/ },
+    clean: { keep: /^(latentry|lib\/|office\/|\.stamp|addin\/)/ },
   },
   optimization: { minimizer: minimizer('es2020') },
   plugins: [
     ...shared.plugins,
     new MetadataPlugin({ output: 'functions.json', input: functionFiles }),
     new FunctionListPlugin(),
+    new NoticePlugin('THIRD-PARTY-NOTICES.txt'),
     new CopyPlugin({
       patterns: [
         { from: 'workbook/page/index.html', to: 'index.html', noErrorOnMissing: true },
@@ -77,6 +80,7 @@ const command = {
   optimization: { minimizer: minimizer('node20') },
   plugins: [
     ...shared.plugins,
+    new NoticePlugin('latentry-THIRD-PARTY-NOTICES.txt'),
     new webpack.BannerPlugin({ banner: '#!/usr/bin/env node', raw: true, entryOnly: true }),
     new webpack.optimize.LimitChunkCountPlugin({ maxChunks: 1 }),
   ],

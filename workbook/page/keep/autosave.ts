@@ -3,6 +3,9 @@ import type { Grid } from '../grid/openGrid';
 
 const SOON_MS = 500;
 
+/** Mutations that follow from others, or from opening a workbook. */
+const AUTOMATIC = /auto-height|formula\.mutation\.(?!set-defined-name|remove-defined-name)/;
+
 export interface Saving {
   /** True where the last changes wait to be saved. */
   pending(): boolean;
@@ -21,7 +24,7 @@ export function autosave(grid: Grid, changed: (byPerson: boolean) => void, save:
   grid.injector.get(ICommandService).onCommandExecuted((command, options) => {
     const params = command.params as { unitId?: string } | undefined;
     if (command.type !== CommandType.MUTATION || params?.unitId !== grid.workbook().getId()) return;
-    changed(options?.fromFormula !== true && options?.onlyLocal !== true);
+    changed(!AUTOMATIC.test(command.id) && !options?.fromFormula && !options?.onlyLocal);
     clearTimeout(timer);
     timer = setTimeout(flush, SOON_MS);
   });
