@@ -118,7 +118,7 @@ describe('the section Units', () => {
     await button('Create the Units sheet').click();
     await button('Apply').waitFor();
     await type('B5', [['kPaa?']], 'Units');
-    await alert().filter({ hasText: 'holds “kPaa?”' }).waitFor();
+    await alert().filter({ hasText: 'Units!B5 holds “kPaa?”' }).waitFor();
     await button('Write kPa in Units!B5').click();
     await expect.poll(async () => (await values('B5', 'Units'))[0]?.[0]).toBe('kPa');
     await expect.poll(() => page.evaluate(() => paneTest.store.current().state)).toBe('ready');

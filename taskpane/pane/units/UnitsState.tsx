@@ -30,8 +30,9 @@ export function UnitsState({ state, block, onRepairValue, onRepairAll }: UnitsSt
       return (
         <Notice tone="error">
           <span>
-            {state.cell} holds “{state.text}”, which can’t be read. Until it is repaired, formulas answer #VALUE!
-            instead of guessing. {state.message}
+            {block === null ? state.cell : formatReference({ sheet: block.ref.sheet, address: state.cell })} holds “
+            {state.text}”, which can’t be read. Until it is repaired, formulas answer #VALUE! instead of guessing.
+            Allowed: {state.message}.
           </span>
           {block !== null && <Repair block={block} onRepairValue={onRepairValue} onRepairAll={onRepairAll} />}
         </Notice>
