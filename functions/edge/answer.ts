@@ -7,8 +7,9 @@ import { needsBlankCheck, withBlanks } from './blanks';
 import { CellFault } from './cell';
 import { errorOf, faultOf } from './cellError';
 import { runCellwise } from './cellwise';
+import { hotCall } from './hotCall';
 import { receive, type Invocation } from './invocation';
-import type { Element, Spec } from './spec';
+import type { CellwiseSpec, Element, Spec } from './spec';
 
 /** How long a formula waits for the workbook's settings to be read. */
 const LONGEST_WAIT_MS = 30_000;
@@ -26,11 +27,32 @@ export function answer(spec: Spec, raw: readonly unknown[]): any {
   const { args, invocation } = receive(raw);
   const { positional, parts } = takeSettings(spec, args);
   const state = settingsStore.current();
+  const quick = spec.family === 'cellwise' ? quickly(spec, positional, parts, state) : undefined;
+  if (quick !== undefined) return quick;
   const blocks = spec.args.map((arg, i) => blockAt(arg.name, arg.optional === true, positional[i], i, invocation));
   const waits = state.state === 'unread' && !parts.some(isWholeBlock);
   const unsure = blocks.some((block) => block !== undefined && needsBlankCheck(block.cells, block.address));
   if (!waits && !unsure) return finish(spec, blocks, parts, state);
   return later(spec, blocks, parts, waits);
+}
+
+/** `hotCall` under the settings in force, where these can be had without waiting and without a problem. */
+function quickly(
+  spec: CellwiseSpec,
+  positional: readonly unknown[],
+  parts: readonly unknown[],
+  state: StoreState,
+): unknown[][] | undefined {
+  if (state.state !== 'ready' && state.state !== 'absent') return undefined;
+  const base = state.state === 'ready' ? state.settings : DEFAULT_SETTINGS;
+  if (parts.length === 0) return hotCall(spec, positional, base);
+  try {
+    const under = parts.some(isWholeBlock) ? DEFAULT_SETTINGS : base;
+    return hotCall(spec, positional, settingsFor(parts, under, optionsOf(spec)));
+  } catch (thrown) {
+    if (thrown instanceof Problem) return undefined;
+    throw thrown;
+  }
 }
 
 async function later(
@@ -173,22 +195,20 @@ function blockAt(
   return skipped ? undefined : block;
 }
 
-/** Blanks become "", faults the host's errors; a single fault is thrown; no NaN or Infinity leaves. */
-function sealed(table: readonly (readonly Element[])[]): unknown[][] {
+/** Faults become the host's errors in their place; a single fault is thrown; no NaN or Infinity leaves. */
+function sealed(table: Element[][]): unknown[][] {
   const single = table.length === 1 && table[0]?.length === 1;
-  const out: unknown[][] = new Array<unknown[]>(table.length);
-  for (let r = 0; r < table.length; r++) {
-    const from = table[r] as readonly Element[];
-    const to: unknown[] = new Array<unknown>(from.length);
-    for (let c = 0; c < from.length; c++) {
-      const element = from[c] as Element;
-      if (typeof element === 'number') to[c] = element - element === 0 ? element : faultless(single);
-      else if (element instanceof CellFault) to[c] = single ? thrown(element) : errorOf(element);
-      else to[c] = element;
+  for (const row of table as unknown[][]) {
+    for (let c = 0; c < row.length; c++) {
+      const element = row[c] as Element;
+      if (typeof element === 'number') {
+        if (element - element !== 0) row[c] = faultless(single);
+      } else if (element instanceof CellFault) {
+        row[c] = single ? thrown(element) : errorOf(element);
+      }
     }
-    out[r] = to;
   }
-  return out;
+  return table;
 }
 
 function thrown(fault: CellFault): never {

@@ -5,6 +5,7 @@ import type { Settings } from '../settings/settings';
 import { isScalar, type Block } from './block';
 import { CellFault, peel, shown, type Cell } from './cell';
 import { faultOf } from './cellError';
+import { scaleOf } from './lastPlan';
 import type { ArgSpec, Key } from './spec';
 import { unitFor } from './unitFor';
 
@@ -30,8 +31,9 @@ export class ArgReader {
     this.wideColumns = block !== undefined && block.columns > 1;
     this.unit =
       arg.kind === 'key' || arg.kind === 'block' || arg.kind === 'number' ? undefined : unitFor(arg.kind, settings);
-    this.factor = this.unit?.factor ?? 1;
-    this.offset = (this.unit?.offset ?? 0) + (this.unit?.gauge === true ? settings.barometerPa : 0);
+    const scale = scaleOf(arg.kind, settings);
+    this.factor = scale.factor;
+    this.offset = scale.offset;
     if (block === undefined && arg.optional !== true) {
       throw new Problem({
         code: 'argument',

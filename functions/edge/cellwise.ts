@@ -5,6 +5,7 @@ import { CellFault } from './cell';
 import { faultOf } from './cellError';
 import { commonShape } from './broadcast';
 import { answerPart, showPart, statusOf, type AnswerPart } from './evidence';
+import { planFor } from './lastPlan';
 import type { CellwiseSpec, Element, Key, Plan } from './spec';
 
 /** Computes every element of the common shape of the arguments by itself. */
@@ -18,7 +19,7 @@ export function runCellwise(
   const readers = spec.args.map((arg, i) => new ArgReader(arg, blocks[i], settings));
   const keyed = readers.filter((r) => r.isKey);
   const quantities = readers.filter((r) => !r.isKey);
-  const plans = planFinder(spec, settings);
+  const plans: PlanFinder = (keys) => planFor(spec, keys, settings);
   const only = quantities.find((r) => r.varies);
   if (part === 'value' && keyed.every((r) => !r.varies) && quantities.every((r) => r === only || !r.varies)) {
     return runColumn(shape, keyed, quantities, only, plans, settings);
@@ -34,25 +35,7 @@ export function runCellwise(
 
 type PlanFinder = (keys: readonly Key[]) => Plan;
 
-/** The plan of the last keys is kept with the function: most calls repeat it. */
-const lastPlan = new WeakMap<CellwiseSpec, { keys: readonly Key[]; settings: Settings; plan: Plan }>();
-
-function planFinder(spec: CellwiseSpec, settings: Settings): PlanFinder {
-  return (keys) => {
-    const last = lastPlan.get(spec);
-    if (last !== undefined && last.settings === settings && sameKeys(last.keys, keys)) return last.plan;
-    const plan = spec.plan(keys, settings);
-    lastPlan.set(spec, { keys: [...keys], settings, plan });
-    return plan;
-  };
-}
-
-function sameKeys(a: readonly Key[], b: readonly Key[]): boolean {
-  for (let i = 0; i < b.length; i++) if (a[i] !== b[i]) return false;
-  return true;
-}
-
-/** The hot path: one plan, at most one argument that varies, nothing allocated per element. */
+/** One plan, at most one argument that varies: nothing is allocated per element but its row. */
 function runColumn(
   shape: { rows: number; columns: number },
   keyed: readonly ArgReader[],
@@ -76,31 +59,28 @@ function runColumn(
     fixed[i] = value;
   }
   const [f0 = NaN, f1 = NaN, f2 = NaN, f3 = NaN] = fixed;
+  const { compute } = plan;
+  const at: (x: number) => number | string =
+    slot === 0
+      ? (x) => compute(x, f1, f2, f3)
+      : slot === 1
+        ? (x) => compute(f0, x, f2, f3)
+        : slot === 2
+          ? (x) => compute(f0, f1, x, f3)
+          : (x) => compute(f0, f1, f2, x);
+  const element = (r: number, c: number): Element => {
+    const x = only === undefined ? f0 : only.quantity(r, c);
+    if (typeof x !== 'number') return x;
+    try {
+      return at(x);
+    } catch (thrown) {
+      return faultOf(thrown, settings);
+    }
+  };
   const rows: Element[][] = new Array<Element[]>(shape.rows);
   for (let r = 0; r < shape.rows; r++) {
-    const row: Element[] = new Array<Element>(shape.columns);
-    for (let c = 0; c < shape.columns; c++) {
-      const x = only === undefined ? NaN : only.quantity(r, c);
-      if (typeof x !== 'number') {
-        row[c] = x;
-        continue;
-      }
-      try {
-        const value =
-          only === undefined
-            ? plan.compute(f0, f1, f2, f3)
-            : slot === 0
-              ? plan.compute(x, f1, f2, f3)
-              : slot === 1
-                ? plan.compute(f0, x, f2, f3)
-                : slot === 2
-                  ? plan.compute(f0, f1, x, f3)
-                  : plan.compute(f0, f1, f2, x);
-        row[c] = value;
-      } catch (thrown) {
-        row[c] = faultOf(thrown, settings);
-      }
-    }
+    const row = [element(r, 0)];
+    for (let c = 1; c < shape.columns; c++) row.push(element(r, c));
     rows[r] = row;
   }
   return rows;
