@@ -80,6 +80,26 @@ describe('the local page', () => {
     await expect.poll(() => readCell(page, 'Latent heat', 'C12'), { timeout: 20_000 }).toBe(before);
   });
 
+  it('draws a chart that follows its cells and outlives a reload', async () => {
+    const cells = (address: string) => ({ sheet: 'Latent heat', address });
+    await page.evaluate(
+      async ([x, y, at]) => {
+        const series = [{ label: 'latent heat', x, y, draw: 'points' as const }];
+        const spec = { title: 'Water', xLabel: 'T', yLabel: 'latent heat', series };
+        await globalThis.LatentryPage!.host.chart(spec, at);
+      },
+      [cells('A6:A19'), cells('C6:C19'), cells('B8')] as const,
+    );
+    const points = page.locator('figure.chart circle');
+    await expect.poll(() => points.count()).toBe(14);
+    await typeInto(page, 'Latent heat', 'A19', '125');
+    await page.reload();
+    await started(page);
+    await select(page, 'Latent heat', 'A1');
+    await expect.poll(() => points.count()).toBe(14);
+    await expect.poll(() => points.last().innerHTML()).toContain('latent heat: 125,');
+  });
+
   it('shows the words of an error below the formula bar, and over the cell', async () => {
     await typeInto(page, 'Latent heat', 'H40', '=LATENTRY.LATENT("water","vaporization",900)');
     await select(page, 'Latent heat', 'H40');

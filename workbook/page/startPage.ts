@@ -9,6 +9,7 @@ import { showCellLine } from './cell/showCellLine';
 import { showHoverWords } from './cell/showHoverWords';
 import { openGrid, type Grid } from './grid/openGrid';
 import { autoHeights } from './grid/autoHeights';
+import { quietLists } from './grid/quietLists';
 import { showFittedNumbers } from './grid/showFittedNumbers';
 import { showNoteMarks } from './grid/showNoteMarks';
 import { gridHost } from './gridHost';
@@ -39,6 +40,7 @@ export async function startPage(elements: PageElements, standard: () => Book): P
   showHoverWords(grid, list);
   showNoteMarks(grid);
   showFittedNumbers(grid);
+  quietLists(grid.injector);
   undoButtons(grid, elements);
 
   const pane = paneToggle(elements.buttons['pane-toggle'], elements.pane);

@@ -50,7 +50,7 @@ export function startUniver(
     header: true,
     toolbar: false,
     formulaBar: true,
-    footer: { menus: false },
+    footer: { menus: false, zoomSlider: false },
     disableAutoFocus: true,
     disableTextFormatAlert: true,
     disableTextFormatMark: true,
@@ -61,7 +61,11 @@ export function startUniver(
       initialFormulaComputing: CalculationMode.WHEN_EMPTY,
     },
   });
-  const presets = [core, UniverSheetsDrawingPreset(), UniverSheetsDataValidationPreset()];
+  const presets = [
+    core,
+    UniverSheetsDrawingPreset(),
+    UniverSheetsDataValidationPreset({ showEditOnDropdown: false, showSearchOnDropdown: false }),
+  ];
   for (const plugin of presets.flatMap((preset) => preset.plugins as readonly Registered[])) {
     if (Array.isArray(plugin)) univer.registerPlugin(plugin[0] as PluginCtor<Plugin>, plugin[1] as never);
     else univer.registerPlugin(plugin as PluginCtor<Plugin>);

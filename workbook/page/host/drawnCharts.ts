@@ -1,4 +1,5 @@
 import { ICommandService } from '@univerjs/core';
+import { SetRangeValuesMutation, SetWorksheetActiveOperation } from '@univerjs/sheets';
 import { createElement } from 'react';
 import type { ChartSpec, Ref } from '../../../taskpane/port';
 import type { Grid } from '../grid/openGrid';
@@ -46,15 +47,23 @@ export function drawnCharts(grid: Grid): { add(spec: ChartSpec, at: Ref): void }
     sheet.addFloatDomToRange(range, { componentKey: COMPONENT, data: { chart: id }, allowTransform: true }, size, id);
   };
 
+  /** The grid can only draw over the sheet that is in view: others wait until theirs is. */
+  const showActive = () => {
+    const active = grid.workbook().getActiveSheet().getSheetName();
+    for (const chart of kept()) if (chart.at.sheet === active && !frames.has(chart.id)) show(chart);
+  };
   const restore = () => {
     frames.clear();
-    for (const chart of kept()) if (grid.sheet(chart.at.sheet) !== undefined) show(chart);
+    showActive();
   };
   grid.api.getFormula().calculationResultApplied(tell);
   grid.injector.get(ICommandService).onCommandExecuted(({ id }) => {
-    if (id === 'sheet.mutation.set-range-values') tell();
+    if (id === SetRangeValuesMutation.id) tell();
+    if (id === SetWorksheetActiveOperation.id) setTimeout(showActive);
     if (id !== 'sheet.mutation.set-drawing-apply') return;
-    keep(kept().filter((chart) => grid.sheet(chart.at.sheet)?.getFloatDomById(chart.id) != null));
+    keep(
+      kept().filter((chart) => !frames.has(chart.id) || grid.sheet(chart.at.sheet)?.getFloatDomById(chart.id) != null),
+    );
   });
   grid.onOpened(restore);
   restore();
@@ -62,8 +71,9 @@ export function drawnCharts(grid: Grid): { add(spec: ChartSpec, at: Ref): void }
   return {
     add: (spec, at) => {
       const chart = { id: crypto.randomUUID(), spec, at };
-      show(chart);
       keep([...kept(), chart]);
+      grid.sheet(at.sheet)?.activate();
+      setTimeout(showActive);
     },
   };
 }
