@@ -10,8 +10,8 @@ const spec: BlockwiseSpec = {
   options: [],
   run: () => {
     const rows = checks.map(({ check, run }) => rowOf(check, run));
-    const passed = rows.filter((row) => row[5] === 'pass').length;
-    const head = ['Check', 'Value', 'Published', 'Deviation', 'Allowed', `${passed} of ${rows.length} pass`, 'Source'];
+    const passed = rows.filter((row) => row[0] === 'pass').length;
+    const head = [`${passed} of ${rows.length} pass`, 'Value', 'Published', 'Deviation', 'Allowed', 'Check', 'Source'];
     return [head, ...rows];
   },
 };
@@ -22,22 +22,15 @@ function rowOf(check: Check, run: () => number): Table[number] {
     const value = run();
     const deviation = value - check.expected;
     const result = Math.abs(deviation) <= check.within ? 'pass' : 'FAIL';
-    return [formula, value, check.expected, deviation, check.within, result, check.source];
+    return [result, value, check.expected, deviation, check.within, formula, check.source];
   } catch (error) {
-    return [
-      formula,
-      error instanceof Error ? error.message : String(error),
-      check.expected,
-      '',
-      check.within,
-      'FAIL',
-      check.source,
-    ];
+    const words = error instanceof Error ? error.message : String(error);
+    return ['FAIL', words, check.expected, '', check.within, formula, check.source];
   }
 }
 
 /**
- * Every built-in check value against its published source: value, published figure, deviation, what it may be, result.
+ * Every built-in check value against its published source: result, value, published figure, deviation, what it may be, formula, source.
  * @customfunction SELFCHECK
  * @param invocation The call itself.
  * @returns A table with a heading row, one check a row.

@@ -18,7 +18,7 @@ export const FIT_ROWS = {
   method: 'method',
   substance: 'substance',
   kind: 'kind of latent heat and slope',
-  slope: 'heat-capacity difference',
+  slope: 'slope of latent heat',
   latent: 'latent heat at reference',
   reference: 'reference temperature',
   covariance: 'covariance of the two',
@@ -51,7 +51,7 @@ type Cell = string | number;
  * @example
  * import { fitDeltaCp, fitTable } from 'latentry';
  * const fit = fitDeltaCp([0, 10, 20, 30, 40], [2500.8, 2477.3, 2453.76, 2429.82, 2405.12]);
- * fitTable(fit, { temperatureUnit: 'degC', heatUnit: 'kJ/kg', heatCapacityUnit: 'kJ/(kg K)' })[4][0] // => 'heat-capacity difference'
+ * fitTable(fit, { temperatureUnit: 'degC', heatUnit: 'kJ/kg', heatCapacityUnit: 'kJ/(kg K)' })[4][0] // => 'slope of latent heat'
  */
 export function fitTable(fit: LineFit, labels: FitLabels): Cell[][] {
   const { temperatureUnit, heatUnit, heatCapacityUnit } = labels;
@@ -67,7 +67,7 @@ export function fitTable(fit: LineFit, labels: FitLabels): Cell[][] {
       u: fit.uSlope,
       interval: fit.slopeInterval,
       unit: heatCapacityUnit,
-      note: exact,
+      note: exact === '' ? slopeNote(labels.kind) : exact,
     }),
     row(FIT_ROWS.latent, { value: fit.latent, u: fit.uLatent, interval: fit.latentInterval, unit: heatUnit }),
     row(FIT_ROWS.reference, { value: fit.reference, unit: temperatureUnit }),
@@ -123,6 +123,11 @@ function kindNote(kind: LatentKind | undefined): string {
     case undefined:
       return 'the kind of the latent heats that were fitted';
   }
+}
+
+function slopeNote(kind: LatentKind | undefined): string {
+  if (kind === undefined) return 'ΔCp where the latent heats are isobaric or standard';
+  return kind === 'coexistence' ? 'along the two-phase line: not ΔCp' : 'ΔCp';
 }
 
 /** The rows of each reason, the first few by number. */

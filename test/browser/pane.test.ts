@@ -195,7 +195,7 @@ describe('the section ΔCp fit', () => {
     );
     expect((await formulas('E25'))[0]?.[0]).toBe('=LATENTRY.FITLATENT(D2:J22,D25,Latentry_units)');
     const table = await values('D2:F22');
-    const slope = table.find(([label]) => label === 'heat-capacity difference');
+    const slope = table.find(([label]) => label === 'slope of latent heat');
     // Half a unit of the twelfth digit that R printed.
     expect(Math.abs(Number(slope?.[1]) - set.expected.slope)).toBeLessThanOrEqual(5e-12);
     const [at, latent] = (await values('D25:E25'))[0] ?? [];
@@ -254,7 +254,7 @@ describe('the section ΔCp fit', () => {
     await button('Insert live formulas').click();
     await page.getByText('Inserted from').waitFor();
     expect((await formulas('G2'))[0]?.[0]).toContain('"heat=kJ/mol; reference=30 degC; kind=coexistence"');
-    expect((await values('G6:H6'))[0]?.[0]).toBe('heat-capacity difference');
+    expect((await values('G6:H6'))[0]?.[0]).toBe('slope of latent heat');
     expect(Number((await values('H25'))[0]?.[0]).toFixed(4)).toBe('43.7667');
   });
 

@@ -37,7 +37,7 @@ export function checksSheet(): BookSheet {
   return {
     ...emptySheet('Checks'),
     cells,
-    columnWidths: { A: 104, B: 18, C: 18, D: 12, E: 12, F: 16, G: 84 },
+    columnWidths: { A: 16, B: 18, C: 18, D: 12, E: 12, F: 84, G: 84 },
     rowHeights: { '1': 34, '2': 34, [String(HEAD)]: 24 },
     merges: ['A2:G2'],
     freeze: { rows: HEAD, columns: 0 },

@@ -6,7 +6,10 @@ import type { StandardStyle } from './styles';
 const SHEETS: readonly (readonly [string, string])[] = [
   ['Units', 'The units of every answer in this workbook. Change one here, and all sheets follow.'],
   ['Latent heat', 'Water for the evaporator and ice for the freeze-dryer, by temperature.'],
-  ['ΔCp fit', 'A line through published latent heats: its slope is ΔCp. Carries a latent heat to another temperature.'],
+  [
+    'ΔCp fit',
+    'A line through published latent heats: its slope, with its kind said. Carries a latent heat to another temperature.',
+  ],
   ['Checks', 'Each function against a published figure. Look here first when an answer surprises.'],
 ];
 

@@ -42,7 +42,7 @@ export function deltaCpSheet(): BookSheet {
   put(
     cells,
     'A2',
-    'The slope of latent heat against temperature is ΔCp. Put your own data into the two warm columns: a unit in a heading wins over the sheet Units.',
+    'The slope of latent heats at one pressure, or of standard ones, is ΔCp; along the saturation line, as here, it holds a part of the line too. Put your own data into the two warm columns: a unit in a heading wins over the sheet Units.',
     'subtitle',
   );
   put(
@@ -116,7 +116,7 @@ function putKirchhoff(cells: Record<string, BookCell>, head: number): void {
     'From, K',
     'Latent heat there, kJ/kg',
     'To, K',
-    'ΔCp of the line, kJ/(kg K)',
+    'Slope of the line, kJ/(kg K)',
     'Latent heat there, kJ/kg',
   ];
   [...heads, 'IAPWS-95 there, kJ/kg'].forEach((words, i) =>
@@ -135,7 +135,7 @@ function putKirchhoff(cells: Record<string, BookCell>, head: number): void {
   put(
     cells,
     `A${row + 1}`,
-    'The line’s slope is the mean ΔCp along the saturation line between 0 and 100 °C. ΔCp is no constant: over a wider range the points leave the line in a bend.',
+    'The slope is the mean along the saturation line between 0 and 100 °C, and not the difference of the heat capacities (−2.27 kJ/(kg K) at 25 °C, IAPWS R6-95). It is no constant: over a wider range the points leave the line in a bend.',
     'note',
   );
 }

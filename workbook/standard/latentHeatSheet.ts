@@ -31,7 +31,7 @@ const WATER: readonly Column[] = [
     format: HEAT,
   },
   {
-    words: 'Its slope along the line, ΔCp',
+    words: 'Its slope along the line',
     unit: { key: 'heat_capacity' },
     call: `DELTACP("water","vaporization",T,${UNITS_NAME})`,
     format: SLOPE,
@@ -65,7 +65,7 @@ const ICE: readonly Column[] = [
     format: HEAT,
   },
   {
-    words: 'Its slope along the line, ΔCp',
+    words: 'Its slope along the line',
     unit: { key: 'heat_capacity' },
     call: `DELTACP("water","sublimation",T,${UNITS_NAME})`,
     format: SLOPE,

@@ -209,7 +209,7 @@ describe('table of a fit', () => {
       'method',
       'substance',
       'kind of latent heat and slope',
-      'heat-capacity difference',
+      'slope of latent heat',
       'latent heat at reference',
       'reference temperature',
       'covariance of the two',
@@ -246,9 +246,9 @@ describe('table of a fit', () => {
     expect(message(() => readFitTable(moved.slice(0, 10)))).toMatch(
       /^fit: allowed the table of a fit, all its rows; received no row "/,
     );
-    const broken = table.map((row) => (row[0] === 'heat-capacity difference' ? [row[0], 'steep'] : row));
+    const broken = table.map((row) => (row[0] === 'slope of latent heat' ? [row[0], 'steep'] : row));
     expect(message(() => readFitTable(broken))).toBe(
-      'fit: allowed a number in row "heat-capacity difference"; received "steep"',
+      'fit: allowed a number in row "slope of latent heat"; received "steep"',
     );
   });
 });

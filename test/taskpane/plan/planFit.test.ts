@@ -10,7 +10,7 @@ const insert: FitInsert = {
   settings: 'reference=298.15 K; kind=coexistence',
   table: [
     ['fit', 'value', 'unit'],
-    ['heat-capacity difference', -2.4, 'kJ/(kg K)'],
+    ['slope of latent heat', -2.4, 'kJ/(kg K)'],
   ],
   example: {
     temperature: 25,
