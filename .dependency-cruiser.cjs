@@ -1,9 +1,20 @@
 /** Imports point one way: core, functions, taskpane, workbook. No cycles. */
-const only = (name, from, notTo, comment) => ({ name, comment, severity: 'error', from: { path: from }, to: { path: notTo } });
+const only = (name, from, notTo, comment) => ({
+  name,
+  comment,
+  severity: 'error',
+  from: { path: from },
+  to: { path: notTo },
+});
 
 module.exports = {
   forbidden: [
-    { name: 'no-cycles', severity: 'error', from: {}, to: { circular: true, viaOnly: { dependencyTypesNot: ['type-only'] } } },
+    {
+      name: 'no-cycles',
+      severity: 'error',
+      from: {},
+      to: { circular: true, viaOnly: { dependencyTypesNot: ['type-only'] } },
+    },
     only('core-is-first', '^core/', '^(functions|taskpane|workbook|manifest|test)/', 'core imports itself only'),
     {
       name: 'core-libraries',
@@ -14,8 +25,18 @@ module.exports = {
     },
     only('functions-second', '^functions/', '^(taskpane|workbook|manifest|test)/', 'functions import core'),
     only('taskpane-third', '^taskpane/', '^(workbook|manifest|test)/', 'taskpane imports core and functions'),
-    only('pane-through-the-store', '^taskpane/', '^functions/(?!settings/|edge/(blanks|editionText|fitUnits)\\.ts)', 'the pane sees the settings store of functions, and the seams made for hosts'),
-    only('no-tests-in-the-product', '^(core|functions|taskpane|workbook|manifest)/', '^test/', 'nothing imports a test'),
+    only(
+      'pane-through-the-store',
+      '^taskpane/',
+      '^functions/(?!settings/|edge/(blanks|editionText|fitUnits)\\.ts)',
+      'the pane sees the settings store of functions, and the seams made for hosts',
+    ),
+    only(
+      'no-tests-in-the-product',
+      '^(core|functions|taskpane|workbook|manifest)/',
+      '^test/',
+      'nothing imports a test',
+    ),
     {
       name: 'grid-behind-two-rooms',
       comment: 'the grid library stays behind the page host and the headless engine, which share one adapter',
@@ -29,6 +50,10 @@ module.exports = {
     exclude: { path: '\\.generated\\.' },
     tsPreCompilationDeps: true,
     tsConfig: { fileName: 'tsconfig.json' },
-    enhancedResolveOptions: { exportsFields: ['exports'], conditionNames: ['import', 'require', 'node', 'default', 'types'], mainFields: ['module', 'main', 'types'] },
+    enhancedResolveOptions: {
+      exportsFields: ['exports'],
+      conditionNames: ['import', 'require', 'node', 'default', 'types'],
+      mainFields: ['module', 'main', 'types'],
+    },
   },
 };

@@ -2,7 +2,8 @@
  * The port: all that the pane knows of a workbook. `hosts/excel.ts` implements it with Office.js,
  * the local page with its grid, the tests with a workbook in memory; one contract suite holds them equal.
  */
-export type CellErrorCode = '#VALUE!' | '#N/A' | '#REF!' | '#NAME?' | '#NUM!' | '#DIV/0!' | '#NULL!' | '#SPILL!' | '#CALC!' | '#BUSY!';
+export type CellErrorCode =
+  '#VALUE!' | '#N/A' | '#REF!' | '#NAME?' | '#NUM!' | '#DIV/0!' | '#NULL!' | '#SPILL!' | '#CALC!' | '#BUSY!';
 export type Cell = number | string | boolean | null | { readonly error: CellErrorCode; readonly message?: string };
 
 /** `address` is A1 style without the sheet: `B2`, `B2:D9`. */
@@ -62,7 +63,12 @@ export interface HostEvent {
 }
 
 export interface WorkbookHost {
-  readonly can: { readonly chart: boolean; readonly undoGroup: boolean; readonly startup: boolean; readonly file: boolean };
+  readonly can: {
+    readonly chart: boolean;
+    readonly undoGroup: boolean;
+    readonly startup: boolean;
+    readonly file: boolean;
+  };
   readonly locale: { readonly decimal: string; readonly list: string };
   selection(): Promise<Ref | null>;
   /** One crossing for all references. */
