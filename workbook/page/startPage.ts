@@ -49,16 +49,19 @@ export async function startPage(elements: PageElements, standard: () => Book): P
     openSettings.stop();
     settingsStore.publish({ state: 'unread' });
   });
-  const begin = async (): Promise<void> => {
+  const start = async (): Promise<void> => {
     await openSettings.start();
     pane.use(host);
     await grid.api.getFormula().onCalculationResultApplied(LONGEST_CALCULATION_MS);
     autoHeights(grid);
   };
-  grid.onOpened(() => void begin());
+  const begin = () => {
+    start().catch((error: unknown) => notice(elements.notice, `The workbook is not yet calculated: ${wordsOf(error)}`));
+  };
+  grid.onOpened(begin);
   const name = kept?.name ?? 'Standard workbook.xlsx';
   openWorkbook({ grid, elements, keeper, standard, name, changed: kept?.changed ?? false, original });
-  void begin();
+  begin();
 
   elements.loading.hidden = true;
   for (const id of ['new', 'open', 'save', 'pane-toggle'] as const) elements.buttons[id].disabled = false;

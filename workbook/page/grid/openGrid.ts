@@ -67,7 +67,10 @@ export function openGrid(
 
   const open = (book: Book): void => {
     for (const listener of leaving) listener();
-    if (workbook !== undefined) api.disposeUnit(workbook.getId());
+    if (workbook !== undefined) {
+      api.getFormula().stopCalculation();
+      api.disposeUnit(workbook.getId());
+    }
     books += 1;
     const ids = book.sheets.map((_sheet, i) => `book${books}-sheet${i}`);
     opened = book;
