@@ -33,7 +33,7 @@ const TABLE_FORMATS: Partial<Record<keyof typeof FIT_ROWS, string>> = {
 /** Published latent heats, the line through them, and Kirchhoff's law with its slope, in the units of the source. */
 export function deltaCpSheet(): BookSheet {
   const cells: Record<string, BookCell> = {};
-  const rowHeights: Record<string, number> = { '1': 34, '2': 34, '3': 34, [String(HEAD)]: 48 };
+  const rowHeights: Record<string, number> = { '1': 34, '2': 66, '3': 52, [String(HEAD)]: 48 };
   const section = (row: number, letters: string, words: string) => {
     for (const letter of letters) put(cells, `${letter}${row}`, letter === letters[0] ? words : null, 'section');
     rowHeights[String(row)] = 24;
@@ -63,9 +63,9 @@ export function deltaCpSheet(): BookSheet {
   return {
     ...emptySheet('ΔCp fit'),
     cells,
-    columnWidths: { A: 12, B: 16, C: 16, D: 16, E: 16, F: 18, G: 3, H: 32, I: 16, J: 18, K: 14, L: 14, M: 20, N: 62 },
+    columnWidths: { A: 11, B: 15, C: 14, D: 13, E: 13, F: 15, G: 2, H: 28, I: 13, J: 18, K: 14, L: 14, M: 20, N: 62 },
     rowHeights,
-    merges: ['A2:N2', 'A3:N3', `A${carry + 3}:F${carry + 3}`],
+    merges: ['A2:F2', 'A3:F3', `A${carry + 3}:F${carry + 3}`],
     gridLines: false,
     print: { landscape: true, fitWidth: true },
   };
