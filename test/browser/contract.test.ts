@@ -18,10 +18,23 @@ let page: Page;
 beforeAll(async () => {
   browser = await launchChromium();
   page = await browser.newPage();
-  await page.route('**/*', (route) => route.abort());
-  await page.goto('about:blank');
-  await page.addScriptTag({ path: runtime });
-  await page.addScriptTag({ path: path.join(dist, 'functions.js') });
+  // The platform's script insists on its own file name, so everything comes from addresses that lead to files here.
+  const files: Readonly<Record<string, string>> = {
+    '/custom-functions-runtime.js': readFileSync(runtime, 'utf8'),
+    '/o15apptofilemappingtable.js': '',
+    '/functions.js': readFileSync(path.join(dist, 'functions.js'), 'utf8'),
+  };
+  const html =
+    '<!doctype html><meta charset="utf-8"><title>host</title><script src="custom-functions-runtime.js"></script><script src="functions.js"></script>';
+  await page.route('**/*', (route) => {
+    const url = new URL(route.request().url());
+    if (url.hostname !== 'host.test') return route.abort();
+    const script = files[url.pathname];
+    return script === undefined
+      ? route.fulfill({ contentType: 'text/html', body: html })
+      : route.fulfill({ contentType: 'text/javascript', body: script });
+  });
+  await page.goto('http://host.test/');
   await page.evaluate(() => {
     Latentry.settings.publish({ state: 'absent' });
   });
