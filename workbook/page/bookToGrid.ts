@@ -107,7 +107,7 @@ function contentOf(cell: BookCell): ICellData {
 }
 
 function withoutNulls(cell: ICellData): ICellData {
-  return Object.fromEntries(Object.entries(cell).filter(([, value]) => value !== null)) as ICellData;
+  return Object.fromEntries(Object.entries(cell).filter(([, value]) => value !== null));
 }
 
 function columnData(sheet: BookSheet, count: number): Record<number, { w: number }> {

@@ -5,7 +5,6 @@ import { startPage, type RunningPage } from './startPage';
 import './page.css';
 
 declare global {
-  // eslint-disable-next-line no-var -- the only way to declare a global binding
   var LatentryPage: RunningPage | undefined;
 }
 

@@ -80,8 +80,8 @@ export async function pageHarness(page: Page): Promise<HostHarness> {
       heard.set(id, listener);
       const started = page.evaluate(
         ([name, key]) => {
-          const tell = (globalThis as unknown as { tellTest(id: number, event: object): void }).tellTest;
-          globalThis.LatentryPage!.host.on(name, (happened) => tell(key, happened));
+          const outside = globalThis as unknown as { tellTest: (id: number, event: object) => void };
+          globalThis.LatentryPage!.host.on(name, (happened) => outside.tellTest(key, happened));
         },
         [event, id] as const,
       );

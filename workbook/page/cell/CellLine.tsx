@@ -2,8 +2,8 @@ import { useSyncExternalStore } from 'react';
 import type { CellInfo } from './cellInfo';
 
 export interface CellLineStore {
-  current(): CellInfo;
-  subscribe(changed: () => void): () => void;
+  readonly current: () => CellInfo;
+  readonly subscribe: (changed: () => void) => () => void;
 }
 
 /** One line below the formula bar about the active cell; errors and notes are read out. */

@@ -67,5 +67,5 @@ export function bookStyle(data: IStyleData): BookStyle {
     valign: nameOf(down, data.vt),
     wrap: data.tb === WrapStrategy.WRAP || undefined,
   };
-  return Object.fromEntries(Object.entries(found).filter(([, value]) => value !== undefined)) as BookStyle;
+  return Object.fromEntries(Object.entries(found).filter(([, value]) => value !== undefined));
 }

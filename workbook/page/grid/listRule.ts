@@ -28,7 +28,8 @@ function choices({ values, source }: BookList): string {
 
 /** The choices of a rule, one entry for each of its ranges; undefined for rules of other kinds. */
 export function bookLists(rule: ISheetDataValidationRule, address: (range: IRange) => string): BookList[] | undefined {
-  if (rule.type !== DataValidationType.LIST) return undefined;
+  const list: string = DataValidationType.LIST;
+  if (rule.type !== list) return undefined;
   const formula = rule.formula1 ?? '';
   const prompt = rule.prompt === undefined || rule.prompt === '' ? {} : { prompt: rule.prompt };
   const what = choicesOf(formula);

@@ -102,7 +102,7 @@ export function openGrid(
     api.syncExecuteCommand(SetTriggerFormulaCalculationStartMutation.id, params, { onlyLocal: true });
   };
 
-  api.getFormula().calculationStart(messages.begin);
+  api.getFormula().calculationStart(() => messages.begin());
   open(first);
   return {
     api,

@@ -1,12 +1,4 @@
-import {
-  type Injector,
-  LocaleType,
-  LogLevel,
-  type Plugin,
-  type PluginCtor,
-  Univer,
-  mergeLocales,
-} from '@univerjs/core';
+import { type Injector, LocaleType, LogLevel, type PluginCtor, Univer, mergeLocales } from '@univerjs/core';
 import { FUniver } from '@univerjs/core/facade';
 import { CalculationMode, UniverSheetsCorePreset } from '@univerjs/preset-sheets-core';
 import coreWords from '@univerjs/preset-sheets-core/locales/en-US';
@@ -30,7 +22,7 @@ export interface Started {
   readonly injector: Injector;
 }
 
-type Registered = PluginCtor<Plugin> | readonly [PluginCtor<Plugin>, unknown];
+type Registered = PluginCtor | readonly [PluginCtor, unknown];
 
 /** Starts the grid library in an element, with the cell functions of the bundle. */
 export function startUniver(
@@ -67,8 +59,8 @@ export function startUniver(
     UniverSheetsDataValidationPreset({ showEditOnDropdown: false, showSearchOnDropdown: false }),
   ];
   for (const plugin of presets.flatMap((preset) => preset.plugins as readonly Registered[])) {
-    if (Array.isArray(plugin)) univer.registerPlugin(plugin[0] as PluginCtor<Plugin>, plugin[1] as never);
-    else univer.registerPlugin(plugin as PluginCtor<Plugin>);
+    if (Array.isArray(plugin)) univer.registerPlugin(plugin[0] as PluginCtor, plugin[1] as never);
+    else univer.registerPlugin(plugin as PluginCtor);
   }
   const injector = univer.__getInjector();
   mendEngine(injector);
