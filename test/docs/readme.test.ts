@@ -8,7 +8,7 @@ const root = path.resolve(import.meta.dirname, '../..');
 const readme = readFileSync(path.join(root, 'README.md'), 'utf8');
 
 /** Rows of the table of formulas: formula, answer as printed, unit. */
-const rows = [...readme.matchAll(/^\| `(=LATENTRY\..+)` \| (-?[\d.]+) \| (.+) \|$/gm)].map((m) => ({
+const rows = [...readme.matchAll(/^\| `(=LATENTRY\..+?)` +\| (-?[\d.]+) +\| (.+?) +\|$/gm)].map((m) => ({
   formula: m[1] ?? '',
   answer: m[2] ?? '',
 }));
