@@ -1,18 +1,7 @@
 import { answer } from './edge/answer';
-import { latentPlan } from './edge/latentPlan';
-import type { CellwiseSpec } from './edge/spec';
+import { latentSpec } from './edge/latentPlan';
 
-const spec: CellwiseSpec = {
-  family: 'cellwise',
-  name: 'DELTACP',
-  args: [
-    { name: 'substance', kind: 'key' },
-    { name: 'change', kind: 'key' },
-    { name: 'temperature', kind: 'temperature', optional: true },
-  ],
-  options: ['kind', 'at_pressure'],
-  plan: (keys, settings) => latentPlan('latentSlope', keys, settings),
-};
+const spec = latentSpec('DELTACP', 'latentSlope');
 
 /**
  * Temperature slope of the latent heat of the same kind: the heat-capacity difference for the isobaric and standard kinds.

@@ -1,18 +1,7 @@
 import { answer } from './edge/answer';
-import { latentPlan } from './edge/latentPlan';
-import type { CellwiseSpec } from './edge/spec';
+import { latentSpec } from './edge/latentPlan';
 
-const spec: CellwiseSpec = {
-  family: 'cellwise',
-  name: 'LATENT',
-  args: [
-    { name: 'substance', kind: 'key' },
-    { name: 'change', kind: 'key' },
-    { name: 'temperature', kind: 'temperature', optional: true },
-  ],
-  options: ['kind', 'at_pressure'],
-  plan: (keys, settings) => latentPlan('latent', keys, settings),
-};
+const spec = latentSpec('LATENT', 'latent');
 
 /**
  * Latent heat of a phase change at a temperature, counted as taken up by the substance.

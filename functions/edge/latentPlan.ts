@@ -5,10 +5,25 @@ import { curvePlan } from './curvePlan';
 import type { Change, Curve, Substance } from '../../core/substance';
 import { changeKey, kindOption, onSaturation, pressureOption, substanceKey } from './keys';
 import { signed } from './scale';
-import type { Key, Plan } from './spec';
+import type { CellwiseSpec, Key, Plan } from './spec';
 
-/** The plan that LATENT and DELTACP share: a curve of one kind, with the transition temperature as default. */
-export function latentPlan(quantity: 'latent' | 'latentSlope', keys: readonly Key[], settings: Settings): Plan {
+/** What LATENT and DELTACP are: one curve each, asked for in the same way. */
+export function latentSpec(name: string, quantity: 'latent' | 'latentSlope'): CellwiseSpec {
+  return {
+    family: 'cellwise',
+    name,
+    args: [
+      { name: 'substance', kind: 'key' },
+      { name: 'change', kind: 'key' },
+      { name: 'temperature', kind: 'temperature', optional: true },
+    ],
+    options: ['kind', 'at_pressure'],
+    plan: (keys, settings) => latentPlan(quantity, keys, settings),
+  };
+}
+
+/** A curve of one kind, with the transition temperature as default. */
+function latentPlan(quantity: 'latent' | 'latentSlope', keys: readonly Key[], settings: Settings): Plan {
   const substance = substanceKey(keys[0]);
   const { change, sign } = changeKey(substance, keys[1]);
   const kind = kindOption(settings, substance.defaultKind(change));

@@ -1,19 +1,8 @@
+import { DEFAULT_SETTINGS, settingsRows } from '../../functions/settings/settings';
 import { loadFunctions } from './loadFunctions';
 import { race, readable, report } from './measure';
 
-const UNITS = [
-  ['Temperature', 'degC'],
-  ['Pressure', 'kPa'],
-  ['Barometer', '101.325 kPa'],
-  ['Heat', 'kJ/kg'],
-  ['Heat capacity', 'kJ/(kg K)'],
-  ['Amount', 'kg'],
-  ['Energy', 'kJ'],
-  ['Flow', 'kg/h'],
-  ['Power', 'kW'],
-  ['Out of range', 'refuse'],
-  ['Decimal separator', '.'],
-];
+const UNITS = settingsRows(DEFAULT_SETTINGS);
 
 /** Cell functions of the built bundle: single calls, and spills that must be linear in their rows. */
 export function benchFunctions(): void {

@@ -1,5 +1,6 @@
 import path from 'node:path';
-import type { Book, BookCell, BookSheet } from '../../workbook/book';
+import type { Book, BookCell } from '../../workbook/book';
+import { emptySheet } from '../../workbook/emptySheet';
 import { openEngine } from '../../workbook/engine/openEngine';
 import { readable } from './measure';
 
@@ -12,18 +13,7 @@ function bookOf(formula: (row: number) => string): Book {
     cells[`A${row}`] = { value: 1 + (370 * row) / (CELLS + 1) };
     cells[`B${row}`] = { value: null, formula: formula(row) };
   }
-  const sheet: BookSheet = {
-    name: 'Sheet1',
-    cells,
-    columnWidths: {},
-    rowHeights: {},
-    merges: [],
-    lists: [],
-    freeze: { rows: 0, columns: 0 },
-    gridLines: true,
-    hidden: false,
-    print: { landscape: false, fitWidth: true },
-  };
+  const sheet = { ...emptySheet('Sheet1'), cells };
   return { sheets: [sheet], names: [], styles: {}, properties: {} };
 }
 

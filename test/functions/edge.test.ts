@@ -1,24 +1,12 @@
 import { beforeEach, describe, expect, it } from 'vitest';
-import { DEFAULT_SETTINGS, parseSettingsBlock } from '../../functions/settings/settings';
+import { DEFAULT_SETTINGS, parseSettingsBlock, settingsRows } from '../../functions/settings/settings';
 import { settingsStore } from '../../functions/settings/store';
 import { setBlankReader } from '../../functions/edge/blanks';
 import { latent } from '../../functions/latent';
 import { satPressure } from '../../functions/satPressure';
 import { call, cellOf, faultOf, HostError } from './host';
 
-const UNITS = [
-  ['Temperature', 'degC'],
-  ['Pressure', 'kPa'],
-  ['Barometer', '101.325 kPa'],
-  ['Heat', 'kJ/kg'],
-  ['Heat capacity', 'kJ/(kg K)'],
-  ['Amount', 'kg'],
-  ['Energy', 'kJ'],
-  ['Flow', 'kg/h'],
-  ['Power', 'kW'],
-  ['Out of range', 'refuse'],
-  ['Decimal separator', '.'],
-];
+const UNITS: string[][] = settingsRows(DEFAULT_SETTINGS);
 const withUnits = (key: string, value: string): string[][] => UNITS.map((row) => (row[0] === key ? [key, value] : row));
 
 /** h_fg at 60 degC, IAPWS R6-95(2018), to the digits the page promises. */
