@@ -14,7 +14,7 @@ const { outputFiles } = buildSync({
   platform: 'node',
   target: 'node20',
   loader: { '.css': 'empty' },
-  external: ['mathjs', 'simple-statistics', 'ml-regression-simple-linear', 'playwright-core'],
+  external: ['esbuild', 'mathjs', 'simple-statistics', 'ml-regression-simple-linear', 'playwright-core'],
   define: { 'import.meta.dirname': JSON.stringify(here) },
 });
 const run = vm.runInThisContext(`(function (require, module, exports) {${outputFiles[0].text}\n})`, {
