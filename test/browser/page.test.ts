@@ -120,6 +120,11 @@ describe('the local page', () => {
     expect(await page.title()).toMatch(/^• /);
     const table = await readCells(page, 'Latent heat', 'A6:F19');
     expect(table.values.flat().every((value) => typeof value === 'number')).toBe(true);
+    // Sooner than the page keeps changes by itself: what is still to be kept is kept while the page closes.
+    await page.evaluate(() => globalThis.LatentryPage!.grid.sheet('Cover')!.getRange('F41').setValue('hurried'));
+    await page.reload();
+    await started(page);
+    expect(await readCell(page, 'Cover', 'F41')).toBe('hurried');
   });
 
   it('saves a file that opens with the same numbers and formulas', async () => {

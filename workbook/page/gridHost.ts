@@ -62,8 +62,8 @@ export function gridHost(grid: Grid): WorkbookHost {
     state: (key, value) =>
       settle(() => {
         const name = `latentry.${key}`;
-        if (value !== undefined) grid.properties.set(name, value);
-        return grid.properties.get(name) ?? null;
+        if (value !== undefined) grid.setText(name, value);
+        return grid.text(name) ?? null;
       }),
     startup: () => Promise.resolve(false),
     on: gridEvents(grid, () => own),

@@ -29,6 +29,8 @@ export function openWorkbook(state: OpenState): void {
   const { buttons, status } = elements;
   let { name, changed, original } = state;
   let quiet = false;
+  let changes = 0;
+  let keptChanges = 0;
 
   const say = (text: string) => {
     status.textContent = text;
@@ -42,8 +44,10 @@ export function openWorkbook(state: OpenState): void {
 
   const keep = async () => {
     if (keeper === undefined) return;
+    const upTo = changes;
     const file = original === undefined ? {} : { file: original.bytes };
     await keeper.save({ name, changed, book: grid.book(), ...file });
+    keptChanges = upTo;
     say('Kept in this browser');
   };
   const keepOrSay = () => void keep().catch(failed('This browser could not keep the workbook, save it to a file'));
@@ -51,6 +55,7 @@ export function openWorkbook(state: OpenState): void {
   const saving = autosave(
     grid,
     (byPerson) => {
+      changes += 1;
       if (quiet || !byPerson || changed) return;
       changed = true;
       showName();
@@ -143,11 +148,15 @@ export function openWorkbook(state: OpenState): void {
     (file) => void open(file).catch(failed('The file was not opened')),
     failed('The file was not read'),
   );
-  window.addEventListener('pagehide', () => {
-    if (saving.pending()) keeper?.saveNow({ name, changed, book: grid.book() });
-  });
+  // A save that has begun may not end when the page goes: what is not surely kept is kept in the quick way too.
+  const keepNow = () => {
+    if (changes !== keptChanges) keeper?.saveNow({ name, changed, book: grid.book() });
+  };
+  window.addEventListener('pagehide', keepNow);
   document.addEventListener('visibilitychange', () => {
-    if (document.visibilityState === 'hidden') saving.flush();
+    if (document.visibilityState !== 'hidden') return;
+    keepNow();
+    saving.flush();
   });
 
   showName();

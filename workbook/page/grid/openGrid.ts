@@ -26,8 +26,12 @@ export interface Grid {
   readonly api: FUniver;
   readonly injector: Injector;
   readonly messages: CellMessages;
-  /** Small texts kept in the file. */
-  readonly properties: Map<string, string>;
+  /** A small text kept in the file. */
+  text(key: string): string | undefined;
+  /** Keeps a small text in the file; undefined takes it away. */
+  setText(key: string, text: string | undefined): void;
+  /** Calls back after a small text was set. */
+  onText(listener: () => void): void;
   /** Shows another book; what was open before goes. */
   open(book: Book): void;
   /** Calls back before another book is opened. */
@@ -62,6 +66,7 @@ export function openGrid(
   let origins: Origins = new Map();
   let workbook: FWorkbook | undefined;
   let books = 0;
+  const textListeners: (() => void)[] = [];
   const leaving: (() => void)[] = [];
   const openedListeners: (() => void)[] = [];
 
@@ -108,7 +113,13 @@ export function openGrid(
     api,
     injector,
     messages,
-    properties,
+    text: (key) => properties.get(key),
+    setText: (key, text) => {
+      if (text === undefined) properties.delete(key);
+      else properties.set(key, text);
+      for (const listener of textListeners) listener();
+    },
+    onText: (listener) => textListeners.push(listener),
     open,
     beforeOpen: (listener) => leaving.push(listener),
     onOpened: (listener) => openedListeners.push(listener),

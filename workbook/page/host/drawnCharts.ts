@@ -1,5 +1,6 @@
-import { ICommandService } from '@univerjs/core';
+import { ICommandService, LifecycleStages } from '@univerjs/core';
 import { SetRangeValuesMutation, SetWorksheetActiveOperation } from '@univerjs/sheets';
+import { DrawingApplyType, SetDrawingApplyMutation } from '@univerjs/sheets-drawing';
 import { createElement } from 'react';
 import type { ChartSpec, Ref } from '../../../taskpane/port';
 import type { Grid } from '../grid/openGrid';
@@ -27,10 +28,9 @@ export function drawnCharts(grid: Grid): { add(spec: ChartSpec, at: Ref): void }
   const tell = () => {
     for (const listener of changed) listener();
   };
-  const kept = () => JSON.parse(grid.properties.get(PROPERTY) ?? '[]') as Drawn[];
+  const kept = () => JSON.parse(grid.text(PROPERTY) ?? '[]') as Drawn[];
   const keep = (charts: readonly Drawn[]) => {
-    if (charts.length === 0) grid.properties.delete(PROPERTY);
-    else grid.properties.set(PROPERTY, JSON.stringify(charts));
+    grid.setText(PROPERTY, charts.length === 0 ? undefined : JSON.stringify(charts));
   };
 
   const frames = new Map<string, Parameters<typeof ChartFrame>[0]>();
@@ -49,6 +49,7 @@ export function drawnCharts(grid: Grid): { add(spec: ChartSpec, at: Ref): void }
 
   /** The grid can only draw over the sheet that is in view: others wait until theirs is. */
   const showActive = () => {
+    if (grid.api.getCurrentLifecycleStage() < LifecycleStages.Rendered) return;
     const active = grid.workbook().getActiveSheet().getSheetName();
     for (const chart of kept()) if (chart.at.sheet === active && !frames.has(chart.id)) show(chart);
   };
@@ -57,14 +58,15 @@ export function drawnCharts(grid: Grid): { add(spec: ChartSpec, at: Ref): void }
     showActive();
   };
   grid.api.getFormula().calculationResultApplied(tell);
-  grid.injector.get(ICommandService).onCommandExecuted(({ id }) => {
+  grid.injector.get(ICommandService).onCommandExecuted(({ id, params }) => {
     if (id === SetRangeValuesMutation.id) tell();
     if (id === SetWorksheetActiveOperation.id) setTimeout(showActive);
-    if (id !== 'sheet.mutation.set-drawing-apply') return;
-    keep(
-      kept().filter((chart) => !frames.has(chart.id) || grid.sheet(chart.at.sheet)?.getFloatDomById(chart.id) != null),
-    );
+    if (id === SetDrawingApplyMutation.id && (params as { type: DrawingApplyType }).type === DrawingApplyType.REMOVE) {
+      const there = ({ id: chart, at }: Drawn) => grid.sheet(at.sheet)?.getFloatDomById(chart) != null;
+      keep(kept().filter((chart) => !frames.has(chart.id) || there(chart)));
+    }
   });
+  grid.api.addEvent(grid.api.Event.LifeCycleChanged, showActive);
   grid.onOpened(restore);
   restore();
 

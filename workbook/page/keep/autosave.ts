@@ -7,8 +7,7 @@ const SOON_MS = 500;
 const AUTOMATIC = /auto-height|formula\.mutation\.(?!set-defined-name|remove-defined-name)/;
 
 export interface Saving {
-  /** True where the last changes wait to be saved. */
-  pending(): boolean;
+  /** Saves what waits to be saved. */
   flush(): void;
 }
 
@@ -21,12 +20,19 @@ export function autosave(grid: Grid, changed: (byPerson: boolean) => void, save:
     timer = undefined;
     save();
   };
+  const soon = () => {
+    clearTimeout(timer);
+    timer = setTimeout(flush, SOON_MS);
+  };
   grid.injector.get(ICommandService).onCommandExecuted((command, options) => {
     const params = command.params as { unitId?: string } | undefined;
     if (command.type !== CommandType.MUTATION || params?.unitId !== grid.workbook().getId()) return;
     changed(!AUTOMATIC.test(command.id) && !options?.fromFormula && !options?.onlyLocal);
-    clearTimeout(timer);
-    timer = setTimeout(flush, SOON_MS);
+    soon();
   });
-  return { flush, pending: () => timer !== undefined };
+  grid.onText(() => {
+    changed(false);
+    soon();
+  });
+  return { flush };
 }
