@@ -28,11 +28,11 @@ export function hotCall(
       continue;
     }
     const cell = singleCell(raw);
+    // A 0 may be a blank in disguise, which the general way finds out.
     if (isKey) {
-      if (cell === '' || cell !== last.keys[key++]) return undefined;
+      if (cell === '' || cell === 0 || cell !== last.keys[key++]) return undefined;
       continue;
     }
-    // A 0 may be a blank in disguise, which the general way finds out.
     if (typeof cell !== 'number' || cell === 0 || cell - cell !== 0) return undefined;
     const si = cell * (last.factors[i] as number) + (last.offsets[i] as number);
     if (slot === 0) a = si;

@@ -2,6 +2,7 @@ import { beforeEach, describe, expect, it } from 'vitest';
 import { DEFAULT_SETTINGS, parseSettingsBlock, settingsRows } from '../../functions/settings/settings';
 import { settingsStore } from '../../functions/settings/store';
 import { setBlankReader } from '../../functions/edge/blanks';
+import { enthalpy } from '../../functions/enthalpy';
 import { latent } from '../../functions/latent';
 import { satPressure } from '../../functions/satPressure';
 import { call, cellOf, faultOf, HostError } from './host';
@@ -105,6 +106,14 @@ describe('blanks', () => {
     const spill = (await (answered as Promise<unknown>)) as unknown[][];
     expect(spill[0]?.[0]).toBeTypeOf('number');
     expect(spill[1]?.[0]).toBe('');
+  });
+
+  it('checks every 0, also one that the last call gave', async () => {
+    const state = (address: string): unknown =>
+      enthalpy([['water']], [[0]], undefined, undefined, { parameterAddresses: [null, address] } as never);
+    setBlankReader((address) => Promise.resolve([[address === 'S!A2']]));
+    expect(await state('S!A1')).toEqual([[expect.any(Number)]]);
+    await expect(Promise.resolve(state('S!A2'))).rejects.toMatchObject({ code: '#VALUE!' });
   });
 
   it('takes an optional empty cell without an address as left out', () => {
