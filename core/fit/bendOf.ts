@@ -1,5 +1,6 @@
 import { fisherFAbove } from '../statistics/fisherFAbove';
 import type { Curvature } from './fitTypes';
+import { BLOCK } from './lineSums';
 import type { LineSolution } from './solveLine';
 
 /**
@@ -15,26 +16,17 @@ export function bendOf(x: Float64Array, y: Float64Array, line: LineSolution): Cu
   if (n < 4) return undefined;
   const { centre, spread } = line;
   let cubes = 0;
-  for (let i = 0; i < n; i++) {
-    const d = (x[i] as number) - centre;
-    cubes += d * d * d;
-  }
-  const tilt = cubes / spread;
-  const level = spread / n;
-  const slope = line.slope + line.slopeRest;
-  let norm = 0;
-  let product = 0;
-  let squares = 0;
-  let fourths = 0;
-  for (let i = 0; i < n; i++) {
-    const d = (x[i] as number) - centre;
-    const residual = (y[i] as number) - line.centreLatent - slope * d;
-    const q = d * d - tilt * d - level;
-    norm += q * q;
-    product += q * residual;
-    squares += residual * residual;
-    fourths += d * d * d * d;
-  }
+  for (let start = 0; start < n; start += BLOCK) cubes += cubesOf(x, start, Math.min(n, start + BLOCK), centre);
+  const shape: Shape = {
+    centre,
+    tilt: cubes / spread,
+    level: spread / n,
+    latent: line.centreLatent,
+    slope: line.slope + line.slopeRest,
+  };
+  const sums: BendSums = { norm: 0, product: 0, squares: 0, fourths: 0 };
+  for (let start = 0; start < n; start += BLOCK) addBend(x, y, start, Math.min(n, start + BLOCK), shape, sums);
+  const { norm, product, squares, fourths } = sums;
   // Two different temperatures (or two tight groups) make q zero but for rounding, which goes with d².
   if (!(norm > n * 1e-20 * fourths)) return undefined;
   const coefficient = product / norm;
@@ -44,4 +36,51 @@ export function bendOf(x: Float64Array, y: Float64Array, line: LineSolution): Cu
   const explained = coefficient * product;
   const probability = explained === 0 ? 1 : fisherFAbove((explained * degreesOfFreedom) / left, 1, degreesOfFreedom);
   return { coefficient, uncertainty, degreesOfFreedom, probability };
+}
+
+function cubesOf(x: Float64Array, start: number, end: number, centre: number): number {
+  let sum = 0;
+  for (let i = start; i < end; i++) {
+    const d = (x[i] as number) - centre;
+    sum += d * d * d;
+  }
+  return sum;
+}
+
+/** The line, and the polynomial that is fitted to what it leaves. */
+interface Shape {
+  readonly centre: number;
+  readonly tilt: number;
+  readonly level: number;
+  readonly latent: number;
+  readonly slope: number;
+}
+
+interface BendSums {
+  norm: number;
+  product: number;
+  squares: number;
+  fourths: number;
+}
+
+function addBend(x: Float64Array, y: Float64Array, start: number, end: number, shape: Shape, sums: BendSums): void {
+  const { centre, tilt, level, latent, slope } = shape;
+  let norm = 0;
+  let product = 0;
+  let squares = 0;
+  let fourths = 0;
+  for (let i = start; i < end; i++) {
+    const d = (x[i] as number) - centre;
+    const residual = (y[i] as number) - latent - slope * d;
+    const dd = d * d;
+    const q = dd - tilt * d - level;
+    norm += q * q;
+    product += q * residual;
+    squares += residual * residual;
+    fourths += dd * dd;
+  }
+  sums.norm += norm;
+  sums.product += product;
+  sums.squares += squares;
+  sums.fourths += fourths;
 }

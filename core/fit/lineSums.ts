@@ -1,5 +1,5 @@
 /** Partial sums are closed after so many rows, which keeps the rounding of long sums at that of short ones. */
-const BLOCK = 1024;
+export const BLOCK = 1024;
 
 /** 2²⁷ + 1: splits a double into two halves whose products are exact. */
 const SPLITTER = 134217729;

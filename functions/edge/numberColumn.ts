@@ -29,14 +29,29 @@ export function numberColumn(block: Block): NumberColumn {
   const headed = typeof first === 'string' && !isScalar(block);
   const header = headed ? readHeader(first) : undefined;
   const skip = headed ? 1 : 0;
-  const numbers = new Float64Array(count - skip);
-  for (let i = skip; i < count; i++) {
-    const value = raw(i);
-    if (typeof value !== 'number' || value - value !== 0)
-      return { header, cells: peeled(raw, skip, count), firstRow: 1 + skip };
-    numbers[i - skip] = value;
+  const numbers = upright ? columnOf(block.cells, skip) : rowOf(block.cells[0] ?? [], skip);
+  return { header, cells: numbers ?? peeled(raw, skip, count), firstRow: 1 + skip };
+}
+
+/** The numbers of a column from a row on; `undefined` where anything else stands in it. */
+function columnOf(cells: readonly (readonly unknown[])[], skip: number): Float64Array | undefined {
+  const numbers = new Float64Array(cells.length - skip);
+  for (let i = 0; i < numbers.length; i++) {
+    const value = (cells[i + skip] as readonly unknown[])[0];
+    if (typeof value !== 'number' || value - value !== 0) return undefined;
+    numbers[i] = value;
   }
-  return { header, cells: numbers, firstRow: 1 + skip };
+  return numbers;
+}
+
+function rowOf(cells: readonly unknown[], skip: number): Float64Array | undefined {
+  const numbers = new Float64Array(cells.length - skip);
+  for (let i = 0; i < numbers.length; i++) {
+    const value = cells[i + skip];
+    if (typeof value !== 'number' || value - value !== 0) return undefined;
+    numbers[i] = value;
+  }
+  return numbers;
 }
 
 function peeled(raw: (i: number) => unknown, from: number, to: number): unknown[] {

@@ -82,15 +82,34 @@ export function benchFit(): void {
   reportDigits();
 }
 
-/** Certified digits of the slope: NIST StRD Norris, and temperatures that lie close together. */
+/** The least-squares slope of data as they are held, in whole numbers: what the last digit should be. */
+function exactSlope(x: readonly number[], y: readonly number[]): number {
+  const whole = (value: number): bigint => BigInt(value * 2 ** 70);
+  const n = BigInt(x.length);
+  const [xs, ys] = [x.map(whole), y.map(whole)];
+  const sum = (values: readonly bigint[]): bigint => values.reduce((total, value) => total + value, 0n);
+  const times = (a: readonly bigint[], b: readonly bigint[]): bigint =>
+    sum(a.map((value, i) => value * (b[i] as bigint)));
+  const above = n * times(xs, ys) - sum(xs) * sum(ys);
+  const below = n * times(xs, xs) - sum(xs) * sum(xs);
+  return Number((above * 2n ** 80n) / below) / 2 ** 80;
+}
+
+/** Digits of the slope on NIST StRD Norris, and on temperatures that lie close together. */
 function reportDigits(): void {
   const steep = Array.from({ length: 11 }, (_, i) => 373.15 + 0.001 * i);
-  const heats = steep.map((_, i) => 2256 - 0.0025 * i);
+  const heats = steep.map((_, i) => 2256 - 0.0025 * i + (i % 3) * 1e-4);
   const sets = [
-    { name: 'NIST StRD Norris', x: strd.norris.x, y: strd.norris.y, slope: 1.00211681802045 },
-    { name: 'exact line at 373.15 K + 0.001 i', x: steep, y: heats, slope: -2.5 },
+    { name: 'NIST StRD Norris, certified', x: strd.norris.x, y: strd.norris.y, slope: strd.norris.certified.slope },
+    {
+      name: 'NIST StRD Norris, exact on the doubles',
+      x: strd.norris.x,
+      y: strd.norris.y,
+      slope: exactSlope(strd.norris.x, strd.norris.y),
+    },
+    { name: '373.15 K + 0.001 i, exact on the doubles', x: steep, y: heats, slope: exactSlope(steep, heats) },
   ];
-  process.stdout.write('\nDigits of the slope, -log10 of the relative error\n');
+  process.stdout.write('\nDigits of the slope, -log10 of the relative error (16 where every bit agrees)\n');
   for (const { name, x, y, slope } of sets) {
     const digits = (value: number): string => (-Math.log10(Math.max(Math.abs(value / slope - 1), 1e-16))).toFixed(1);
     const pairs = x.map((t, i) => [t, y[i] as number]);
@@ -99,6 +118,6 @@ function reportDigits(): void {
       ['simple-statistics', digits(linearRegression(pairs).m)],
       ['ml-regression-simple-linear', digits(new SimpleLinearRegression(x, y).slope)],
     ];
-    process.stdout.write(`  ${name.padEnd(36)} ${shown.map(([who, d]) => `${who ?? ''} ${d ?? ''}`).join(', ')}\n`);
+    process.stdout.write(`  ${name.padEnd(42)} ${shown.map(([who, d]) => `${who ?? ''} ${d ?? ''}`).join(', ')}\n`);
   }
 }
