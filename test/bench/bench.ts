@@ -2,6 +2,7 @@ import { benchCore } from './benchCore';
 import { benchFit } from './benchFit';
 import { benchFunctions } from './benchFunctions';
 import { benchGrid } from './benchGrid';
+import { benchPage } from './benchPage';
 import { benchSizes } from './benchSizes';
 
 const PARTS: Readonly<Record<string, () => void | Promise<void>>> = {
@@ -10,6 +11,7 @@ const PARTS: Readonly<Record<string, () => void | Promise<void>>> = {
   fit: benchFit,
   sizes: benchSizes,
   grid: benchGrid,
+  page: benchPage,
 };
 
 /** Runs the named parts, or all of them. Ratios hold within one run; absolute times depend on the machine. */

@@ -3,7 +3,10 @@ import {
   type IDisposable,
   type Injector,
   IUniverInstanceService,
+  ObjectMatrix,
   toDisposable,
+  UniverInstanceType,
+  type Workbook,
 } from '@univerjs/core';
 import { SheetsDataValidationValidatorService } from '@univerjs/sheets-data-validation';
 import { IEditorBridgeService, ISheetCellDropdownManagerService } from '@univerjs/sheets-ui';
@@ -24,7 +27,15 @@ export function quietLists(injector: Injector): void {
 
   const checks = injector.get(SheetsDataValidationValidatorService);
   const units = injector.get(IUniverInstanceService);
-  const check = checks.validatorCell.bind(checks);
+  const isThere = (unitId: string): boolean =>
+    units.getAllUnitsForType<Workbook>(UniverInstanceType.UNIVER_SHEET).some((unit) => unit.getUnitId() === unitId);
+  const cell = checks.validatorCell.bind(checks);
   checks.validatorCell = (unitId, sheetId, row, column) =>
-    units.getUnit(unitId) === null ? Promise.resolve(DataValidationStatus.VALID) : check(unitId, sheetId, row, column);
+    isThere(unitId) ? cell(unitId, sheetId, row, column) : Promise.resolve(DataValidationStatus.VALID);
+  const ranges = checks.validatorRanges.bind(checks);
+  checks.validatorRanges = (unitId, sheetId, places) =>
+    isThere(unitId) ? ranges(unitId, sheetId, places) : Promise.resolve([]);
+  const worksheet = checks.validatorWorksheet.bind(checks);
+  checks.validatorWorksheet = (unitId, sheetId) =>
+    isThere(unitId) ? worksheet(unitId, sheetId) : Promise.resolve(new ObjectMatrix());
 }
