@@ -127,6 +127,21 @@ describe('the local page', () => {
     expect(await readCell(page, 'Cover', 'F41')).toBe('hurried');
   });
 
+  it('asks before it goes while a cell is still being typed in', async () => {
+    let asked = 0;
+    page.on('dialog', (dialog) => {
+      asked += 1;
+      void dialog.accept();
+    });
+    await page.reload();
+    await started(page);
+    expect(asked).toBe(0);
+    await select(page, 'Cover', 'F42');
+    await page.keyboard.type('half a wo');
+    await page.reload();
+    expect(asked).toBe(1);
+  });
+
   it('saves a file that opens with the same numbers and formulas', async () => {
     await typeInto(page, 'Latent heat', 'H40', '=LATENTRY.LATENT("water","vaporization",60)');
     const before = await readCells(page, 'Latent heat', 'A1:H60');

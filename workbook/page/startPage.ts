@@ -13,6 +13,7 @@ import { quietLists } from './grid/quietLists';
 import { showFittedNumbers } from './grid/showFittedNumbers';
 import { showNoteMarks } from './grid/showNoteMarks';
 import { gridHost } from './gridHost';
+import { askWhileTyping } from './keep/askWhileTyping';
 import { startKeeper, type Keeper } from './keep/keeper';
 import { loadFunctions } from './loadFunctions';
 import { openWorkbook } from './openWorkbook';
@@ -41,6 +42,7 @@ export async function startPage(elements: PageElements, standard: () => Book): P
   showNoteMarks(grid);
   showFittedNumbers(grid);
   quietLists(grid.injector);
+  askWhileTyping(grid.injector);
   undoButtons(grid, elements);
 
   const pane = paneToggle(elements.buttons['pane-toggle'], elements.pane);
