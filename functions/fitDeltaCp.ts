@@ -1,4 +1,3 @@
-import type { LatentKind } from '../core/answer';
 import { findSubstance, refused } from '../core/catalogue/find';
 import { convertLine } from '../core/fit/convertLine';
 import { fitDeltaCp as fitLine, type FitOptions } from '../core/fit/fitDeltaCp';
@@ -12,8 +11,9 @@ import { parseQuantity } from '../core/units/parseQuantity';
 import type { Unit } from '../core/units/unit';
 import { unitOf } from '../core/units/unitOf';
 import { answer } from './edge/answer';
-import { shapeOf, type Block } from './edge/block';
+import { requiredBlock, shapeOf, type Block } from './edge/block';
 import { fitUnits, withSlopeUnit } from './edge/fitUnits';
+import { kindOption } from './edge/keys';
 import { isDense, numberColumn, type NumberColumn } from './edge/numberColumn';
 import type { BlockwiseSpec, Table } from './edge/spec';
 import type { Settings } from './settings/settings';
@@ -33,7 +33,7 @@ const spec: BlockwiseSpec = {
   options: ['method', 'reference', 'kind', 'substance', 'coverage'],
   run: ([temperatures, latents, uLatents, uTemperatures], settings) => {
     refuseUncertainties(uLatents ?? uTemperatures);
-    return table(given('temperatures', temperatures), given('latents', latents), settings);
+    return table(requiredBlock('temperatures', temperatures), requiredBlock('latents', latents), settings);
   },
 };
 
@@ -42,7 +42,7 @@ function table(temperatures: Block, latents: Block, settings: Settings): Table {
   if (method.trim().toLowerCase() !== 'line') throw refused('method', method, ['line']);
   const name = settings.options['substance'];
   const substance = name === undefined ? undefined : findSubstance(name);
-  const kind = kindOf(settings.options['kind']);
+  const kind = kindOption(settings, undefined);
   const x = numberColumn(temperatures);
   const y = numberColumn(latents);
   const units = fitUnits(x.header, y.header, settings, substance);
@@ -102,20 +102,6 @@ function coverageOf(text: string | undefined): number {
     allowed: 'a probability inside (0, 1), as 0.95 or 95 %',
     received: text,
   });
-}
-
-const KINDS: readonly LatentKind[] = ['coexistence', 'isobaric', 'standard'];
-
-function kindOf(text: string | undefined): LatentKind | undefined {
-  if (text === undefined) return undefined;
-  const kind = KINDS.find((known) => known === text.trim().toLowerCase());
-  if (kind === undefined) throw refused('kind', text, KINDS);
-  return kind;
-}
-
-function given(name: string, block: Block | undefined): Block {
-  if (block !== undefined) return block;
-  throw new Problem({ code: 'argument', argument: name, allowed: 'a range: it is required', received: 'nothing' });
 }
 
 function refuseUncertainties(block: Block | undefined): void {

@@ -6,7 +6,7 @@ import { between } from '../core/units/linear';
 import { parseQuantity } from '../core/units/parseQuantity';
 import { unitOf } from '../core/units/unitOf';
 import { answer } from './edge/answer';
-import type { Block } from './edge/block';
+import { requiredBlock, type Block } from './edge/block';
 import { heatFactor } from './edge/fitUnits';
 import { numberColumn } from './edge/numberColumn';
 import type { BlockwiseSpec, Table } from './edge/spec';
@@ -20,7 +20,8 @@ const spec: BlockwiseSpec = {
     { name: 'temperature', kind: 'block' },
   ],
   options: ['substance'],
-  run: ([fit, temperature], settings) => table(required('fit', fit), required('temperature', temperature), settings),
+  run: ([fit, temperature], settings) =>
+    table(requiredBlock('fit', fit), requiredBlock('temperature', temperature), settings),
 };
 
 function table(fitBlock: Block, temperatures: Block, settings: Settings): Table {
@@ -68,11 +69,6 @@ function inHeatPerDegree(fit: FitFromTable): FitFromTable {
 
 function turned(pairs: Table): Table {
   return [pairs.map((pair) => pair[0] ?? ''), pairs.map((pair) => pair[1] ?? '')];
-}
-
-function required(name: string, block: Block | undefined): Block {
-  if (block !== undefined) return block;
-  throw new Problem({ code: 'argument', argument: name, allowed: 'a range: it is required', received: 'nothing' });
 }
 
 /**

@@ -4,6 +4,7 @@ import { shortNumber } from '../core/problem';
 import { answer } from './edge/answer';
 import { writerFor } from './edge/cellError';
 import { substanceKey, textKey } from './edge/keys';
+import { STANDARD_ATMOSPHERE_PA } from './edge/pathPlan';
 import type { CellwiseSpec } from './edge/spec';
 import type { Settings } from './settings/settings';
 
@@ -58,9 +59,9 @@ function curvesOf(substance: Substance): readonly (readonly [string, () => Curve
     ),
     ['saturation pressure', () => substance.saturationPressure('stable')],
     ['saturation temperature', () => substance.saturationTemperature('stable')],
-    ['solid heat capacity', () => substance.heatCapacity('solid', 101325)],
-    ['liquid heat capacity', () => substance.heatCapacity('liquid', 101325)],
-    ['gas heat capacity', () => substance.heatCapacity('gas', 101325)],
+    ['solid heat capacity', () => substance.heatCapacity('solid', STANDARD_ATMOSPHERE_PA)],
+    ['liquid heat capacity', () => substance.heatCapacity('liquid', STANDARD_ATMOSPHERE_PA)],
+    ['gas heat capacity', () => substance.heatCapacity('gas', STANDARD_ATMOSPHERE_PA)],
     ['ideal gas heat capacity', () => substance.heatCapacity('gas', 'standard')],
   ];
 }

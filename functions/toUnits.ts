@@ -22,8 +22,7 @@ const spec: CellwiseSpec = {
 function plan([fromText, toText, substance]: readonly Key[], settings: Settings): Plan {
   const from = unitOf(textKey('from', fromText), undefined, 'from');
   const to = unitOf(textKey('to', toText), undefined, 'to');
-  const as =
-    settings.options['kind'] === undefined ? undefined : wordOption(settings, 'kind', ['point', 'difference'], 'point');
+  const as = wordOption(settings, 'kind', ['point', 'difference'], undefined);
   const molarMass = substance === undefined ? undefined : findSubstance(textKey('substance', substance)).molarMass;
   const needs = { molarMass, barometerPa: settings.barometerPa, as };
   return { compute: (value) => convert(value, from, to, needs) };

@@ -1,5 +1,5 @@
 import { Problem } from '../../core/problem';
-import { CellFault, peel, shown, type Cell } from './cell';
+import { peel, type Cell } from './cell';
 
 /** One argument as it arrives: a two-dimensional array, with the cell address where the host tells it. */
 export interface Block {
@@ -45,12 +45,8 @@ export function shapeOf(block: { readonly rows: number; readonly columns: number
   return `${block.rows} × ${block.columns}`;
 }
 
-/** A text that is neither blank nor an error. */
-export function textOf(block: Block): string {
-  const cell = scalarOf(block);
-  if (cell instanceof CellFault) throw cell;
-  if (typeof cell !== 'string') {
-    throw new Problem({ code: 'argument', argument: block.name, allowed: 'a text', received: shown(cell) });
-  }
-  return cell;
+/** A block that a function cannot do without. */
+export function requiredBlock(name: string, block: Block | undefined): Block {
+  if (block !== undefined) return block;
+  throw new Problem({ code: 'argument', argument: name, allowed: 'a range: it is required', received: 'nothing' });
 }

@@ -1,9 +1,9 @@
 import type { Answer, LatentKind } from '../../core/answer';
 import { Problem } from '../../core/problem';
-import { refused } from '../../core/catalogue/find';
 import type { Settings } from '../settings/settings';
 import { CellFault } from './cell';
 import { faultOf, writerFor } from './cellError';
+import { wordOption } from './keys';
 import type { Plan } from './spec';
 
 /** The parts of an answer that a cell can show instead of its value. */
@@ -29,11 +29,7 @@ const KIND_WORDS: Record<LatentKind, string> = {
 };
 
 export function answerPart(settings: Settings): AnswerPart {
-  const asked = settings.options['answer'];
-  if (asked === undefined) return 'value';
-  const part = ANSWER_PARTS.find((p) => p === asked.trim().toLowerCase());
-  if (part !== undefined) return part;
-  throw refused('answer', asked, ANSWER_PARTS);
+  return wordOption(settings, 'answer', ANSWER_PARTS, 'value');
 }
 
 /** The asked part of one element's evidence; a problem becomes words for `status` and a fault for the rest. */

@@ -30,12 +30,12 @@ export function phaseKey(key: Key): Phase {
 }
 
 /** An option that takes one word of a list. */
-export function wordOption<Word extends string>(
+export function wordOption<Word extends string, Fallback extends Word | undefined>(
   settings: Settings,
   option: string,
   words: readonly Word[],
-  fallback: Word,
-): Word {
+  fallback: Fallback,
+): Word | Fallback {
   const asked = settings.options[option];
   if (asked === undefined) return fallback;
   const word = words.find((w) => w === asked.trim().toLowerCase());
@@ -45,8 +45,11 @@ export function wordOption<Word extends string>(
 
 const KINDS = ['coexistence', 'isobaric', 'standard'] as const;
 
-/** `kind=`, or the default kind of this change. */
-export function kindOption(settings: Settings, fallback: LatentKind): LatentKind {
+/** `kind=`, or the kind that holds without it. */
+export function kindOption<Fallback extends LatentKind | undefined>(
+  settings: Settings,
+  fallback: Fallback,
+): LatentKind | Fallback {
   return wordOption(settings, 'kind', KINDS, fallback);
 }
 
