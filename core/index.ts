@@ -6,8 +6,21 @@ export { evaluate, valueAt, type OutOfRange } from './evaluate';
 export { meanOver } from './meanOver';
 export { nearest } from './nearest';
 export { plainWords, Problem, type ProblemData, type QuantityWriter } from './problem';
-export type { Change, Curve, Gap, Ladder, Phase, Rung, Substance, Surface } from './substance';
-export { findChange, findPhase, findSubstance, substances } from './catalogue/find';
+export type {
+  CatalogueEntry,
+  Change,
+  Curve,
+  Gap,
+  Ladder,
+  LambdaPoint,
+  Phase,
+  Rung,
+  Substance,
+  SubstanceGroup,
+  Surface,
+} from './substance';
+export { catalogue, findChange, findPhase, findSubstance } from './catalogue/find';
+export { makeRegistry, type Registry } from './catalogue/registry';
 export { water } from './water/water';
 
 export { convertLine, type ScaleChange } from './fit/convertLine';

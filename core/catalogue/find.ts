@@ -1,33 +1,19 @@
 import { nearest } from '../nearest';
 import { Problem } from '../problem';
 import type { Change, Phase, Substance } from '../substance';
-import { water } from '../water/water';
+import { entries } from './entries';
+import { plainName } from './plainName';
+import { refused } from './refused';
+import { makeRegistry, type Registry } from './registry';
 
-/** Every built-in substance, in alphabetical order of its name. */
-export const substances: readonly Substance[] = [water];
+export { plainName, refused };
 
-/** Case, spaces, hyphens and underscores do not matter in a name. */
-export function plainName(text: string): string {
-  return text.toLowerCase().replace(/[\s\-_]+/g, '');
-}
+/** The built-in substances by every name they have. */
+export const catalogue: Registry = makeRegistry(entries);
 
-const byName = new Map<string, Substance>();
-for (const substance of substances) {
-  for (const name of [substance.name, substance.formula, substance.cas, ...substance.synonyms]) {
-    byName.set(plainName(name), substance);
-  }
-}
-
-/** Finds a substance by name, formula, CAS number or synonym; a near miss names the nearest. */
+/** Finds a built-in substance by name, formula, CAS number or synonym; a near miss names the nearest. */
 export function findSubstance(text: string): Substance {
-  const found = byName.get(plainName(text));
-  if (found !== undefined) return found;
-  throw refused(
-    'substance',
-    text,
-    substances.map((s) => s.name),
-    [...byName.keys()],
-  );
+  return catalogue.find(text);
 }
 
 /** A change as the core knows it, and −1 where the word names the opposite direction. */
@@ -63,20 +49,45 @@ export const changeWords: readonly string[] = [
   'deposition',
 ];
 
-/** Finds a change of a substance by its name or a synonym. */
+/**
+ * Finds a change of a substance by its name or a synonym. A solid-solid change has the names of its two forms, cold
+ * first: `alpha-gamma`; the other way round, `gamma-alpha`, is its opposite direction.
+ *
+ * @throws Problem `missing` for a change that this substance does not have and for a lambda point, `argument` for an
+ * unknown word
+ */
 export function findChange(substance: Substance, text: string): FoundChange {
   const plain = plainName(text);
   const word = CHANGE_WORDS[plain];
   const named = substance.changes.find((change) => plainName(change) === (word?.[0] ?? plain));
   if (named !== undefined) return { change: named, sign: word?.[1] ?? 1 };
+  const back = substance.changes.find((change) => reversed(change) === plain);
+  if (back !== undefined) return { change: back, sign: -1 };
+  const lambda = substance.lambdaPoints?.find(({ name }) => plainName(name) === plain);
+  if (lambda !== undefined) {
+    throw new Problem({
+      code: 'missing',
+      subject: `${lambda.name} of ${substance.name} at ${lambda.temperatureK} K`,
+      reason: 'a second-order change: the heat capacity peaks there and there is no latent heat',
+    });
+  }
   if (word !== undefined) {
     throw new Problem({
       code: 'missing',
       subject: `${word[0]} of ${substance.name}`,
-      reason: `no such transition in the catalogue; it has ${substance.changes.join(', ')}`,
+      reason: `no such transition in the catalogue; it has ${listed(substance.changes)}`,
     });
   }
-  throw refused('change', text, substance.changes, Object.keys(CHANGE_WORDS));
+  throw refused('change', text, substance.changes, [...substance.changes, ...Object.keys(CHANGE_WORDS)]);
+}
+
+function reversed(change: Change): string {
+  const at = change.indexOf('-');
+  return at < 0 ? '' : plainName(`${change.slice(at + 1)}-${change.slice(0, at)}`);
+}
+
+function listed(words: readonly string[]): string {
+  return words.length === 0 ? 'none' : words.join(', ');
 }
 
 const PHASE_WORDS: Readonly<Record<string, Phase>> = {
@@ -96,19 +107,20 @@ export function findPhase(text: string): Phase {
   throw refused('phase', text, ['solid', 'liquid', 'gas'], Object.keys(PHASE_WORDS));
 }
 
-/** A word that is not on a list, with the list and the nearest word. */
-export function refused(
-  argument: string,
-  received: string,
-  allowed: readonly string[],
-  known: readonly string[] = allowed,
-): Problem {
-  const close = nearest(received, known);
-  return new Problem({
-    code: 'argument',
-    argument,
-    allowed: allowed.join(', '),
-    received: `"${received}"`,
-    ...(close === undefined ? {} : { nearest: close }),
-  });
+/** A phase, and one crystal form of the solid where it is named. */
+export interface FoundPhase {
+  readonly phase: Phase;
+  readonly form?: string;
+}
+
+/** Finds a phase, or a crystal form of a substance by its name (`gamma`, `solid gamma`). */
+export function findPhaseOf(substance: Substance, text: string): FoundPhase {
+  const plain = plainName(text);
+  const phase = PHASE_WORDS[plain];
+  if (phase !== undefined) return { phase };
+  const forms = substance.forms ?? [];
+  const form = forms.find((name) => plainName(name) === plain || `solid${plainName(name)}` === plain);
+  if (form !== undefined) return { phase: 'solid', form };
+  const allowed = ['solid', 'liquid', 'gas', ...forms];
+  throw refused('phase', text, allowed, [...Object.keys(PHASE_WORDS), ...forms], nearest(text, allowed));
 }

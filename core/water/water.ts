@@ -4,6 +4,7 @@ import { betweenBranches } from './betweenBranches';
 import { meltingTemperature } from './boundaries';
 import { coexistenceCurve, noSuchChange } from './coexistenceCurves';
 import { enthalpyCurve, heatCapacityCurve } from './phaseCurves';
+import { noDisagreement } from './noDisagreement';
 import { MOLAR_MASS, NORMAL_PRESSURE_PA } from './ranges';
 import { saturationPressureCurve, saturationTemperatureCurve } from './saturationCurves';
 import { waterConstants } from './waterConstants';
@@ -33,6 +34,10 @@ export const water: Substance = {
   formula: 'H2O',
   cas: '7732-18-5',
   synonyms: ['steam', 'ice', 'ice Ih', 'ordinary water', 'light water', 'water vapour', 'water vapor', 'eau', 'aqua'],
+  group: 'fluid',
+  notes: [
+    'One equation of state for liquid and vapour and one for ice: latent heats and heat capacities agree by construction.',
+  ],
   molarMass: MOLAR_MASS,
   constants: waterConstants,
   changes: ['fusion', 'vaporization', 'sublimation'],
@@ -54,4 +59,5 @@ export const water: Substance = {
   saturationTemperature: saturationTemperatureCurve,
   enthalpy: enthalpyCurve,
   ladder: waterLadder,
+  disagreement: noDisagreement,
 };

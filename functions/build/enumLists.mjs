@@ -34,12 +34,12 @@ const list = (id, words) => ({
 
 /** Autocomplete lists by parameter name, made from the catalogue at each build. */
 export function enumLists() {
-  const { substances, changeWords } = loadModule('core/catalogue/find.ts');
+  const { catalogue, changeWords } = loadModule('core/catalogue/find.ts');
   const direction = { condensation: 'heat given up', freezing: 'heat given up', deposition: 'heat given up' };
   return {
     substance: list(
       'SUBSTANCE',
-      substances.map((s) => [s.name, `${s.formula}, CAS ${s.cas}`]),
+      catalogue.entries.map((s) => [s.name, `${s.formula}, CAS ${s.cas}`]),
     ),
     change: list(
       'CHANGE',

@@ -1,6 +1,6 @@
 import { Field, Input, Select } from '@fluentui/react-components';
 import type { LatentKind } from '../../../core/answer';
-import { findSubstance, substances } from '../../../core/catalogue/find';
+import { catalogue, findSubstance } from '../../../core/catalogue/find';
 import { number, prettyUnit } from '../look/number';
 import { useLook } from '../look/useLook';
 import { withChange, type FitChoice } from './fitChoice';
@@ -35,7 +35,7 @@ export function Meaning({ choice, onChoice, temperatureSymbol, usualReference, r
             }}
           >
             <option value="">not named</option>
-            {substances.map(({ name }) => (
+            {catalogue.entries.map(({ name }) => (
               <option key={name} value={name}>
                 {name}
               </option>

@@ -59,6 +59,8 @@ export const straightSubstance: Substance = {
   formula: 'X',
   cas: '0-00-0',
   synonyms: [],
+  group: 'house',
+  notes: [],
   molarMass: 0.05,
   constants: [],
   changes: ['fusion', 'vaporization'],
@@ -73,4 +75,5 @@ export const straightSubstance: Substance = {
   enthalpy: curve,
   enthalpyReference: 'solid at 300 K',
   ladder,
+  disagreement: notNeeded,
 };

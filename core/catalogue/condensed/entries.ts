@@ -1,0 +1,4 @@
+import type { CatalogueEntry } from '../../substance';
+
+/** Metals, salts and oxides. */
+export const condensedEntries: readonly CatalogueEntry[] = [];

@@ -1,0 +1,4 @@
+import type { CatalogueEntry } from '../../substance';
+
+/** Process fluids. */
+export const fluidEntries: readonly CatalogueEntry[] = [];
