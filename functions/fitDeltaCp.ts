@@ -1,4 +1,4 @@
-import { findSubstance, refused } from '../core/catalogue/find';
+import { refused } from '../core/catalogue/find';
 import { convertLine } from '../core/fit/convertLine';
 import { fitDeltaCp as fitLine, type FitOptions } from '../core/fit/fitDeltaCp';
 import { fitTable } from '../core/fit/fitTable';
@@ -13,7 +13,7 @@ import { unitOf } from '../core/units/unitOf';
 import { answer } from './edge/answer';
 import { requiredBlock, shapeOf, type Block } from './edge/block';
 import { fitUnits, withSlopeUnit } from './edge/fitUnits';
-import { kindOption } from './edge/keys';
+import { kindOption, substanceKey } from './edge/keys';
 import { isDense, numberColumn, type NumberColumn } from './edge/numberColumn';
 import type { BlockwiseSpec, Table } from './edge/spec';
 import type { Settings } from './settings/settings';
@@ -41,7 +41,7 @@ function table(temperatures: Block, latents: Block, settings: Settings): Table {
   const method = settings.options['method'] ?? 'line';
   if (method.trim().toLowerCase() !== 'line') throw refused('method', method, ['line']);
   const name = settings.options['substance'];
-  const substance = name === undefined ? undefined : findSubstance(name);
+  const substance = name === undefined ? undefined : substanceKey(name);
   const kind = kindOption(settings, undefined);
   const x = numberColumn(temperatures);
   const y = numberColumn(latents);

@@ -1,4 +1,3 @@
-import { findSubstance } from '../core/catalogue/find';
 import { latentFromFit } from '../core/fit/latentFromFit';
 import { readFitTable, type FitFromTable } from '../core/fit/readFitTable';
 import { Problem } from '../core/problem';
@@ -9,6 +8,7 @@ import { answer } from './edge/answer';
 import { requiredBlock, type Block } from './edge/block';
 import { heatFactor } from './edge/fitUnits';
 import { numberColumn } from './edge/numberColumn';
+import { substanceKey } from './edge/keys';
 import type { BlockwiseSpec, Table } from './edge/spec';
 import type { Settings } from './settings/settings';
 
@@ -27,7 +27,7 @@ const spec: BlockwiseSpec = {
 function table(fitBlock: Block, temperatures: Block, settings: Settings): Table {
   const fit = inHeatPerDegree(readFitTable(fitBlock.cells));
   const name = settings.options['substance'] ?? fit.substance;
-  const substance = name === undefined ? undefined : findSubstance(name);
+  const substance = name === undefined ? undefined : substanceKey(name);
   const factor = heatFactor(unitOf(fit.heatUnit, 'heat'), settings.units.heat, substance);
   const unit = unitOf(fit.temperatureUnit, 'temperature');
   const toFit = between(settings.units.temperature, unit);

@@ -26,7 +26,7 @@ const spec: CellwiseSpec = {
 
 function plan(keys: readonly Key[], settings: Settings): Plan {
   const substance = substanceKey(keys[0]);
-  const phase = phaseKey(keys[1]);
+  const { phase, form } = phaseKey(substance, keys[1]);
   const standard = wordOption(settings, 'kind', ['real', 'standard'], 'real') === 'standard';
   const saturated = wordOption(settings, 'along', ['pressure', 'saturation'], 'pressure') === 'saturation';
   let last: { pressurePa: number; curve: Curve } | undefined;
@@ -43,7 +43,7 @@ function plan(keys: readonly Key[], settings: Settings): Plan {
     if (last === undefined || last.pressurePa !== at) {
       last = {
         pressurePa: at,
-        curve: substance.heatCapacity(phase, standard ? 'standard' : saturated ? 'saturated' : at),
+        curve: substance.heatCapacity(phase, standard ? 'standard' : saturated ? 'saturated' : at, form),
       };
     }
     return last.curve;
@@ -67,7 +67,7 @@ function plan(keys: readonly Key[], settings: Settings): Plan {
  * @customfunction HEATCAP
  * @requiresParameterAddresses
  * @param substance Substance by name, formula or CAS number, as "water".
- * @param phase solid, liquid or gas (ice, vapor and steam are understood).
+ * @param phase solid, liquid or gas, or the name of a crystal form as "gamma".
  * @param temperature Temperature in the workbook's unit, or text with a unit.
  * @param [pressure] Pressure of the phase; one standard atmosphere when left out.
  * @param [mean_to] Other end of the interval, for the mean heat capacity over it.

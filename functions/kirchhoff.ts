@@ -1,4 +1,3 @@
-import { findSubstance } from '../core/catalogue/find';
 import { readForm } from '../core/kirchhoff/form';
 import { kirchhoff as carry, type KirchhoffInput } from '../core/kirchhoff/kirchhoff';
 import { Problem } from '../core/problem';
@@ -10,6 +9,7 @@ import { shapeOf, type Block } from './edge/block';
 import { commonShape } from './edge/broadcast';
 import { CellFault, peel, shown } from './edge/cell';
 import { faultOf } from './edge/cellError';
+import { substanceKey } from './edge/keys';
 import type { ArgSpec, BlockwiseSpec, Element, Table } from './edge/spec';
 import type { Settings } from './settings/settings';
 
@@ -181,7 +181,7 @@ class Carrier {
         received: `${words(from)} against a latent heat ${words(to)}`,
       });
     }
-    const { molarMass } = findSubstance(name);
+    const { molarMass } = substanceKey(name);
     return from === 'mass' ? molarMass : 1 / molarMass;
   }
 

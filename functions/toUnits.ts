@@ -1,8 +1,7 @@
-import { findSubstance } from '../core/catalogue/find';
 import { convert } from '../core/units/convert';
 import { unitOf } from '../core/units/unitOf';
 import { answer } from './edge/answer';
-import { textKey, wordOption } from './edge/keys';
+import { substanceKey, wordOption } from './edge/keys';
 import type { CellwiseSpec, Key, Plan } from './edge/spec';
 import type { Settings } from './settings/settings';
 
@@ -23,7 +22,7 @@ function plan([fromText, toText, substance]: readonly Key[], settings: Settings)
   const from = unitOf(textKey('from', fromText), undefined, 'from');
   const to = unitOf(textKey('to', toText), undefined, 'to');
   const as = wordOption(settings, 'kind', ['point', 'difference'], undefined);
-  const molarMass = substance === undefined ? undefined : findSubstance(textKey('substance', substance)).molarMass;
+  const molarMass = substance === undefined ? undefined : substanceKey(substance).molarMass;
   const needs = { molarMass, barometerPa: settings.barometerPa, as };
   return { compute: (value) => convert(value, from, to, needs) };
 }

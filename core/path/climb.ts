@@ -25,7 +25,13 @@ export function climb(a: Place, b: Place, ladder: Ladder): HeatStep[] {
   if (a.segment < b.segment || (a.segment === b.segment && a.enthalpy <= b.enthalpy)) return upward(a, b, ladder);
   return upward(b, a, ladder)
     .reverse()
-    .map(({ label, fromK, toK, heat }) => ({ label: DOWNWARD[label] ?? label, fromK: toK, toK: fromK, heat: -heat }));
+    .map(({ label, fromK, toK, heat }) => ({ label: downward(label), fromK: toK, toK: fromK, heat: -heat }));
+}
+
+/** `freezing` for fusion, `gamma-alpha` for alpha-gamma; a phase keeps its name. */
+function downward(label: string): string {
+  const at = label.indexOf('-');
+  return DOWNWARD[label] ?? (at < 0 ? label : `${label.slice(at + 1)}-${label.slice(0, at)}`);
 }
 
 function upward(a: Place, b: Place, ladder: Ladder): HeatStep[] {
@@ -54,8 +60,9 @@ function spanOf(segment: number, ladder: Ladder): { label: string; start: Point;
   const index = Math.floor(segment / 2);
   const gap = ladder.gaps[index];
   if (segment % 2 === 1) return { label: gap?.change ?? '', start: side(gap, 'below'), end: side(gap, 'above') };
+  const rung = ladder.rungs[index];
   return {
-    label: ladder.rungs[index]?.phase ?? '',
+    label: rung?.form === undefined ? (rung?.phase ?? '') : `${rung.phase} (${rung.form})`,
     start: side(ladder.gaps[index - 1], 'above'),
     end: side(gap, 'below'),
   };

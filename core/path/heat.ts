@@ -1,6 +1,6 @@
 import type { OutOfRange } from '../evaluate';
 import type { Substance } from '../substance';
-import { heatSteps } from './heatSteps';
+import { endsOf } from './heatSteps';
 import type { State } from './state';
 
 /**
@@ -26,5 +26,6 @@ export function heat(
   pressurePa: number,
   policy: OutOfRange = 'refuse',
 ): number {
-  return heatSteps(substance, from, to, pressurePa, policy).heat;
+  const [a, b] = endsOf(substance, from, to, pressurePa, policy);
+  return b.enthalpy - a.enthalpy;
 }

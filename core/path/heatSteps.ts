@@ -44,18 +44,26 @@ export function heatSteps(
   policy: OutOfRange = 'refuse',
 ): HeatPath {
   const ladder = substance.ladder(pressurePa);
-  const [a, b] = decided(
-    placeState(substance, from, pressurePa, policy),
-    placeState(substance, to, pressurePa, policy),
-    ladder,
-  );
+  const [a, b] = endsOf(substance, from, to, pressurePa, policy);
   const steps = staysInPhase(a, b) ? alongPhase(a, b) : between(joined(a, b, ladder), joined(b, a, ladder), ladder);
   return { steps, heat: b.enthalpy - a.enthalpy, marks: [...a.marks, ...b.marks], from: a, to: b, ladder };
 }
 
+/** Both ends of a path, an undecided one on the side of the other. */
+export function endsOf(
+  substance: Substance,
+  from: State,
+  to: State,
+  pressurePa: number,
+  policy: OutOfRange,
+): readonly [Place, Place] {
+  const a = placeState(substance, from, pressurePa, policy);
+  const b = placeState(substance, to, pressurePa, policy);
+  return a.undecided !== true && b.undecided !== true ? [a, b] : decided(a, b, substance.ladder(pressurePa));
+}
+
 /** Puts an end that lies on a transition on the side of the other end. */
 function decided(a: Place, b: Place, ladder: Ladder): [Place, Place] {
-  if (a.undecided !== true && b.undecided !== true) return [a, b];
   const gapOfA = transitionAt(ladder, a.temperatureK);
   if (a.undecided === true && b.undecided === true && gapOfA?.index === transitionAt(ladder, b.temperatureK)?.index) {
     throw new Problem({

@@ -123,10 +123,18 @@ function rungAt(
   if (first === undefined || last === undefined) {
     throw new Problem({ code: 'missing', subject: `paths of ${substance.name}`, reason: 'no phase at this pressure' });
   }
-  const index = ladder.rungs.findIndex((rung) => temperatureK <= rung.toK);
+  // what unit conversion leaves of a transition temperature does not fall off a rung that begins or ends there
+  const index = ladder.rungs.findIndex((rung) => temperatureK <= rung.toK + SAME_K);
   const rung = ladder.rungs[index];
-  if (rung !== undefined && temperatureK >= first.fromK) return { index, rung };
-  if (policy === 'extend' && temperatureK > last.toK) return { index: ladder.rungs.length - 1, rung: last };
+  if (rung !== undefined && temperatureK >= first.fromK - SAME_K) return { index, rung };
+  const known = last.toK > last.fromK;
+  if (policy === 'extend' && known && temperatureK > last.toK) return { index: ladder.rungs.length - 1, rung: last };
+  const lacking = temperatureK < first.fromK ? ladder.missingBelow : ladder.missingAbove;
+  if (lacking !== undefined) {
+    const side =
+      temperatureK < first.fromK ? `below ${shortNumber(first.fromK)} K` : `above ${shortNumber(last.toK)} K`;
+    throw new Problem({ code: 'missing', subject: lacking, reason: `not in the catalogue, so no path leads ${side}` });
+  }
   throw new Problem({
     code: 'range',
     argument: 'temperature',

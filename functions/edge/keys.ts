@@ -1,8 +1,15 @@
-import { findChange, findPhase, findSubstance, refused, type FoundChange } from '../../core/catalogue/find';
+import {
+  findChange,
+  findPhaseOf,
+  findSubstance,
+  refused,
+  type FoundChange,
+  type FoundPhase,
+} from '../../core/catalogue/find';
 import type { LatentKind } from '../../core/answer';
 import { Problem } from '../../core/problem';
 import { parseQuantity } from '../../core/units/parseQuantity';
-import type { Phase, Substance, Surface } from '../../core/substance';
+import type { Substance, Surface } from '../../core/substance';
 import type { Settings } from '../settings/settings';
 import type { Key } from './spec';
 
@@ -25,8 +32,8 @@ export function changeKey(substance: Substance, key: Key): FoundChange {
   return findChange(substance, textKey('change', key));
 }
 
-export function phaseKey(key: Key): Phase {
-  return findPhase(textKey('phase', key));
+export function phaseKey(substance: Substance, key: Key): FoundPhase {
+  return findPhaseOf(substance, textKey('phase', key));
 }
 
 /** An option that takes one word of a list. */
@@ -73,9 +80,10 @@ export function pressureOption(settings: Settings, kind: LatentKind): number | u
   return parseQuantity(text, 'pressure', settings).si;
 }
 
-const SURFACES = ['stable', 'ice', 'liquid'] as const;
+const SURFACES = ['stable', 'ice', 'solid', 'liquid'] as const;
 
 /** `surface=`: the phase below the vapour; the stable one unless forced. */
 export function surfaceOption(settings: Settings): Surface {
-  return wordOption(settings, 'surface', SURFACES, 'stable');
+  const word = wordOption(settings, 'surface', SURFACES, 'stable');
+  return word === 'solid' ? 'ice' : word;
 }

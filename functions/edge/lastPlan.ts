@@ -12,7 +12,12 @@ export interface LastPlan {
   readonly offsets: readonly number[];
 }
 
-const kept = new WeakMap<CellwiseSpec, LastPlan>();
+let kept = new WeakMap<CellwiseSpec, LastPlan>();
+
+/** Drops every kept plan: what a name means has changed. */
+export function forgetPlans(): void {
+  kept = new WeakMap();
+}
 
 export function lastPlanOf(spec: CellwiseSpec): LastPlan | undefined {
   return kept.get(spec);
