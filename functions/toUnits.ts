@@ -1,7 +1,7 @@
 import { convert } from '../core/units/convert';
 import { unitOf } from '../core/units/unitOf';
 import { answer } from './edge/answer';
-import { substanceKey, wordOption } from './edge/keys';
+import { substanceKey, textKey, wordOption } from './edge/keys';
 import type { CellwiseSpec, Key, Plan } from './edge/spec';
 import type { Settings } from './settings/settings';
 
