@@ -1,3 +1,4 @@
+import { benchCatalogue } from './benchCatalogue';
 import { benchCore } from './benchCore';
 import { benchFit } from './benchFit';
 import { benchFunctions } from './benchFunctions';
@@ -8,6 +9,7 @@ import { benchSizes } from './benchSizes';
 const PARTS: Readonly<Record<string, () => void | Promise<void>>> = {
   core: benchCore,
   functions: benchFunctions,
+  catalogue: benchCatalogue,
   fit: benchFit,
   sizes: benchSizes,
   grid: benchGrid,
