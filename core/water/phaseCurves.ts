@@ -9,9 +9,11 @@ import {
   COLDEST_VAPOUR_K,
   NEAREST_TO_CRITICAL_K,
   NEAR_CRITICAL_K,
+  NORMAL_PRESSURE_PA,
   STANDARD_PRESSURE_PA,
   TRIPLE_K,
 } from './ranges';
+import { sampled } from './sampledBranch';
 import { saturationAt } from './saturationLine';
 import { CRITICAL_PRESSURE_PA } from './saturationAuxiliary';
 import { R10_06, R6_95 } from './sources';
@@ -74,7 +76,34 @@ export function heatCapacityCurve(phase: Phase, at: number | 'saturated' | 'stan
     return { ...curve, kind: 'standard' };
   }
   requireNumber(at);
-  return branchCurve(phaseBranch(phase, at), `heat capacity of ${NAMES[phase]} at that pressure`, 'heatCapacity');
+  return at === NORMAL_PRESSURE_PA ? atOneAtmosphere(phase) : atPressure(phase, at);
+}
+
+function atPressure(phase: Phase, pressurePa: number): Curve {
+  return branchCurve(
+    phaseBranch(phase, pressurePa),
+    `heat capacity of ${NAMES[phase]} at that pressure`,
+    'heatCapacity',
+  );
+}
+
+/** Below this the heat capacity of supercooled water bends too sharply for pieces of even width. */
+const SMOOTH_FROM_K = 255;
+
+const normal = new Map<Phase, Curve>();
+
+/** One atmosphere is what most cells ask for: its curves are kept as series through their own values. */
+function atOneAtmosphere(phase: Phase): Curve {
+  let curve = normal.get(phase);
+  if (curve === undefined) {
+    const exact = atPressure(phase, NORMAL_PRESSURE_PA);
+    curve =
+      phase === 'solid'
+        ? exact
+        : { ...exact, at: sampled((t) => exact.at(t), Math.max(exact.from, SMOOTH_FROM_K), exact.to) };
+    normal.set(phase, curve);
+  }
+  return curve;
 }
 
 function requireNumber(pressurePa: number): void {
