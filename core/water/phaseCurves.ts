@@ -7,6 +7,7 @@ import { idealGasBranch, phaseBranch, type PhaseBranch } from './phaseBranch';
 import {
   COLDEST_LIQUID_K,
   COLDEST_VAPOUR_K,
+  HOTTEST_FLUID_K,
   NEAREST_TO_CRITICAL_K,
   NEAR_CRITICAL_K,
   NORMAL_PRESSURE_PA,
@@ -87,20 +88,24 @@ function atPressure(phase: Phase, pressurePa: number): Curve {
   );
 }
 
-/** Below this the heat capacity of supercooled water bends too sharply for pieces of even width. */
-const SMOOTH_FROM_K = 255;
+/** Outside these the heat capacity of supercooled or superheated liquid bends too sharply for pieces of even width. */
+const SMOOTH: Readonly<Record<'liquid' | 'gas', readonly [number, number]>> = {
+  liquid: [255, 560],
+  gas: [COLDEST_VAPOUR_K, HOTTEST_FLUID_K],
+};
 
 const normal = new Map<Phase, Curve>();
+
+function keptAsSeries(curve: Curve, [from, to]: readonly [number, number]): (temperatureK: number) => number {
+  return sampled((t) => curve.at(t), Math.max(curve.from, from), Math.min(curve.to, to));
+}
 
 /** One atmosphere is what most cells ask for: its curves are kept as series through their own values. */
 function atOneAtmosphere(phase: Phase): Curve {
   let curve = normal.get(phase);
   if (curve === undefined) {
     const exact = atPressure(phase, NORMAL_PRESSURE_PA);
-    curve =
-      phase === 'solid'
-        ? exact
-        : { ...exact, at: sampled((t) => exact.at(t), Math.max(exact.from, SMOOTH_FROM_K), exact.to) };
+    curve = phase === 'solid' ? exact : { ...exact, at: keptAsSeries(exact, SMOOTH[phase]) };
     normal.set(phase, curve);
   }
   return curve;
