@@ -60,3 +60,10 @@ export { fisherFAbove } from './statistics/fisherFAbove';
 export { studentTBelow } from './statistics/studentTBelow';
 export { studentTBothTails } from './statistics/studentTBothTails';
 export { studentTQuantile } from './statistics/studentTQuantile';
+
+export {
+  COMPOSITION_PARTS,
+  compositionHeatCapacity,
+  compositionPolynomial,
+  type Composition,
+} from './estimate/compositionHeatCapacity';
