@@ -2,9 +2,18 @@ import { Problem } from '../problem';
 import { kindWords } from './kindWords';
 import type { Unit } from './unit';
 
-/** How many times a molar quantity is the same quantity on the unit's basis: M, 1/M or 1, SI. */
+/**
+ * How many times a molar quantity is the same quantity on the unit's basis: M, 1/M or 1, SI.
+ *
+ * A molar mass of NaN says that none is known (a plant's own concentrate): such a material is counted in kilograms
+ * throughout, so that units of mass need no factor, and units of moles are refused.
+ */
 export function perMole(unit: Unit, molarMass: number | undefined): number {
-  if (unit.basis === 'mole') return 1;
+  if (Number.isNaN(molarMass) && unit.basis === 'mass') return 1;
+  if (unit.basis === 'mole') {
+    if (Number.isNaN(molarMass)) checkedMolarMass(molarMass, `for ${unit.symbol}`);
+    return 1;
+  }
   if (unit.basis === null) {
     throw new Problem({
       code: 'argument',
@@ -24,6 +33,7 @@ export function checkedMolarMass(molarMass: number | undefined, purpose: string)
     code: 'argument',
     argument: 'molar mass',
     allowed: `a positive number or a substance, ${purpose}`,
-    received: molarMass === undefined ? 'nothing' : String(molarMass),
+    received:
+      molarMass === undefined ? 'nothing' : Number.isNaN(molarMass) ? 'a material without one' : String(molarMass),
   });
 }

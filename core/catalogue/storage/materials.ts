@@ -1,0 +1,332 @@
+/** Publications that the figures were read in, by index. */
+export const STORAGE_SOURCES: readonly string[] = [
+  "B. E. Poling, J. M. Prausnitz, J. P. O'Connell, The Properties of Gases and Liquids, 5th ed. (2001), Appendix A",
+  'VDI Heat Atlas D3 and Yaws 2009, collated in Biswas et al., J. Chem. Inf. Model. 63 (2023), doi 10.1021/acs.jcim.3c00546',
+  'Yaws 2009 (experimental), collated in Biswas et al., J. Chem. Inf. Model. 63 (2023), doi 10.1021/acs.jcim.3c00546',
+  'B. Zalba, J. M. Marin, L. F. Cabeza, H. Mehling, Appl. Therm. Eng. 23 (2003) 251, from memory',
+  'G. A. Lane, Int. J. Ambient Energy 1 (1980) 155, from memory',
+  'heat-storage literature, from memory',
+];
+
+/** Liquid heat capacities are point values at these temperatures. */
+export const STORAGE_CP_SOURCE =
+  "point values at round temperatures, computed from Perry's Chemical Engineers' Handbook, 9th ed., Table 2-72";
+
+/** One material: what is not known is left out. */
+export interface StorageRecord {
+  readonly name: string;
+  readonly formula: string;
+  readonly cas: string;
+  readonly synonyms?: string;
+  /** g/mol */
+  readonly mass: number;
+  /** Melting temperature, K. */
+  readonly melts: number;
+  /** Heat of fusion, kJ/mol, or kJ/kg where it was published so. */
+  readonly molar?: number;
+  readonly perKg?: number;
+  /** Other published values of the same heat, in the same unit. */
+  readonly others?: readonly number[];
+  readonly source: number;
+  /** Liquid heat capacity, "K:J/(mol K)". */
+  readonly liquid?: string;
+  /** Standard uncertainty of the liquid heat capacity as a share, where it is not 1 %. */
+  readonly liquidShare?: number;
+  /** One value each from memory, kJ/(kg K), with the temperatures within which it is used, K, and its source. */
+  readonly solidCp?: readonly [value: number, fromK: number, toK: number, source: number];
+  readonly liquidCp?: readonly [value: number, fromK: number, toK: number, source: number];
+  readonly note?: string;
+}
+
+const ODD = 'a solid-solid change some 10 K below melting takes up further heat, which is not counted in';
+const INCONGRUENT = 'melts incongruently: part of it stays solid as a lower hydrate and settles';
+
+export const storageMaterials: readonly StorageRecord[] = [
+  {
+    name: 'n-tetradecane',
+    formula: 'C14H30',
+    cas: '629-59-4',
+    synonyms: 'tetradecane;paraffin C14',
+    mass: 198.388,
+    melts: 279.01,
+    molar: 45.61,
+    others: [45.074],
+    source: 0,
+    liquid: '279.01:428.3 300:439.4 340:462.6 380:488.6 420:517.3 460:548.8 500:583.0',
+  },
+  {
+    name: 'n-hexadecane',
+    formula: 'C16H34',
+    cas: '544-76-3',
+    synonyms: 'hexadecane;cetane;paraffin C16',
+    mass: 226.441,
+    melts: 291.32,
+    molar: 51.84,
+    others: [53.35162],
+    source: 0,
+    liquid: '291.32:496.0 320:514.7 360:542.6 400:572.7 440:605.1 480:639.6',
+  },
+  {
+    name: 'n-heptadecane',
+    formula: 'C17H36',
+    cas: '629-78-7',
+    synonyms: 'heptadecane;paraffin C17',
+    mass: 240.468,
+    melts: 295.13,
+    molar: 40.15849,
+    source: 1,
+    liquid: '295.13:530.0 320:547.6 360:577.2 400:608.7 440:642.1 480:677.3',
+    note: `${ODD} (about 11 kJ/mol, from memory)`,
+  },
+  {
+    name: 'n-octadecane',
+    formula: 'C18H38',
+    cas: '593-45-3',
+    synonyms: 'octadecane;paraffin C18',
+    mass: 254.494,
+    melts: 301.32,
+    molar: 61.39,
+    others: [61.71625],
+    source: 0,
+    liquid: '301.32:565.1 320:578.9 360:609.7 400:642.3 440:676.9 480:713.2',
+    solidCp: [1.9, 281.32, 301.32, 5],
+  },
+  {
+    name: 'n-nonadecane',
+    formula: 'C19H40',
+    cas: '629-92-5',
+    synonyms: 'nonadecane;paraffin C19',
+    mass: 268.521,
+    melts: 305.04,
+    molar: 45.811218,
+    others: [50.2],
+    source: 1,
+    liquid: '305.04:594.1 320:607.4 360:643.5 400:680.2 440:717.5 480:755.6',
+    note: ODD,
+  },
+  {
+    name: 'n-eicosane',
+    formula: 'C20H42',
+    cas: '112-95-8',
+    synonyms: 'eicosane;icosane;paraffin C20',
+    mass: 282.547,
+    melts: 309.95,
+    molar: 69.87,
+    others: [69.877088],
+    source: 0,
+    liquid: '309.95:623.3 320:632.8 360:670.9 400:709.6 440:749.0 480:789.1',
+    liquidShare: 0.02,
+  },
+  {
+    name: 'n-docosane',
+    formula: 'C22H46',
+    cas: '629-97-0',
+    synonyms: 'docosane;paraffin C22',
+    mass: 310.61,
+    melts: 317.55,
+    molar: 47.84,
+    source: 2,
+    note: 'a solid-solid change just below melting takes up further heat (about 28 kJ/mol, from memory), which is not counted in',
+  },
+  {
+    name: 'decanoic acid',
+    formula: 'C10H20O2',
+    cas: '334-48-5',
+    synonyms: 'capric acid',
+    mass: 172.265,
+    melts: 304.4,
+    molar: 27.99,
+    source: 2,
+    liquid: '304.4:354.9 320:366.8 360:399.6 400:435.5 440:474.6 480:516.9',
+  },
+  {
+    name: 'dodecanoic acid',
+    formula: 'C12H24O2',
+    cas: '143-07-7',
+    synonyms: 'lauric acid',
+    mass: 200.322,
+    melts: 316.9,
+    molar: 36.65,
+    source: 2,
+  },
+  {
+    name: 'tetradecanoic acid',
+    formula: 'C14H28O2',
+    cas: '544-63-8',
+    synonyms: 'myristic acid',
+    mass: 228.376,
+    melts: 327.55,
+    molar: 45.1,
+    source: 2,
+  },
+  {
+    name: 'hexadecanoic acid',
+    formula: 'C16H32O2',
+    cas: '57-10-3',
+    synonyms: 'palmitic acid',
+    mass: 256.43,
+    melts: 336.0,
+    molar: 54.935,
+    source: 2,
+  },
+  {
+    name: 'octadecanoic acid',
+    formula: 'C18H36O2',
+    cas: '57-11-4',
+    synonyms: 'stearic acid',
+    mass: 284.484,
+    melts: 342.75,
+    molar: 61.3,
+    source: 2,
+  },
+  {
+    name: '1-dodecanol',
+    formula: 'C12H26O',
+    cas: '112-53-8',
+    synonyms: 'dodecanol;lauryl alcohol',
+    mass: 186.339,
+    melts: 296.95,
+    molar: 40.2,
+    source: 2,
+  },
+  {
+    name: '1-tetradecanol',
+    formula: 'C14H30O',
+    cas: '112-72-1',
+    synonyms: 'tetradecanol;myristyl alcohol',
+    mass: 214.393,
+    melts: 311.0,
+    molar: 49.4,
+    source: 2,
+  },
+  {
+    name: 'biphenyl',
+    formula: 'C12H10',
+    cas: '92-52-4',
+    synonyms: 'diphenyl',
+    mass: 154.211,
+    melts: 342.35,
+    molar: 18.57,
+    source: 0,
+    liquid: '342.35:268.7 360:276.3 400:293.5 440:310.7 480:327.8',
+  },
+  {
+    name: 'urea',
+    formula: 'CH4N2O',
+    cas: '57-13-6',
+    synonyms: 'carbamide',
+    mass: 60.056,
+    melts: 406.45,
+    molar: 13.61,
+    source: 2,
+    note: 'decomposes slowly where it melts (common practice, no source)',
+  },
+  {
+    name: 'sorbitol',
+    formula: 'C6H14O6',
+    cas: '50-70-4',
+    synonyms: 'D-sorbitol;glucitol',
+    mass: 182.172,
+    melts: 370.85,
+    molar: 30.2,
+    source: 2,
+    note: 'forms with other melting temperatures exist',
+  },
+  {
+    name: 'erythritol',
+    formula: 'C4H10O4',
+    cas: '149-32-6',
+    mass: 122.12,
+    melts: 390.85,
+    perKg: 339.8,
+    source: 3,
+    solidCp: [1.38, 283.15, 303.15, 5],
+    liquidCp: [2.76, 390.85, 423.15, 5],
+    note: 'undercools strongly on freezing',
+  },
+  {
+    name: 'calcium chloride hexahydrate',
+    formula: 'CaCl2.6H2O',
+    cas: '7774-34-7',
+    mass: 219.08,
+    melts: 302.85,
+    perKg: 190.8,
+    others: [171],
+    source: 4,
+    solidCp: [1.42, 282.85, 302.85, 4],
+    liquidCp: [2.1, 302.85, 322.85, 4],
+  },
+  {
+    name: 'sodium sulfate decahydrate',
+    formula: 'Na2SO4.10H2O',
+    cas: '7727-73-3',
+    synonyms: 'Glauber salt;mirabilite;sodium sulphate decahydrate',
+    mass: 322.2,
+    melts: 305.55,
+    perKg: 254,
+    others: [251.1],
+    source: 3,
+    note: INCONGRUENT,
+  },
+  {
+    name: 'sodium acetate trihydrate',
+    formula: 'NaC2H3O2.3H2O',
+    cas: '6131-90-4',
+    synonyms: 'CH3COONa.3H2O',
+    mass: 136.08,
+    melts: 331.15,
+    perKg: 264,
+    others: [226],
+    source: 3,
+    note: `${INCONGRUENT}; undercools strongly`,
+  },
+  {
+    name: 'disodium hydrogen phosphate dodecahydrate',
+    formula: 'Na2HPO4.12H2O',
+    cas: '10039-32-4',
+    synonyms: 'sodium hydrogen phosphate dodecahydrate',
+    mass: 358.14,
+    melts: 308.65,
+    perKg: 265,
+    others: [279],
+    source: 3,
+    note: 'another entry of the same review says 40 degC',
+  },
+  {
+    name: 'sodium thiosulfate pentahydrate',
+    formula: 'Na2S2O3.5H2O',
+    cas: '10102-17-7',
+    synonyms: 'sodium thiosulphate pentahydrate',
+    mass: 248.18,
+    melts: 321.15,
+    perKg: 201,
+    source: 3,
+  },
+  {
+    name: 'magnesium nitrate hexahydrate',
+    formula: 'Mg(NO3)2.6H2O',
+    cas: '13446-18-9',
+    mass: 256.41,
+    melts: 362.15,
+    perKg: 162.8,
+    source: 3,
+  },
+  {
+    name: 'magnesium chloride hexahydrate',
+    formula: 'MgCl2.6H2O',
+    cas: '7791-18-6',
+    mass: 203.3,
+    melts: 390.15,
+    perKg: 168.6,
+    source: 3,
+  },
+  {
+    name: 'barium hydroxide octahydrate',
+    formula: 'Ba(OH)2.8H2O',
+    cas: '12230-71-6',
+    mass: 315.46,
+    melts: 351.15,
+    perKg: 265.7,
+    source: 3,
+  },
+];
