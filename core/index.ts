@@ -67,3 +67,16 @@ export {
   compositionPolynomial,
   type Composition,
 } from './estimate/compositionHeatCapacity';
+export { acentricLatent } from './estimate/acentricLatent';
+export { atomsOf } from './estimate/atomsOf';
+export type { BoilingPoint } from './estimate/boilingPoint';
+export { chenLatent } from './estimate/chenLatent';
+export { chickosDifference } from './estimate/chickosDifference';
+export { chickosLatent, type ChickosInput } from './estimate/chickosLatent';
+export { kistiakowskyLatent } from './estimate/kistiakowskyLatent';
+export { koppHeatCapacity } from './estimate/koppHeatCapacity';
+export { neumannHeatCapacity, type Constituent } from './estimate/neumannHeatCapacity';
+export { riedelLatent } from './estimate/riedelLatent';
+export { troutonLatent } from './estimate/troutonLatent';
+export { vetereLatent } from './estimate/vetereLatent';
+export { watsonLatent, type WatsonInput } from './estimate/watsonLatent';
