@@ -1,4 +1,5 @@
 import { FluentProvider, makeStyles, tokens } from '@fluentui/react-components';
+import { lazy, Suspense } from 'react';
 import type { WorkbookHost } from '../port';
 import { FitSection } from './fit/FitSection';
 import { Footer } from './look/Footer';
@@ -7,6 +8,14 @@ import { Sections } from './look/Sections';
 import { StaleNotice } from './look/StaleNotice';
 import { useTheme } from './look/useTheme';
 import { UnitsSection } from './units/UnitsSection';
+
+/** Fetched when it is first shown: the pane does not wait for it. */
+const SubstancesSection = lazy(() =>
+  import('./substances/SubstancesSection').then(
+    (module) => ({ default: module.SubstancesSection }),
+    () => ({ default: () => <p>The substances could not be fetched. Close the pane and open it again.</p> }),
+  ),
+);
 
 const useStyles = makeStyles({
   page: {
@@ -36,6 +45,16 @@ export function Pane({ host }: { readonly host: WorkbookHost }) {
           sections={[
             { id: 'units', label: 'Units', content: <UnitsSection host={host} /> },
             { id: 'fit', label: 'ΔCp fit', content: <FitSection host={host} /> },
+            {
+              id: 'substances',
+              label: 'Substances',
+              late: true,
+              content: (
+                <Suspense fallback={<p>Fetching the substances…</p>}>
+                  <SubstancesSection host={host} />
+                </Suspense>
+              ),
+            },
           ]}
         />
         <Footer />

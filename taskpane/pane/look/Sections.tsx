@@ -5,6 +5,8 @@ export interface SectionSpec {
   readonly id: string;
   readonly label: string;
   readonly content: ReactNode;
+  /** True for a section that is made when it is first shown, so that the pane does not wait for it. */
+  readonly late?: boolean;
 }
 
 const useStyles = makeStyles({
@@ -62,7 +64,12 @@ export function Sections({ sections }: { readonly sections: readonly SectionSpec
   const styles = useStyles();
   const base = useId();
   const tabs = useRef<HTMLDivElement>(null);
-  const [shown, show] = useState(0);
+  const [shown, setShown] = useState(0);
+  const [visited, setVisited] = useState<ReadonlySet<number>>(new Set());
+  const show = (place: number) => {
+    setShown(place);
+    setVisited((before) => new Set(before).add(place));
+  };
   const onKeyDown = (event: KeyboardEvent) => {
     const next = nextPlace(event.key, shown, sections.length);
     if (next === undefined) return;
@@ -89,7 +96,7 @@ export function Sections({ sections }: { readonly sections: readonly SectionSpec
           </button>
         ))}
       </div>
-      {sections.map(({ id, content }, place) => (
+      {sections.map(({ id, content, late }, place) => (
         <div
           key={id}
           className={styles.panel}
@@ -98,7 +105,7 @@ export function Sections({ sections }: { readonly sections: readonly SectionSpec
           aria-labelledby={`${base}-tab-${id}`}
           hidden={place !== shown}
         >
-          {content}
+          {(late !== true || visited.has(place)) && content}
         </div>
       ))}
     </>

@@ -1,0 +1,206 @@
+import { Badge, Button, Field, Input, Select } from '@fluentui/react-components';
+import { useMemo, useState } from 'react';
+import { plainWords } from '../../../core/problem';
+import type { Substance } from '../../../core/substance';
+import type { Settings } from '../../../functions/settings/settings';
+import type { WorkbookHost } from '../../port';
+import { number } from '../look/number';
+import { useLook } from '../look/useLook';
+import { crossings } from './diagram/crossings';
+import { Diagram } from './diagram/Diagram';
+import { diagramOf } from './diagram/diagramOf';
+import { diagramRows } from './diagram/diagramRows';
+import { DiagramTable } from './diagram/DiagramTable';
+import { niceStep, onStep } from './diagram/niceStep';
+import { sliderWords } from './diagram/sliderWords';
+import { TemperatureSlider } from './diagram/TemperatureSlider';
+import { Facts } from './facts/Facts';
+import { stateWords } from './facts/stateWords';
+import { onScale, unitWriter, written } from './facts/unitWriter';
+import { useInsert } from './insert/useInsert';
+import { Constants } from './known/Constants';
+import { DisagreementLine } from './known/DisagreementLine';
+import { Known } from './known/Known';
+import { QuantityField } from './QuantityField';
+import { ATMOSPHERE_PA, useCard } from './useCard';
+
+export interface SubstanceCardProps {
+  readonly host: WorkbookHost;
+  readonly substance: Substance;
+  readonly settings: Settings;
+  readonly withoutUnits: boolean;
+}
+
+/** One substance: its diagram with a movable temperature, the numbers there, and what stands behind them. */
+export function SubstanceCard({ host, substance, settings, withoutUnits }: SubstanceCardProps) {
+  const look = useLook();
+  const card = useCard(substance);
+  const { ladder, pressurePa, temperatureK, window } = card;
+  const writer = useMemo(() => unitWriter(settings, substance.molarMass), [settings, substance]);
+  const [cell, setCell] = useState('');
+  const { temperature, pressure, decimal } = writer;
+  const pressureText = `${plain(onScale(pressurePa, pressure), decimal)} ${settings.units.pressure.symbol}`;
+  const inserting = useInsert(
+    host,
+    {
+      temperature: onScale(temperatureK, temperature),
+      pressure: { value: onScale(pressurePa, pressure), text: pressureText, usual: pressurePa === ATMOSPHERE_PA },
+    },
+    cell,
+    withoutUnits,
+  );
+  const diagram = useMemo(
+    () => (ladder === undefined ? undefined : diagramOf(substance, ladder, window)),
+    [substance, ladder, window],
+  );
+  const here = useMemo(
+    () => (ladder === undefined ? [] : crossings(substance, ladder, temperatureK)),
+    [substance, ladder, temperatureK],
+  );
+  const step = niceStep(Math.abs(temperature.scale) * (window.toK - window.fromK), 200);
+  const stepBy = (steps: number) => {
+    const shown = onStep(onScale(temperatureK, temperature) + steps * step, step);
+    card.goTo(Math.max(0, (shown - temperature.offset) / temperature.scale));
+  };
+  const shownTemperature = written(temperatureK, temperature, decimal);
+  return (
+    <article className={look.stack} aria-label={substance.name}>
+      <header className={look.tight}>
+        <h3 className={look.title}>
+          {substance.name} {substance.group === 'house' && <Badge appearance="outline">house</Badge>}
+        </h3>
+        <p className={look.quiet}>
+          {[substance.formula, substance.cas === '' ? '' : `CAS ${substance.cas}`, substance.group]
+            .filter((word) => word !== '')
+            .join(' · ')}
+          {substance.synonyms.length > 0 && <>. Also {substance.synonyms.join(', ')}</>}
+        </p>
+      </header>
+      <div className={look.pair}>
+        <QuantityField
+          label="Temperature"
+          kind="temperature"
+          settings={settings}
+          scale={temperature}
+          si={temperatureK}
+          onValue={card.goTo}
+          onStep={stepBy}
+        />
+        <QuantityField
+          label="Pressure"
+          kind="pressure"
+          settings={settings}
+          scale={pressure}
+          si={pressurePa}
+          onValue={card.setPressure}
+        />
+      </div>
+      {ladder !== undefined && ladder.gaps.length > 1 && (
+        <Field label="Part of the diagram">
+          <Select
+            className={look.narrow}
+            value={card.around === undefined ? '' : String(card.around)}
+            onChange={(_, { value }) => card.setAround(value === '' ? undefined : Number(value))}
+          >
+            <option value="">all changes</option>
+            {ladder.gaps.map(({ change, temperatureK: at }, place) => (
+              <option key={place} value={place}>
+                around {change}, {written(at, temperature, decimal)}
+              </option>
+            ))}
+          </Select>
+        </Field>
+      )}
+      {card.problem !== undefined && <p className={look.text}>No diagram: {plainWords(card.problem, writer.words)}.</p>}
+      {ladder !== undefined && diagram !== undefined && (
+        <figure className={look.tight} style={{ margin: 0 }}>
+          <Diagram
+            name={substance.name}
+            diagram={diagram}
+            crossings={here}
+            writer={writer}
+            temperatureK={temperatureK}
+            step={step}
+            onTemperature={card.setTemperature}
+          />
+          <TemperatureSlider
+            window={window}
+            temperatureK={temperatureK}
+            scale={temperature}
+            step={step}
+            words={sliderWords(ladder, here, temperatureK, writer)}
+            onTemperature={card.setTemperature}
+          />
+          <div className={look.row} role="group" aria-label="Go to a change">
+            {ladder.gaps.map(({ change, temperatureK: at }, place) => (
+              <Button key={place} size="small" type="button" onClick={() => card.goTo(at)}>
+                {change} {written(at, temperature, decimal)}
+              </Button>
+            ))}
+          </div>
+          <figcaption className={look.quiet}>
+            The slope of a line is a heat capacity, in {writer.heatCapacity.unit}; a gap between two lines is a heat of
+            change, in {writer.heat.unit}. All at {written(pressurePa, pressure, decimal)}, so the gaps here are of the
+            isobaric kind. Dashed: followed where it is not the stable phase. Zero of h: {substance.enthalpyReference}.
+          </figcaption>
+          <details>
+            <summary className={look.summary}>The diagram as a table</summary>
+            <DiagramTable rows={diagramRows(ladder)} writer={writer} />
+          </details>
+        </figure>
+      )}
+      <h4 className={look.subtitle}>At {shownTemperature}</h4>
+      <p className={look.text} data-testid="state">
+        {ladder === undefined ? '' : stateWords(ladder, temperatureK, writer)}
+      </p>
+      <Field
+        label="Temperature in formulas"
+        hint={`The number shown, ${number(onScale(temperatureK, temperature), decimal)}, when left blank; or a cell, as A2`}
+      >
+        <Input
+          className={look.narrow}
+          input={{ style: { minWidth: 0, width: '100%' }, spellCheck: false, autoComplete: 'off' }}
+          value={cell}
+          onChange={(_, { value }) => setCell(value)}
+        />
+      </Field>
+      <Facts
+        substance={substance}
+        temperatureK={temperatureK}
+        pressurePa={pressurePa}
+        settings={settings}
+        writer={writer}
+        inserting={inserting}
+      />
+      <h4 className={look.subtitle}>Constants</h4>
+      <Constants substance={substance} writer={writer} inserting={inserting} />
+      <h4 className={look.subtitle}>What is known, and where from</h4>
+      <Known substance={substance} pressurePa={pressurePa} writer={writer} />
+      <DisagreementLine substance={substance} writer={writer} />
+      {substance.notes.length > 0 && (
+        <>
+          <h4 className={look.subtitle}>Good to know</h4>
+          <ul className={look.list}>
+            {substance.notes.map((note) => (
+              <li key={note}>{note}</li>
+            ))}
+          </ul>
+        </>
+      )}
+      {substance.lambdaPoints !== undefined && substance.lambdaPoints.length > 0 && (
+        <p className={look.text}>
+          {substance.lambdaPoints
+            .map((point) => `${point.name} at ${written(point.temperatureK, temperature, decimal)}`)
+            .join(', ')}
+          : the heat capacity peaks there, and there is no latent heat.
+        </p>
+      )}
+    </article>
+  );
+}
+
+/** A number for a setting: all its digits, with the workbook's decimal separator. */
+function plain(value: number, decimal: '.' | ','): string {
+  const text = Number(value.toPrecision(12)).toString();
+  return decimal === ',' ? text.replace('.', ',') : text;
+}

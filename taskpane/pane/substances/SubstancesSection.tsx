@@ -1,0 +1,52 @@
+import { useState } from 'react';
+import type { CatalogueEntry } from '../../../core/substance';
+import type { WorkbookHost } from '../../port';
+import { Notice } from '../look/Notice';
+import { useLook } from '../look/useLook';
+import { settingsOf, useStore } from '../units/useUnits';
+import { SubstanceSearch } from './search/SubstanceSearch';
+import { SubstanceCard } from './SubstanceCard';
+import { useRegistry } from './useRegistry';
+
+/** Every substance that formulas know, the team's own among them, with a card for the one that is chosen. */
+export function SubstancesSection({ host }: { readonly host: WorkbookHost }) {
+  const look = useLook();
+  const store = useStore();
+  const settings = settingsOf(store);
+  const { registry, faults } = useRegistry();
+  const [name, setName] = useState<string>();
+  const chosen = registry.entries.find((entry) => entry.name === name);
+  const choose = (entry: CatalogueEntry) => setName(entry.name);
+  return (
+    <div className={look.stack}>
+      <h2 className={look.title}>Substances</h2>
+      {faults.length > 0 && (
+        <Notice tone="caution">
+          <span>Rows of the Substances sheet that can’t be read; everything else works:</span>
+          <ul className={look.list}>
+            {faults.map(({ cell, message }) => (
+              <li key={cell}>
+                {cell}: {message}
+              </li>
+            ))}
+          </ul>
+        </Notice>
+      )}
+      <SubstanceSearch entries={registry.entries} chosen={chosen} onChoose={choose} />
+      {chosen !== undefined && settings === undefined && (
+        <Notice tone="error">
+          The unit settings of the workbook can’t be read. Repair them in the section Units first.
+        </Notice>
+      )}
+      {chosen !== undefined && settings !== undefined && (
+        <SubstanceCard
+          key={chosen.name}
+          host={host}
+          substance={chosen.make()}
+          settings={settings}
+          withoutUnits={store.state === 'absent'}
+        />
+      )}
+    </div>
+  );
+}

@@ -1,0 +1,97 @@
+import { number } from '../../look/number';
+import type { UnitWriter } from '../facts/unitWriter';
+import { onScale } from '../facts/unitWriter';
+import type { Diagram, DiagramLine } from './diagramOf';
+import { pixelX, pixelY, type Frame } from './frame';
+import { placeLabels, type LabelPlace, type PlacedLabel, type WantedLabel } from './placeLabels';
+
+/** Pixels between a label and what it names. */
+const OFF = 9;
+
+interface Pixel {
+  readonly x: number;
+  readonly y: number;
+}
+
+/** The names in the picture: transitions with their latent heats, phases with their mean slopes, dashed continuations. */
+export function labelsOf(diagram: Diagram, frame: Frame, writer: UnitWriter): PlacedLabel[] {
+  const { temperature, heat, heatCapacity, decimal } = writer;
+  const at = (temperatureK: number, enthalpy: number): Pixel => ({
+    x: pixelX(frame, onScale(temperatureK, temperature)),
+    y: pixelY(frame, onScale(enthalpy, heat)),
+  });
+  const pixels = (line: DiagramLine) => line.points.map((point) => at(point.temperatureK, point.enthalpy));
+  const gaps = diagram.gaps.map(({ change, temperatureK, below, above }): WantedLabel => {
+    const middle = at(temperatureK, (below + above) / 2);
+    return {
+      text: `${change} ${number(Number(((above - below) * heat.scale).toPrecision(4)), decimal)}`,
+      role: 'transition',
+      places: besideGap(middle, Math.abs(at(temperatureK, above).y - at(temperatureK, below).y) / 2),
+    };
+  });
+  const phase = (line: DiagramLine): WantedLabel => {
+    const slope = meanSlope(line);
+    const digits =
+      slope === undefined ? '' : `, ${number(Number((slope * heatCapacity.scale).toPrecision(3)), decimal)}`;
+    return {
+      text: line.stable ? `${line.name}${digits}` : line.name,
+      role: line.stable ? 'phase' : 'beyond',
+      places: alongLine(pixels(line)),
+    };
+  };
+  const drawn = [
+    ...diagram.lines.flatMap((line) => between(pixels(line))),
+    ...diagram.gaps.flatMap((gap) => between([at(gap.temperatureK, gap.below), at(gap.temperatureK, gap.above)], 12)),
+  ];
+  const lines = [...diagram.lines].sort((a, b) => Number(b.stable) - Number(a.stable));
+  return placeLabels(
+    [...gaps, ...lines.map(phase)],
+    {
+      left: frame.left + 2,
+      right: frame.width - 2,
+      top: frame.top,
+      bottom: frame.height - frame.bottom,
+    },
+    drawn,
+  );
+}
+
+/** Mean slope over what is shown, J/(mol K). */
+function meanSlope({ points }: DiagramLine): number | undefined {
+  const [first, last] = [points[0], points.at(-1)];
+  if (first === undefined || last === undefined || last.temperatureK === first.temperatureK) return undefined;
+  return (last.enthalpy - first.enthalpy) / (last.temperatureK - first.temperatureK);
+}
+
+function besideGap({ x, y }: Pixel, half: number): LabelPlace[] {
+  const heights = [0, 0.5 * half, -0.5 * half, half + OFF, -half - OFF, half + 2 * OFF, -half - 2 * OFF];
+  return heights.flatMap((up) => [
+    { x: x + OFF, y: y - up, anchor: 'start' as const },
+    { x: x - OFF, y: y - up, anchor: 'end' as const },
+  ]);
+}
+
+/** Above and below the line, at its middle, its quarters and its ends. */
+function alongLine(points: readonly Pixel[]): LabelPlace[] {
+  return [0.5, 0.3, 0.7, 0.12, 0.88].flatMap((share) => {
+    const point = points[Math.round(share * (points.length - 1))];
+    if (point === undefined) return [];
+    return [1.3, -1.3, 2.2, -2.2, 3.4, -3.4].flatMap((off) => [
+      { x: point.x, y: point.y + off * OFF, anchor: 'middle' as const },
+      { x: point.x - 4, y: point.y + off * OFF, anchor: 'end' as const },
+      { x: point.x + 4, y: point.y + off * OFF, anchor: 'start' as const },
+    ]);
+  });
+}
+
+/** Points close enough along a polyline that no label slips between two of them. */
+function between(points: readonly Pixel[], steps = 4): Pixel[] {
+  return points.flatMap((point, i) => {
+    const next = points[i + 1];
+    if (next === undefined) return [point];
+    return Array.from({ length: steps }, (_, k) => ({
+      x: point.x + ((next.x - point.x) * k) / steps,
+      y: point.y + ((next.y - point.y) * k) / steps,
+    }));
+  });
+}

@@ -1,0 +1,90 @@
+import type { QuantityWriter } from '../../../../core/problem';
+import { fromMolar } from '../../../../core/units/fromMolar';
+import { fromSi } from '../../../../core/units/fromSi';
+import type { Linear } from '../../../../core/units/linear';
+import type { Unit } from '../../../../core/units/unit';
+import type { Settings } from '../../../../functions/settings/settings';
+import { number, prettyUnit } from '../../look/number';
+import { roundToUncertainty } from '../../look/roundToUncertainty';
+
+/** A conversion from SI and the unit it leads to, as a person reads it. */
+export interface Scale extends Linear {
+  readonly unit: string;
+}
+
+/** From SI to the workbook's units, for one substance. */
+export interface UnitWriter {
+  readonly temperature: Scale;
+  readonly pressure: Scale;
+  readonly heat: Scale;
+  readonly heatCapacity: Scale;
+  readonly decimal: '.' | ',';
+  /** Writes temperatures and pressures inside the words of a refusal. */
+  readonly words: QuantityWriter;
+}
+
+/** Compiles the conversions. @throws Problem where a unit per mass is asked of a substance without a molar mass */
+export function unitWriter(settings: Settings, molarMass: number): UnitWriter {
+  const { units, decimal } = settings;
+  const scaled = (linear: Linear, { symbol }: Unit): Scale => ({ ...linear, unit: prettyUnit(symbol) });
+  const temperature = scaled(fromSi(units.temperature), units.temperature);
+  const pressure = scaled(fromSi(units.pressure, settings.barometerPa), units.pressure);
+  return {
+    temperature,
+    pressure,
+    heat: scaled(fromMolar(units.heat, molarMass), units.heat),
+    heatCapacity: scaled(fromMolar(units.heatCapacity, molarMass), units.heatCapacity),
+    decimal,
+    words: {
+      temperature: (kelvin) => written(kelvin, temperature, decimal),
+      pressure: (pascal) => written(pascal, pressure, decimal),
+    },
+  };
+}
+
+/** An SI value with its unit, six significant digits. */
+export function written(si: number, scale: Scale, decimal: '.' | ','): string {
+  return `${number(onScale(si, scale), decimal)} ${scale.unit}`;
+}
+
+export function onScale(si: number, { scale, offset }: Linear): number {
+  return scale * si + offset;
+}
+
+/** The scale that a number of the core is shown on; `undefined` for units that have no setting. */
+export function scaleFor(unit: string, writer: UnitWriter): Scale | undefined {
+  switch (unit) {
+    case 'J/mol':
+      return writer.heat;
+    case 'J/(mol K)':
+      return writer.heatCapacity;
+    case 'Pa':
+      return writer.pressure;
+    case 'K':
+      return writer.temperature;
+    case 'kg/mol':
+      return { scale: 1000, offset: 0, unit: 'g/mol' };
+    default:
+      return undefined;
+  }
+}
+
+/** A value as it is shown, with two digits of its standard uncertainty where it has one, and all its digits. */
+export interface WrittenValue {
+  readonly text: string;
+  readonly unit: string;
+  readonly full: string;
+}
+
+/** Writes an SI value and its standard uncertainty in the workbook's units. */
+export function writeValue(
+  si: { readonly value: number; readonly unit: string; readonly uncertainty?: number | undefined },
+  writer: UnitWriter,
+): WrittenValue {
+  const scale = scaleFor(si.unit, writer) ?? { scale: 1, offset: 0, unit: si.unit === '1' ? '' : si.unit };
+  const u = si.uncertainty === undefined ? undefined : Math.abs(scale.scale) * si.uncertainty;
+  const { text, full } = roundToUncertainty(onScale(si.value, scale), u);
+  const plusMinus = u === undefined || !(u > 0) ? '' : ` ± ${roundToUncertainty(u, u).text}`;
+  const local = (digits: string) => (writer.decimal === ',' ? digits.replace(/\./g, ',') : digits);
+  return { text: local(text + plusMinus), unit: prettyUnit(scale.unit), full: local(full) };
+}
