@@ -88,7 +88,8 @@ describe('cited data of the fluids', () => {
         if (found !== true) strays.push(`${name}: ${printed[0]}`);
       }
     }
-    expect(FLUID_CHECK_ROWS).toHaveLength(records.fluids.length);
+    // Mercury and iodine are checked with the condensed substances.
+    expect(FLUID_CHECK_ROWS).toHaveLength(records.fluids.length - 2);
     expect(strays).toEqual([]);
   });
 });

@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { heat } from '../../../core/path/heat';
 import { plainWords, Problem } from '../../../core/problem';
 import type { Curve, Substance } from '../../../core/substance';
-import { ask, ATMOSPHERE, placesIn, seeded, substances, tours } from './tour';
+import { ask, ATMOSPHERE, KINDS, placesOn, seeded, substances, tours } from './tour';
 
 /** Fourth-order central difference; truncation h^4 f^(5)/30, rounding some eps f/h. */
 function derivative(curve: Curve, t: number, h: number): number {
@@ -19,8 +19,10 @@ describe('every curve of every substance', () => {
     const wrong: string[] = [];
     for (const { what, curve } of tours.flatMap(({ curves }) => curves)) {
       if (!(curve.from <= curve.to)) wrong.push(`${what}: range ${curve.from} to ${curve.to}`);
-      for (const x of placesIn(curve.from, curve.to, 25, draw)) {
-        if (!Number.isFinite(curve.at(x))) wrong.push(`${what}: ${curve.at(x)} at ${x}`);
+      for (const x of placesOn(curve, 25, draw)) {
+        if (Number.isFinite(curve.at(x))) continue;
+        wrong.push(`${what}: ${curve.at(x)} at ${x}`);
+        break;
       }
     }
     expect(wrong).toEqual([]);
@@ -30,9 +32,11 @@ describe('every curve of every substance', () => {
     const draw = seeded(2);
     const wrong: string[] = [];
     for (const { what, curve } of tours.flatMap(({ curves }) => curves)) {
-      for (const x of placesIn(curve.from, curve.to, 5, draw)) {
+      for (const x of placesOn(curve, 5, draw)) {
         const u = curve.uncertaintyAt?.(x);
-        if (u !== undefined && !(u >= 0 && Number.isFinite(u))) wrong.push(`${what}: uncertainty ${u} at ${x}`);
+        if (u === undefined || (u >= 0 && Number.isFinite(u))) continue;
+        wrong.push(`${what}: uncertainty ${u} at ${x}`);
+        break;
       }
     }
     expect(wrong).toEqual([]);
@@ -56,9 +60,11 @@ describe('every curve of every substance', () => {
     const wrong: string[] = [];
     for (const { pairs } of tours) {
       for (const { what, latent } of pairs) {
-        for (const x of placesIn(latent.from, latent.to, 10, draw)) {
+        for (const x of placesOn(latent, 10, draw)) {
           const metastable = latent.marksAt?.(x).some(({ code }) => code === 'metastable') ?? false;
-          if (!metastable && !(latent.at(x) >= 0)) wrong.push(`${what}: ${latent.at(x)} J/mol at ${x} K`);
+          if (metastable || latent.at(x) >= 0) continue;
+          wrong.push(`${what}: ${latent.at(x)} J/mol at ${x} K`);
+          break;
         }
       }
     }
@@ -70,7 +76,7 @@ describe('every curve of every substance', () => {
     const wrong: string[] = [];
     for (const { what, curve } of tours.flatMap(({ curves }) => curves)) {
       if (!what.includes(' cp ')) continue;
-      for (const x of placesIn(curve.from, curve.to, 10, draw)) {
+      for (const x of placesOn(curve, 10, draw)) {
         // Third law: nothing at 0 K itself.
         if (x > 0 && !(curve.at(x) > 0)) wrong.push(`${what}: ${curve.at(x)} at ${x} K`);
       }
@@ -89,16 +95,20 @@ describe('the slope of a latent heat', () => {
       if (to - from < 1) continue;
       // Near a critical point latent heats run into it like a power below one: no difference quotient holds there.
       const margin = 0.03 * (to - from);
-      const h = Math.min(margin / 4, 1e-3 * to);
+      const h = Math.min(margin / 4, 2e-4 * to);
+      let smooth = 0;
       for (let i = 0; i < 12; i++) {
         const t = from + margin + (to - from - 2 * margin) * draw();
         const expected = derivative(latent, t, h);
         const scale = Math.abs(expected) + Math.abs(latent.at(t)) / t;
-        if (Math.abs(slope.at(t) - expected) > 2e-4 * scale) {
-          wrong.push(`${what} at ${number(t)} K: slope ${number(slope.at(t))}, difference ${number(expected)}`);
-          break;
-        }
+        // A crystal form changes, or a polynomial ends, within the stencil: there is a jump or a corner, and no derivative.
+        if (Math.abs(derivative(latent, t, h / 3) - expected) > 1e-5 * scale) continue;
+        smooth++;
+        if (Math.abs(slope.at(t) - expected) <= 2e-5 * scale) continue;
+        wrong.push(`${what} at ${number(t)} K: slope ${number(slope.at(t))}, difference ${number(expected)}`);
+        break;
       }
+      if (smooth < 6) wrong.push(`${what}: smooth at ${smooth} of 12 places only`);
     }
     expect(wrong).toEqual([]);
   });
@@ -121,7 +131,10 @@ describe('the saturation line', () => {
       for (let i = 1; i <= 400; i++) {
         const t = p.from + ((p.to - p.from) * i) / 400;
         const next = p.at(t);
-        if (!(next > last)) wrong.push(`${what}: ${last} Pa, then ${next} Pa at ${t} K`);
+        if (!(next > last)) {
+          wrong.push(`${what}: ${last} Pa, then ${next} Pa at ${t} K`);
+          break;
+        }
         last = next;
       }
     }
@@ -136,10 +149,12 @@ describe('the saturation line', () => {
         wrong.push(`${what}: no way back`);
         continue;
       }
-      for (const x of placesIn(p.from, p.to, 20, draw)) {
+      for (const x of placesOn(p, 20, draw)) {
         const pressure = Math.min(Math.max(p.at(x), t.from), t.to);
         // 1e-9 of T from the solver, and what the ends of the range leave of the pressure.
-        if (Math.abs(t.at(pressure) - x) > 1e-8 * x) wrong.push(`${what} at ${x} K: back at ${t.at(pressure)} K`);
+        if (Math.abs(t.at(pressure) - x) <= 1e-8 * x) continue;
+        wrong.push(`${what} at ${x} K: back at ${t.at(pressure)} K`);
+        break;
       }
     }
     expect(wrong).toEqual([]);
@@ -286,13 +301,15 @@ describe('what is missing is said, never guessed', () => {
     expect(wrong).toEqual([]);
   });
 
-  it('every change listed has a latent heat, of its default kind, at its own temperature', () => {
+  it('every change listed has a latent heat, of its default kind or else of one that is named, at its own temperature', () => {
     const wrong: string[] = [];
     for (const substance of substances) {
       for (const change of substance.changes) {
         const latent = ask(() => substance.latent(change, substance.defaultKind(change)));
         if (latent instanceof Problem) {
-          wrong.push(`${substance.name} ${change}: ${latent.message}`);
+          // A vapour that associates: the step to the single molecules may be all that is known, and is named.
+          const some = KINDS.some((kind) => !(ask(() => substance.latent(change, kind)) instanceof Problem));
+          if (!some || !/kind=/.test(latent.message)) wrong.push(`${substance.name} ${change}: ${latent.message}`);
           continue;
         }
         const at = substance.transitionTemperature(change);

@@ -94,7 +94,10 @@ export function seeded(seed: number): () => number {
   };
 }
 
-/** `count` places in [from, to] with both ends. */
-export function placesIn(from: number, to: number, count: number, draw: () => number): number[] {
-  return [from, to, ...Array.from({ length: count }, () => from + (to - from) * draw())];
+/** `count` places on a curve's range with both ends; on a pressure axis evenly in its logarithm. */
+export function placesOn({ axis, from, to }: Curve, count: number, draw: () => number): number[] {
+  const even = axis === 'temperature' || !(from > 0);
+  const place = (share: number): number => (even ? from + (to - from) * share : from * (to / from) ** share);
+  const inside = Array.from({ length: count }, () => Math.min(Math.max(place(draw()), from), to));
+  return [from, to, ...inside];
 }
