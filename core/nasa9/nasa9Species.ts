@@ -13,6 +13,9 @@ const KINDS: Readonly<Record<string, readonly [Nasa9Species['phase'], number]>> 
   bent: ['gas', 4],
 };
 
+/** A crystal form that begins above this is a hot one: below its range it is metastable and keeps its heat capacity, K. */
+const COLD_K = 300;
+
 const read = new Map<string, Nasa9Species>();
 
 /**
@@ -61,7 +64,7 @@ function unpacked(name: string, packed: string): Nasa9Species {
     fromK,
     toK: last.toK,
     releaseFromK: release === '' ? fromK : Number(release),
-    low: lowTail(fromK, cpOverR(first, fromK), slope, floor),
+    low: lowTail(fromK, cpOverR(first, fromK), slope, fromK > COLD_K ? NaN : floor),
   };
 }
 

@@ -27,12 +27,16 @@ function shortComment(comment) {
     .trim();
 }
 
+/** Entries that are one form under two names, split where nothing happens. */
+const ONE_FORM = new Map([['KOH(a)', 'KOH(b)']]);
+
 /** Parts of one form, split at a second-order point, become one species. */
 function joined(species) {
   const byName = new Map();
   for (const part of species) {
-    const known = byName.get(part.name);
-    if (known === undefined) byName.set(part.name, { ...part, intervals: [...part.intervals] });
+    const name = ONE_FORM.get(part.name) ?? part.name;
+    const known = byName.get(name);
+    if (known === undefined) byName.set(name, { ...part, name, intervals: [...part.intervals] });
     else known.intervals.push(...part.intervals);
   }
   return [...byName.values()];
