@@ -1,7 +1,6 @@
 import type { Answer, Datum } from '../core/answer';
-import { plainName, refused } from '../core/catalogue/find';
-import type { Substance } from '../core/substance';
 import { answer } from './edge/answer';
+import { constantOf, noSuchItem } from './edge/constantOf';
 import { substanceKey, textKey } from './edge/keys';
 import { onScale } from './edge/scale';
 import type { CellwiseSpec, Key, Plan } from './edge/spec';
@@ -20,7 +19,15 @@ const spec: CellwiseSpec = {
 
 function plan(keys: readonly Key[], settings: Settings): Plan {
   const substance = substanceKey(keys[0]);
-  const datum = datumOf(substance, textKey('item', keys[1]));
+  const item = textKey('item', keys[1]);
+  const datum = constantOf(substance, item);
+  if (datum === undefined) {
+    throw noSuchItem(
+      substance,
+      item,
+      substance.constants.map((known) => known.item),
+    );
+  }
   const { scale, offset } = cellScale(datum, settings);
   return {
     compute: () => datum.value * scale + offset,
@@ -28,17 +35,6 @@ function plan(keys: readonly Key[], settings: Settings): Plan {
     toCell: (si) => si * scale + offset,
     toCellDifference: (si) => si * scale,
   };
-}
-
-/** Finds a constant by its full words; a near miss names the nearest. */
-export function datumOf(substance: Substance, item: string): Datum {
-  const found = substance.constants.find((datum) => plainName(datum.item) === plainName(item));
-  if (found !== undefined) return found;
-  throw refused(
-    'item',
-    item,
-    substance.constants.map((datum) => datum.item),
-  );
 }
 
 function cellScale(datum: Datum, settings: Settings): { scale: number; offset: number } {
@@ -64,7 +60,7 @@ function recordOf(datum: Datum): Answer {
  * A constant of a substance: molar mass (g/mol), melting, boiling, triple and critical temperature and pressure, and more.
  * @customfunction CONSTANT
  * @param substance Substance by name, formula or CAS number, as "water".
- * @param item Full words, as "molar mass" or "critical temperature".
+ * @param item Full words: molar mass, melting, boiling, triple or critical temperature, triple or critical pressure, acentric factor.
  * @param [settings] Latentry_units, or text as "temperature=K".
  * @param invocation The call itself.
  * @returns Temperatures and pressures in the workbook's units, molar mass in g/mol, density in kg/m3.

@@ -7,8 +7,10 @@ import { DEFAULT_SETTINGS, parseSettingsBlock, parseSettingsText, settingsRows }
 import { settingsStore } from './settings/store';
 import './constant';
 import './deltaCp';
+import './disagreement';
 import './edition';
 import './enthalpy';
+import './estimate';
 import './fitDeltaCp';
 import './fitLatent';
 import './heat';

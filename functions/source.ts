@@ -1,9 +1,11 @@
-import { plainName, refused } from '../core/catalogue/find';
+import type { Datum } from '../core/answer';
+import { findChange, findPhaseOf, plainName } from '../core/catalogue/find';
+import { Problem, shortNumber } from '../core/problem';
 import type { Curve, Substance } from '../core/substance';
-import { shortNumber } from '../core/problem';
 import { answer } from './edge/answer';
 import { writerFor } from './edge/cellError';
-import { substanceKey, textKey } from './edge/keys';
+import { constantOf, noSuchItem } from './edge/constantOf';
+import { kindOption, substanceKey, textKey } from './edge/keys';
 import { STANDARD_ATMOSPHERE_PA } from './edge/pathPlan';
 import type { CellwiseSpec } from './edge/spec';
 import type { Settings } from './settings/settings';
@@ -15,63 +17,125 @@ const spec: CellwiseSpec = {
     { name: 'substance', kind: 'key' },
     { name: 'item', kind: 'key' },
   ],
-  options: [],
+  options: ['kind'],
   plan: (keys, settings) => {
     const words = sourceWords(substanceKey(keys[0]), textKey('item', keys[1]), settings);
     return { compute: () => words };
   },
 };
 
-/** Citation, valid range, uncertainty and standing of a constant, a change or a property. */
+/** Citation, valid range, uncertainty and standing of a constant, a change or a property; the substance's notes. */
 function sourceWords(substance: Substance, item: string, settings: Settings): string {
-  const name = plainName(item);
-  const datum = substance.constants.find((d) => plainName(d.item) === name);
-  if (datum !== undefined) {
-    const u =
-      datum.uncertainty === undefined
-        ? 'no stated uncertainty'
-        : `standard uncertainty ${shortNumber(datum.uncertainty)} ${datum.unit}`;
-    return `${datum.source}; ${u}; ${datum.confirmed ? 'confirmed' : 'unconfirmed'}`;
+  if (plainName(item) === 'notes') {
+    return substance.notes.length === 0 ? `no notes on ${substance.name}` : notesOf(substance).join('; ');
   }
-  const curves = curvesOf(substance);
-  const found = curves.find(([word]) => plainName(word) === name);
-  if (found === undefined) {
-    throw refused('item', item, [...curves.map(([word]) => word), ...substance.constants.map((d) => d.item)]);
+  const datum = constantOf(substance, item);
+  if (datum !== undefined) return datumWords(datum);
+  const change = changeOf(substance, item);
+  if (change !== undefined) {
+    const curve = substance.latent(change, kindOption(settings, substance.defaultKind(change)));
+    return [curveWords(curve, substance.transitionTemperature(change), settings), ...notesOf(substance)].join('; ');
   }
-  const curve = found[1]();
+  const curve = propertyOf(substance, item, settings);
+  if (curve !== undefined) return curveWords(curve, undefined, settings);
+  throw noSuchItem(substance, item, itemsOf(substance, settings));
+}
+
+/** Notes as parts of one text. */
+function notesOf({ notes }: Substance): string[] {
+  return notes.map((note) => note.replace(/\.$/, ''));
+}
+
+function datumWords({ source, uncertainty, unit, confirmed }: Datum): string {
+  const u =
+    uncertainty === undefined
+      ? 'no stated uncertainty'
+      : `standard uncertainty ${shortNumber(uncertainty)} ${unit} (k = 1)`;
+  return `${source}; ${u}; ${confirmed ? 'confirmed' : 'unconfirmed'}`;
+}
+
+/** Judged at the transition itself where the change has one, else in the middle of the range. */
+function curveWords(curve: Curve, transition: number | undefined, settings: Settings): string {
   const write = writerFor(settings)[curve.axis];
-  const middle = (curve.from + curve.to) / 2;
-  const u = curve.uncertaintyAt?.(middle);
+  const { from, to } = curve;
+  const place = transition !== undefined && transition >= from && transition <= to ? transition : (from + to) / 2;
+  const u = curve.uncertaintyAt?.(place);
+  const unconfirmed = (curve.marksAt?.(place) ?? []).filter((mark) => mark.code === 'unconfirmed');
   return [
     curve.sources.join('; '),
     curve.method,
-    `valid from ${write(curve.from)} to ${write(curve.to)}`,
+    from === to ? `valid at ${write(from)} only` : `valid from ${write(from)} to ${write(to)}`,
     u === undefined
       ? 'no stated uncertainty'
-      : `standard uncertainty ${shortNumber(u)} ${curve.unit} at ${write(middle)}`,
+      : `standard uncertainty ${shortNumber(u)} ${curve.unit} (k = 1) at ${write(place)}`,
+    unconfirmed.length === 0 ? 'confirmed' : unconfirmed.map(({ text }) => `unconfirmed: ${text}`).join('; '),
   ].join('; ');
 }
 
-function curvesOf(substance: Substance): readonly (readonly [string, () => Curve])[] {
+/** A change by any of its words; `undefined` for a word that is none, so that it may still be a property. */
+function changeOf(substance: Substance, item: string): string | undefined {
+  try {
+    return findChange(substance, item).change;
+  } catch (thrown) {
+    if (thrown instanceof Problem && thrown.data.code === 'argument') return undefined;
+    throw thrown;
+  }
+}
+
+const HEAT_CAPACITY = 'heat capacity';
+
+/** A property by its words: saturation pressure and temperature, or the heat capacity of a phase or a crystal form. */
+function propertyOf(substance: Substance, item: string, settings: Settings): Curve | undefined {
+  const plain = plainName(item);
+  if (plain === 'saturationpressure') return substance.saturationPressure('stable');
+  if (plain === 'saturationtemperature') return substance.saturationTemperature('stable');
+  const at = plain.lastIndexOf(plainName(HEAT_CAPACITY));
+  if (at <= 0 || at + plainName(HEAT_CAPACITY).length < plain.length) return undefined;
+  const words = plain.slice(0, at);
+  if (words === 'idealgas') return substance.heatCapacity('gas', 'standard');
+  const { phase, form } = phaseOf(substance, words) ?? {};
+  if (phase === undefined) return undefined;
+  const standard = kindOption(settings, undefined) === 'standard';
+  return substance.heatCapacity(phase, standard ? 'standard' : STANDARD_ATMOSPHERE_PA, form);
+}
+
+function phaseOf(substance: Substance, words: string): ReturnType<typeof findPhaseOf> | undefined {
+  try {
+    return findPhaseOf(substance, words);
+  } catch (thrown) {
+    if (thrown instanceof Problem && thrown.data.code === 'argument') return undefined;
+    throw thrown;
+  }
+}
+
+/** Everything that this substance has an answer for. */
+function itemsOf(substance: Substance, settings: Settings): string[] {
+  const forms = (substance.forms ?? []).map((form) => `solid ${form}`);
+  const phases = ['solid', ...forms, 'liquid', 'gas', 'ideal gas'].map((phase) => `${phase} ${HEAT_CAPACITY}`);
+  const properties = ['saturation pressure', 'saturation temperature', ...phases];
   return [
-    ...substance.changes.map(
-      (change) => [change, () => substance.latent(change, substance.defaultKind(change))] as const,
-    ),
-    ['saturation pressure', () => substance.saturationPressure('stable')],
-    ['saturation temperature', () => substance.saturationTemperature('stable')],
-    ['solid heat capacity', () => substance.heatCapacity('solid', STANDARD_ATMOSPHERE_PA)],
-    ['liquid heat capacity', () => substance.heatCapacity('liquid', STANDARD_ATMOSPHERE_PA)],
-    ['gas heat capacity', () => substance.heatCapacity('gas', STANDARD_ATMOSPHERE_PA)],
-    ['ideal gas heat capacity', () => substance.heatCapacity('gas', 'standard')],
+    ...substance.changes,
+    ...properties.filter((property) => hasProperty(substance, property, settings)),
+    ...substance.constants.map(({ item }) => item),
+    'notes',
   ];
+}
+
+function hasProperty(substance: Substance, property: string, settings: Settings): boolean {
+  try {
+    return propertyOf(substance, property, settings) !== undefined;
+  } catch (thrown) {
+    if (thrown instanceof Problem) return false;
+    throw thrown;
+  }
 }
 
 /**
  * Where a number comes from: citation, valid range, stated uncertainty, and whether it is confirmed.
  * @customfunction SOURCE
  * @param substance Substance by name, formula or CAS number, as "water".
- * @param item A change ("vaporization"), a property ("saturation pressure") or a constant ("molar mass").
- * @param [settings] Latentry_units, or text as "temperature=K".
+ * @param item A change ("vaporization"), a property ("saturation pressure", "solid alpha heat capacity"), a constant ("molar mass"), or "notes".
+ * @param [settings] Latentry_units, or text as "temperature=K" or "kind=standard".
  * @param invocation The call itself.
  * @returns One text.
  */
