@@ -5,9 +5,12 @@ import { heatCap } from '../heatCap';
 import { kirchhoff } from '../kirchhoff';
 import { latent } from '../latent';
 import { satPressure } from '../satPressure';
+import { satTemperature } from '../satTemperature';
 import { toUnits } from '../toUnits';
 import type { Check } from './check';
+import { condensedChecks } from './condensedChecks';
 import { fitChecks } from './fitChecks';
+import { storageChecks } from './storageChecks';
 import { unitChecks } from './unitChecks';
 import { waterChecks } from './waterChecks';
 
@@ -16,6 +19,7 @@ const functions: Readonly<Record<string, (...args: never[]) => unknown[][]>> = {
   DELTACP: deltaCp,
   HEATCAP: heatCap,
   SATPRESSURE: satPressure,
+  SATTEMPERATURE: satTemperature,
   HEAT: heat,
   KIRCHHOFF: kirchhoff,
   FITDELTACP: fitDeltaCp,
@@ -25,6 +29,8 @@ const functions: Readonly<Record<string, (...args: never[]) => unknown[][]>> = {
 /** Every check with the call that computes it. */
 export const checks: readonly { readonly check: Check; readonly run: () => number }[] = [
   ...waterChecks,
+  ...condensedChecks,
+  ...storageChecks,
   ...fitChecks,
   ...unitChecks,
 ].map((check) => ({ check, run: () => compute(check) }));
