@@ -5,8 +5,8 @@
 export interface Check {
   /** Function id, as `LATENT`. */
   readonly call: string;
-  /** Scalars, or columns of numbers with the name they go by in the formula shown. */
-  readonly args: readonly (string | number | Column)[];
+  /** Scalars, columns of numbers with the name they go by in the formula shown, or a small table written out in it. */
+  readonly args: readonly (string | number | Column | Rows)[];
   /** Settings text that goes with it, so that a check never depends on the workbook's units. */
   readonly settings: string;
   /** Which cell of a table result is checked, found by the label in its first column; the only cell when absent. */
@@ -24,10 +24,19 @@ export interface Column {
   readonly values: readonly number[];
 }
 
+export interface Rows {
+  readonly rows: readonly (readonly (string | number)[])[];
+}
+
 /** The formula of a check, as a user would type it; a column is shown by its name. */
 export function formulaOf(check: Check): string {
-  const args = [...check.args, check.settings].map((arg) =>
-    typeof arg === 'number' ? String(arg) : typeof arg === 'string' ? `"${arg}"` : arg.name,
-  );
+  const args = [...check.args, check.settings].map((arg) => {
+    if (typeof arg !== 'object') return scalarOf(arg);
+    return 'name' in arg ? arg.name : `{${arg.rows.map((row) => row.map(scalarOf).join(',')).join(';')}}`;
+  });
   return `=LATENTRY.${check.call}(${args.join(',')})`;
+}
+
+function scalarOf(value: string | number): string {
+  return typeof value === 'number' ? String(value) : `"${value}"`;
 }

@@ -1,4 +1,5 @@
 import { deltaCp } from '../deltaCp';
+import { estimate } from '../estimate';
 import { fitDeltaCp } from '../fitDeltaCp';
 import { heat } from '../heat';
 import { heatCap } from '../heatCap';
@@ -9,6 +10,7 @@ import { satTemperature } from '../satTemperature';
 import { toUnits } from '../toUnits';
 import type { Check } from './check';
 import { condensedChecks } from './condensedChecks';
+import { estimateChecks } from './estimateChecks';
 import { fitChecks } from './fitChecks';
 import { storageChecks } from './storageChecks';
 import { unitChecks } from './unitChecks';
@@ -23,6 +25,7 @@ const functions: Readonly<Record<string, (...args: never[]) => unknown[][]>> = {
   HEAT: heat,
   KIRCHHOFF: kirchhoff,
   FITDELTACP: fitDeltaCp,
+  ESTIMATE: estimate,
   TOUNITS: toUnits,
 };
 
@@ -31,6 +34,7 @@ export const checks: readonly { readonly check: Check; readonly run: () => numbe
   ...waterChecks,
   ...condensedChecks,
   ...storageChecks,
+  ...estimateChecks,
   ...fitChecks,
   ...unitChecks,
 ].map((check) => ({ check, run: () => compute(check) }));
@@ -38,7 +42,9 @@ export const checks: readonly { readonly check: Check; readonly run: () => numbe
 function compute(check: Check): number {
   const fn = functions[check.call];
   if (fn === undefined) throw new Error(`no such function: ${check.call}`);
-  const args: unknown[] = check.args.map((arg) => (typeof arg === 'object' ? arg.values.map((x) => [x]) : [[arg]]));
+  const args: unknown[] = check.args.map((arg) =>
+    typeof arg !== 'object' ? [[arg]] : 'rows' in arg ? arg.rows : arg.values.map((x) => [x]),
+  );
   // Every cell function ends with the settings and the invocation.
   while (args.length < fn.length - 2) args.push(undefined);
   const table = fn(...([...args, [[[check.settings]]]] as never[]));
