@@ -130,7 +130,7 @@ function piecesOf({ stations, crossings }: Chain, boiling: Boiling): Piece[] {
 
   function aboveLast(station: Station, toK: number | undefined, at: Boiling): string {
     const ends = station.cp !== undefined && toK !== undefined && toK >= station.cp.toK - SAME_K;
-    if (station.phase === 'gas' || station.phase === 'solid' || !('lacking' in at)) return nameOf(station);
+    if (station.phase !== 'liquid' || station.cp === undefined || !('lacking' in at)) return nameOf(station);
     return ends ? nameOf(station) : at.lacking;
   }
 
