@@ -3,6 +3,9 @@
  */
 import { setBlankReader } from './edge/blanks';
 import { DATA_EDITION, EDITION } from './edge/editionText';
+import { currentRegistry } from './house/currentRegistry';
+import { readHouseBlock } from './house/readHouseBlock';
+import { houseStore } from './house/store';
 import { DEFAULT_SETTINGS, parseSettingsBlock, parseSettingsText, settingsRows } from './settings/settings';
 import { settingsStore } from './settings/store';
 import './constant';
@@ -35,6 +38,9 @@ export interface LatentryBundle {
   readonly parseSettingsBlock: typeof parseSettingsBlock;
   readonly settingsRows: typeof settingsRows;
   readonly setBlankReader: typeof setBlankReader;
+  readonly house: typeof houseStore;
+  readonly readHouseBlock: typeof readHouseBlock;
+  readonly currentRegistry: typeof currentRegistry;
 }
 
 declare global {
@@ -50,4 +56,7 @@ globalThis.Latentry = {
   parseSettingsBlock,
   settingsRows,
   setBlankReader,
+  house: houseStore,
+  readHouseBlock,
+  currentRegistry,
 };

@@ -1,5 +1,6 @@
 import { Problem } from '../../core/problem';
 import { DEFAULT_SETTINGS, settingsFor, type Settings } from '../settings/settings';
+import { isHouseBlock } from '../house/isHouseBlock';
 import { plainKey, SETTINGS } from '../settings/schema';
 import { settingsStore, type StoreState } from '../settings/store';
 import { blockOf, type Block } from './block';
@@ -125,7 +126,8 @@ function ambient(state: StoreState): Settings {
 
 /** A block with a row for every setting stands by itself; a smaller one is put onto the workbook's own settings. */
 function isWholeBlock(part: unknown): boolean {
-  return Array.isArray(part) && part.length >= SETTINGS.length && Array.isArray(part[0]) && part[0].length > 1;
+  const large = Array.isArray(part) && part.length >= SETTINGS.length && Array.isArray(part[0]) && part[0].length > 1;
+  return large && !isHouseBlock(part);
 }
 
 function isUnitsBlock(part: unknown): boolean {
@@ -135,6 +137,10 @@ function isUnitsBlock(part: unknown): boolean {
 }
 
 const LABELS: ReadonlySet<string> = new Set(SETTINGS.flatMap((row) => [plainKey(row.label), plainKey(row.key)]));
+
+function isSettings(part: unknown): boolean {
+  return isSettingsText(part) || isUnitsBlock(part) || isHouseBlock(part);
+}
 
 /** A settings text has an equals sign, which no quantity has. */
 function isSettingsText(part: unknown): boolean {
@@ -149,7 +155,7 @@ function isSettingsText(part: unknown): boolean {
 
 /**
  * Settings may stand in the place of an optional quantity that is left out: `LATENT("water","fusion",Latentry_units)`.
- * A Units block and a settings text cannot be mistaken for a quantity.
+ * A Units block, a block of substances and a settings text cannot be mistaken for a quantity.
  */
 function takeSettings(
   spec: Spec,
@@ -159,7 +165,7 @@ function takeSettings(
   let positional: unknown[] | undefined;
   const early: unknown[] = [];
   for (let i = 0; i < count && i < args.length; i++) {
-    if (spec.args[i]?.optional !== true || !(isSettingsText(args[i]) || isUnitsBlock(args[i]))) continue;
+    if (spec.args[i]?.optional !== true || !isSettings(args[i])) continue;
     positional ??= [...args];
     positional[i] = undefined;
     early.push(args[i]);

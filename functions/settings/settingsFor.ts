@@ -1,4 +1,5 @@
 import { Problem } from '../../core/problem';
+import { isHouseBlock } from '../house/isHouseBlock';
 import { parseSettingsBlock } from './parseSettingsBlock';
 import { parseSettingsText } from './parseSettingsText';
 import type { Settings } from './settingsType';
@@ -22,7 +23,7 @@ const memory = new WeakMap<readonly string[], Remembered[]>();
  * and get the same object.
  *
  * @param parts settings arguments: texts, blocks of one column (settings texts), blocks of two (label and value); blanks
- * don't count
+ * and the block of substances don't count
  * @param base settings that hold where the arguments are silent
  * @param allowedOptions option keys of the function; the same array at each call
  * @throws Problem `argument` as `parseSettingsText` and `parseSettingsBlock` do
@@ -51,6 +52,7 @@ function withPart(base: Settings, part: unknown, allowedOptions: readonly string
   if (typeof part === 'string') return parseSettingsText(part, base, allowedOptions);
   if (!isRows(part))
     throw refused(typeof part === 'number' || typeof part === 'boolean' ? String(part) : 'something else');
+  if (isHouseBlock(part)) return base;
   if (part.every((row) => row.length === 1)) {
     return part.reduce<Settings>((onto, [cell]) => withPart(onto, cell, allowedOptions), base);
   }

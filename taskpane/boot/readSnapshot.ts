@@ -1,3 +1,5 @@
+import { readHouseBlock } from '../../functions/house/readHouseBlock';
+import type { HouseState } from '../../functions/house/store';
 import { DEFAULT_SETTINGS, readSettingsBlock, settingsStamp } from '../../functions/settings/settings';
 import type { StoreState } from '../../functions/settings/store';
 import { formatArea, parseArea } from '../hosts/address';
@@ -12,7 +14,8 @@ export interface Snapshot {
   readonly store: Exclude<StoreState, { state: 'unread' }>;
   /** Hash of the settings in force; equal hashes give equal answers. */
   readonly settings: string;
-  /** Hash of the house substances; empty where there are none. */
+  readonly substances: Exclude<HouseState, { state: 'unread' }>;
+  /** Hash of the house substances; empty where there is no block of them. */
   readonly house: string;
   /** Sheets whose changes matter, in lower case. */
   readonly sheets: ReadonlySet<string>;
@@ -48,6 +51,24 @@ function storeOf(units: Ref | 'broken' | undefined, block: Block | undefined): S
   return { state: 'ready', settings, stamp: settingsStamp(settings, '') };
 }
 
+/** The team's own substances; their rows are read with the decimal separator that is in force. */
+function houseOf(
+  substances: Ref | 'broken' | undefined,
+  block: Block | undefined,
+  store: Snapshot['store'],
+): Snapshot['substances'] {
+  if (substances === undefined) return { state: 'absent' };
+  const area = block === undefined ? null : parseArea(block.ref.address);
+  if (block === undefined || area === null) return { state: 'broken', text: '#REF!' };
+  const { decimal } = store.state === 'ready' ? store.settings : DEFAULT_SETTINGS;
+  return readHouseBlock({ values: block.values, firstRow: area.top + 1, decimal });
+}
+
+function houseHash(substances: Snapshot['substances']): string {
+  if (substances.state === 'absent') return '';
+  return textHash(substances.state === 'ready' ? substances.stamp : substances.text);
+}
+
 function nameIn(names: ReadonlyMap<string, Ref | 'broken'>, wanted: string): Ref | 'broken' | undefined {
   return [...names].find(([name]) => name.toLowerCase() === wanted.toLowerCase())?.[1];
 }
@@ -62,11 +83,12 @@ export async function readSnapshot(host: WorkbookHost): Promise<Snapshot> {
   const blockOf = (ref: Ref | 'broken' | undefined) =>
     ref === undefined || ref === 'broken' ? undefined : blocks[refs.indexOf(ref)];
   const store = storeOf(units, blockOf(units));
-  const house = blockOf(substances);
+  const house = houseOf(substances, blockOf(substances), store);
   return {
     store,
+    substances: house,
     settings: store.state === 'ready' ? store.stamp : textHash(JSON.stringify(store)),
-    house: house === undefined ? '' : textHash(JSON.stringify(house.values)),
+    house: houseHash(house),
     sheets: new Set(['units', 'substances', ...refs.map(({ sheet }) => sheet.toLowerCase())]),
   };
 }

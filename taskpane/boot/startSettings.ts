@@ -1,3 +1,5 @@
+import { takeMissed } from '../../functions/house/currentRegistry';
+import { houseStore } from '../../functions/house/store';
 import { settingsStore } from '../../functions/settings/store';
 import { parseArea } from '../hosts/address';
 import type { HostEvent, Ref, WorkbookHost } from '../port';
@@ -16,8 +18,8 @@ const FIRST_RETRY_MS = 500;
 const MOST_RETRIES = 5;
 
 /**
- * Keeps the settings store equal to the Units block of the workbook, and the values of formulas that rest on
- * the store equal to its settings. Resolves once the store has been published; the result stops it.
+ * Keeps the stores equal to the Units block and the Substances block of the workbook, and the values of formulas that
+ * rest on them equal to what they say. Resolves once both have been published; the result stops it.
  */
 export async function startSettings(host: WorkbookHost): Promise<() => void> {
   const watch = new SettingsWatch(host);
@@ -93,6 +95,10 @@ class SettingsWatch {
     const remote = this.onlyRemote && last !== undefined;
     this.onlyRemote = true;
     this.snapshot = next;
+    // Before the settings, which formulas wait for.
+    if (last?.house !== next.house || last.substances.state !== next.substances.state) {
+      houseStore.publish(next.substances);
+    }
     if (last?.settings !== next.settings) settingsStore.publish(next.store);
     this.started();
     if (last === undefined) await this.compareStamp(next);
@@ -113,11 +119,12 @@ class SettingsWatch {
     staleness.publish(same ? { state: 'fresh' } : { state: 'stale', from: edition, to: editionNow() });
     if (this.stamp.settings !== next.settings || this.stamp.house !== next.house)
       await this.act(this.stamp, next, false);
+    else if (takeMissed()) await recalculateOurs(this.host, 'all', this.fresh());
   }
 
   /** Only a changed snapshot gets here. */
   private async act(last: Pick<Snapshot, 'house'>, next: Snapshot, remote: boolean): Promise<void> {
-    const which = last.house === next.house ? 'store' : 'all';
+    const which = takeMissed() || last.house !== next.house ? 'all' : 'store';
     const signal = this.fresh();
     await recalculateOurs(this.host, which, signal);
     if (signal.aborted || remote) return;

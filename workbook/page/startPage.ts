@@ -1,4 +1,5 @@
 import { IUndoRedoService } from '@univerjs/core';
+import { houseStore } from '../../functions/house/store';
 import { settingsStore } from '../../functions/settings/store';
 import { startSettings } from '../../taskpane/boot/startSettings';
 import type { WorkbookHost } from '../../taskpane/port';
@@ -50,6 +51,7 @@ export async function startPage(elements: PageElements, standard: () => Book): P
   grid.beforeOpen(() => {
     openSettings.stop();
     settingsStore.publish({ state: 'unread' });
+    houseStore.publish({ state: 'unread' });
   });
   const start = async (): Promise<void> => {
     await openSettings.start();
