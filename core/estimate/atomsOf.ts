@@ -23,37 +23,47 @@ export function atomsOf(formula: string): ReadonlyMap<string, number> {
   const plain = formula
     .replace(/\s+/g, '')
     .replace(/[₀-₉]/g, (digit) => String('₀₁₂₃₄₅₆₇₈₉'.indexOf(digit)))
+    // A point behind a zero belongs to a count, any other joins two parts.
+    .replace(/([A-Za-z)\]])0\.(\d)/g, '$10,$2')
     .replace(/[[{]/g, '(')
     .replace(/[\]}]/g, ')');
   for (const part of plain.split(/[·•⋅*]|\.(?=\d*[A-Z(])/)) {
     const [, times = '', group = ''] = /^(\d*)(.+)$/.exec(part) ?? [];
-    add(atoms, group, times === '' ? 1 : Number(times), formula);
+    add(atoms, group, countOf(times, formula), formula);
   }
   return atoms;
 }
 
 /** A symbol or an innermost bracket with its count; a count may be fractional, as in `Fe0.95O`. */
-const TOKEN = /([A-Z][a-z]?|\()(\d+(?:\.\d+)?)?/y;
+const TOKEN = /([A-Z][a-z]?|\()(\d+(?:,\d+)?)?/y;
 
 function add(atoms: Map<string, number>, group: string, times: number, formula: string): void {
   let at = 0;
   while (at < group.length || group === '') {
     TOKEN.lastIndex = at;
     const match = TOKEN.exec(group);
-    if (match === null || !(times > 0)) throw refused(formula);
-    const [token, symbol = '', count = '1'] = match;
+    if (match === null) throw refused(formula);
+    const [token, symbol = '', count = ''] = match;
     if (symbol === '(') {
       const close = closing(group, at);
-      const behind = /^\d+(?:\.\d+)?/.exec(group.slice(close + 1))?.[0] ?? '';
+      const behind = /^\d+(?:,\d+)?/.exec(group.slice(close + 1))?.[0] ?? '';
       if (close < 0 || token.length > 1) throw refused(formula);
-      add(atoms, group.slice(at + 1, close), times * (behind === '' ? 1 : Number(behind)), formula);
+      add(atoms, group.slice(at + 1, close), times * countOf(behind, formula), formula);
       at = close + 1 + behind.length;
     } else {
       if (!SYMBOLS.has(symbol)) throw refused(formula);
-      atoms.set(symbol, (atoms.get(symbol) ?? 0) + times * Number(count));
+      atoms.set(symbol, (atoms.get(symbol) ?? 0) + times * countOf(count, formula));
       at += token.length;
     }
   }
+}
+
+/** 1 where nothing is written. */
+function countOf(digits: string, formula: string): number {
+  if (digits === '') return 1;
+  const count = Number(digits.replace(',', '.'));
+  if (count > 0) return count;
+  throw refused(formula);
 }
 
 function closing(group: string, open: number): number {
