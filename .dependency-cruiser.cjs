@@ -28,8 +28,8 @@ module.exports = {
     only(
       'pane-through-the-store',
       '^taskpane/',
-      '^functions/(?!settings/|edge/(blanks|editionText|fitUnits)\\.ts)',
-      'the pane sees the settings store of functions, and the seams made for hosts',
+      '^functions/(?!settings/|house/|edge/(blanks|editionText|fitUnits)\\.ts)',
+      'the pane sees the stores of functions (settings, house substances), and the seams made for hosts',
     ),
     only(
       'no-tests-in-the-product',

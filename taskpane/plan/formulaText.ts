@@ -26,6 +26,8 @@ export interface FormulaAt {
     /** True for one standard atmosphere, which functions take by themselves. */
     readonly usual: boolean;
   };
+  /** Units that answers need beside the workbook's: a material without a molar mass is counted in mass. */
+  readonly units?: { readonly heat?: string; readonly heatCapacity?: string };
 }
 
 /**
@@ -37,9 +39,15 @@ export function formulaText(ask: FormulaAsk, at: FormulaAt): string {
   const written = ask.arguments.map((argument) => argumentText(argument, at));
   const kind = ask.kind === undefined ? [] : [`kind=${ask.kind}`];
   const pressure = ask.atPressure === true && !at.pressure.usual ? [`at_pressure=${at.pressure.text}`] : [];
-  const options = [...kind, ...pressure].join('; ');
+  const options = [...unitOptions(ask, at), ...kind, ...pressure].join('; ');
   const last = options === '' ? [] : [quoted(options)];
   return `=LATENTRY.${ask.name}(${[...written, UNITS_NAME, ...last].join(',')})`;
+}
+
+function unitOptions({ name }: FormulaAsk, { units }: FormulaAt): string[] {
+  if (name === 'LATENT' || name === 'ENTHALPY') return units?.heat === undefined ? [] : [`heat=${units.heat}`];
+  if (name !== 'DELTACP' && name !== 'HEATCAP') return [];
+  return units?.heatCapacity === undefined ? [] : [`heat_capacity=${units.heatCapacity}`];
 }
 
 function argumentText(argument: FormulaArgument, { temperature, pressure }: FormulaAt): string {

@@ -1,7 +1,7 @@
-import { Badge, Button, Field, Input, Select } from '@fluentui/react-components';
+import { Badge, Field, Input, Select } from '@fluentui/react-components';
 import { useMemo, useState } from 'react';
 import { plainWords } from '../../../core/problem';
-import type { Substance } from '../../../core/substance';
+import type { Ladder, Substance } from '../../../core/substance';
 import type { Settings } from '../../../functions/settings/settings';
 import type { WorkbookHost } from '../../port';
 import { number } from '../look/number';
@@ -12,11 +12,12 @@ import { diagramOf } from './diagram/diagramOf';
 import { diagramRows } from './diagram/diagramRows';
 import { DiagramTable } from './diagram/DiagramTable';
 import { niceStep, onStep } from './diagram/niceStep';
+import { sidesOf } from './diagram/sidesOf';
 import { sliderWords } from './diagram/sliderWords';
 import { TemperatureSlider } from './diagram/TemperatureSlider';
 import { Facts } from './facts/Facts';
 import { stateWords } from './facts/stateWords';
-import { onScale, unitWriter, written } from './facts/unitWriter';
+import { onScale, roundTemperature, unitWriter, written } from './facts/unitWriter';
 import { useInsert } from './insert/useInsert';
 import { Constants } from './known/Constants';
 import { DisagreementLine } from './known/DisagreementLine';
@@ -45,24 +46,28 @@ export function SubstanceCard({ host, substance, settings, withoutUnits }: Subst
     {
       temperature: onScale(temperatureK, temperature),
       pressure: { value: onScale(pressurePa, pressure), text: pressureText, usual: pressurePa === ATMOSPHERE_PA },
+      units: writer.ownUnits,
     },
     cell,
     withoutUnits,
   );
   const diagram = useMemo(
-    () => (ladder === undefined ? undefined : diagramOf(substance, ladder, window)),
-    [substance, ladder, window],
+    () => (ladder === undefined ? undefined : diagramOf(substance, ladder, window, sidesOf(ladder, card.around))),
+    [substance, ladder, window, card.around],
   );
-  const here = useMemo(
-    () => (ladder === undefined ? [] : crossings(substance, ladder, temperatureK)),
-    [substance, ladder, temperatureK],
-  );
+  const here = useMemo(() => {
+    if (ladder === undefined) return [];
+    const shown = sidesOf(ladder, card.around);
+    return crossings(substance, ladder, temperatureK).filter(
+      ({ name, stable }) => stable || shown === undefined || shown.includes(name),
+    );
+  }, [substance, ladder, temperatureK, card.around]);
   const step = niceStep(Math.abs(temperature.scale) * (window.toK - window.fromK), 200);
   const stepBy = (steps: number) => {
     const shown = onStep(onScale(temperatureK, temperature) + steps * step, step);
     card.goTo(Math.max(0, (shown - temperature.offset) / temperature.scale));
   };
-  const shownTemperature = written(temperatureK, temperature, decimal);
+  const rounded = (kelvin: number) => roundTemperature(kelvin, temperature, decimal);
   return (
     <article className={look.stack} aria-label={substance.name}>
       <header className={look.tight}>
@@ -73,44 +78,8 @@ export function SubstanceCard({ host, substance, settings, withoutUnits }: Subst
           {[substance.formula, substance.cas === '' ? '' : `CAS ${substance.cas}`, substance.group]
             .filter((word) => word !== '')
             .join(' · ')}
-          {substance.synonyms.length > 0 && <>. Also {substance.synonyms.join(', ')}</>}
         </p>
       </header>
-      <div className={look.pair}>
-        <QuantityField
-          label="Temperature"
-          kind="temperature"
-          settings={settings}
-          scale={temperature}
-          si={temperatureK}
-          onValue={card.goTo}
-          onStep={stepBy}
-        />
-        <QuantityField
-          label="Pressure"
-          kind="pressure"
-          settings={settings}
-          scale={pressure}
-          si={pressurePa}
-          onValue={card.setPressure}
-        />
-      </div>
-      {ladder !== undefined && ladder.gaps.length > 1 && (
-        <Field label="Part of the diagram">
-          <Select
-            className={look.narrow}
-            value={card.around === undefined ? '' : String(card.around)}
-            onChange={(_, { value }) => card.setAround(value === '' ? undefined : Number(value))}
-          >
-            <option value="">all changes</option>
-            {ladder.gaps.map(({ change, temperatureK: at }, place) => (
-              <option key={place} value={place}>
-                around {change}, {written(at, temperature, decimal)}
-              </option>
-            ))}
-          </Select>
-        </Field>
-      )}
       {card.problem !== undefined && <p className={look.text}>No diagram: {plainWords(card.problem, writer.words)}.</p>}
       {ladder !== undefined && diagram !== undefined && (
         <figure className={look.tight} style={{ margin: 0 }}>
@@ -131,28 +100,43 @@ export function SubstanceCard({ host, substance, settings, withoutUnits }: Subst
             words={sliderWords(ladder, here, temperatureK, writer)}
             onTemperature={card.setTemperature}
           />
-          <div className={look.row} role="group" aria-label="Go to a change">
-            {ladder.gaps.map(({ change, temperatureK: at }, place) => (
-              <Button key={place} size="small" type="button" onClick={() => card.goTo(at)}>
-                {change} {written(at, temperature, decimal)}
-              </Button>
-            ))}
-          </div>
+          {ladder.gaps.length > 0 && (
+            <PartOfDiagram ladder={ladder} around={card.around} onAround={card.setAround} label={rounded} />
+          )}
           <figcaption className={look.quiet}>
-            The slope of a line is a heat capacity, in {writer.heatCapacity.unit}; a gap between two lines is a heat of
-            change, in {writer.heat.unit}. All at {written(pressurePa, pressure, decimal)}, so the gaps here are of the
-            isobaric kind. Dashed: followed where it is not the stable phase. Zero of h: {substance.enthalpyReference}.
+            A line’s slope is a heat capacity, in {writer.heatCapacity.unit}; a gap is a latent heat, in{' '}
+            {writer.heat.unit}, of the isobaric kind, since all of it is at {written(pressurePa, pressure, decimal)}.
+            Dashed: not the stable phase.
           </figcaption>
           <details>
             <summary className={look.summary}>The diagram as a table</summary>
             <DiagramTable rows={diagramRows(ladder)} writer={writer} />
+            <p className={look.quiet}>Zero of h: {substance.enthalpyReference}.</p>
           </details>
         </figure>
       )}
-      <h4 className={look.subtitle}>At {shownTemperature}</h4>
-      <p className={look.text} data-testid="state">
-        {ladder === undefined ? '' : stateWords(ladder, temperatureK, writer)}
-      </p>
+      <div className={look.pair}>
+        <QuantityField
+          label="Temperature"
+          kind="temperature"
+          settings={settings}
+          scale={temperature}
+          si={temperatureK}
+          onValue={card.goTo}
+          onStep={stepBy}
+        />
+        <QuantityField
+          label="Pressure"
+          kind="pressure"
+          settings={settings}
+          scale={pressure}
+          si={pressurePa}
+          onValue={card.setPressure}
+        />
+      </div>
+      <h4 className={look.subtitle} data-testid="state">
+        {stateWords(ladder, temperatureK, writer)}
+      </h4>
       <Field
         label="Temperature in formulas"
         hint={`The number shown, ${number(onScale(temperatureK, temperature), decimal)}, when left blank; or a cell, as A2`}
@@ -173,6 +157,7 @@ export function SubstanceCard({ host, substance, settings, withoutUnits }: Subst
         inserting={inserting}
       />
       <h4 className={look.subtitle}>Constants</h4>
+      {substance.synonyms.length > 0 && <p className={look.quiet}>Also found as {substance.synonyms.join(', ')}.</p>}
       <Constants substance={substance} writer={writer} inserting={inserting} />
       <h4 className={look.subtitle}>What is known, and where from</h4>
       <Known substance={substance} pressurePa={pressurePa} writer={writer} />
@@ -203,4 +188,32 @@ export function SubstanceCard({ host, substance, settings, withoutUnits }: Subst
 function plain(value: number, decimal: '.' | ','): string {
   const text = Number(value.toPrecision(12)).toString();
   return decimal === ',' ? text.replace('.', ',') : text;
+}
+
+interface PartProps {
+  readonly ladder: Ladder;
+  readonly around: number | undefined;
+  readonly onAround: (place: number | undefined) => void;
+  readonly label: (temperatureK: number) => string;
+}
+
+/** Draws all changes, or goes to one of them and draws what lies around it. */
+function PartOfDiagram({ ladder, around, onAround, label }: PartProps) {
+  const look = useLook();
+  return (
+    <Field label="Part of the diagram">
+      <Select
+        className={look.narrow}
+        value={around === undefined ? '' : String(around)}
+        onChange={(_, { value }) => onAround(value === '' ? undefined : Number(value))}
+      >
+        <option value="">all changes</option>
+        {ladder.gaps.map(({ change, temperatureK }, place) => (
+          <option key={place} value={place}>
+            around {change}, {label(temperatureK)}
+          </option>
+        ))}
+      </Select>
+    </Field>
+  );
 }

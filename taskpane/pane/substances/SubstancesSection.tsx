@@ -4,6 +4,7 @@ import type { WorkbookHost } from '../../port';
 import { Notice } from '../look/Notice';
 import { useLook } from '../look/useLook';
 import { settingsOf, useStore } from '../units/useUnits';
+import { HouseNotice } from './HouseNotice';
 import { SubstanceSearch } from './search/SubstanceSearch';
 import { SubstanceCard } from './SubstanceCard';
 import { useRegistry } from './useRegistry';
@@ -13,25 +14,14 @@ export function SubstancesSection({ host }: { readonly host: WorkbookHost }) {
   const look = useLook();
   const store = useStore();
   const settings = settingsOf(store);
-  const { registry, faults } = useRegistry();
+  const { registry, faults, state } = useRegistry();
   const [name, setName] = useState<string>();
   const chosen = registry.entries.find((entry) => entry.name === name);
   const choose = (entry: CatalogueEntry) => setName(entry.name);
   return (
     <div className={look.stack}>
       <h2 className={look.title}>Substances</h2>
-      {faults.length > 0 && (
-        <Notice tone="caution">
-          <span>Rows of the Substances sheet that can’t be read; everything else works:</span>
-          <ul className={look.list}>
-            {faults.map(({ cell, message }) => (
-              <li key={cell}>
-                {cell}: {message}
-              </li>
-            ))}
-          </ul>
-        </Notice>
-      )}
+      <HouseNotice state={state} faults={faults} />
       <SubstanceSearch entries={registry.entries} chosen={chosen} onChoose={choose} />
       {chosen !== undefined && settings === undefined && (
         <Notice tone="error">
@@ -40,7 +30,7 @@ export function SubstancesSection({ host }: { readonly host: WorkbookHost }) {
       )}
       {chosen !== undefined && settings !== undefined && (
         <SubstanceCard
-          key={chosen.name}
+          key={`${chosen.group} ${chosen.name}`}
           host={host}
           substance={chosen.make()}
           settings={settings}

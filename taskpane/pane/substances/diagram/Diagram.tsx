@@ -6,9 +6,11 @@ import type { Crossing } from './crossings';
 import type { Diagram as DiagramData } from './diagramOf';
 import { diagramWords } from './diagramWords';
 import { DIAGRAM_HEIGHT, frameOf, pixelX, valueAtX, type Frame } from './frame';
+import { Labels } from './Labels';
 import { labelsOf } from './labelsOf';
 import { onStep } from './niceStep';
 import { Probe } from './Probe';
+import { probeLabels } from './probeLabels';
 import { useWidth } from './useWidth';
 
 export interface DiagramProps {
@@ -45,14 +47,14 @@ export function Diagram({ name, diagram, crossings, writer, temperatureK, step, 
   const width = useWidth(box);
   const [failed, setFailed] = useState(false);
   const frame = useMemo(() => (width === 0 ? undefined : frameIn(diagram, width, writer)), [diagram, width, writer]);
+  const labels = useMemo(() => (frame === undefined ? [] : labelsOf(diagram, frame, writer)), [diagram, frame, writer]);
   useEffect(() => {
     if (frame === undefined) return undefined;
     let current = true;
     const words = diagramWords(name, diagram, writer);
-    const labels = labelsOf(diagram, frame, writer);
     import('./drawDiagram').then(
       ({ drawDiagram }) => {
-        if (current) picture.current?.replaceChildren(drawDiagram({ diagram, frame, labels, writer, words }));
+        if (current) picture.current?.replaceChildren(drawDiagram({ diagram, frame, writer, words }));
       },
       () => {
         if (current) setFailed(true);
@@ -62,6 +64,11 @@ export function Diagram({ name, diagram, crossings, writer, temperatureK, step, 
       current = false;
     };
   }, [name, diagram, frame, writer]);
+
+  const numbers = useMemo(
+    () => (frame === undefined ? [] : probeLabels(frame, crossings, temperatureK, writer, labels)),
+    [frame, crossings, temperatureK, writer, labels],
+  );
 
   const move = (event: PointerEvent<HTMLDivElement>) => {
     if (frame === undefined || !event.currentTarget.hasPointerCapture(event.pointerId)) return;
@@ -92,8 +99,19 @@ export function Diagram({ name, diagram, crossings, writer, temperatureK, step, 
         onPointerMove={move}
       >
         <div ref={picture} />
-        {frame !== undefined && temperatureK >= fromK && temperatureK <= toK && (
-          <Probe frame={frame} writer={writer} temperatureK={temperatureK} crossings={crossings} />
+        {frame !== undefined && (
+          <svg
+            width={frame.width}
+            height={frame.height}
+            aria-hidden="true"
+            focusable="false"
+            style={{ position: 'absolute', inset: 0, overflow: 'visible', pointerEvents: 'none' }}
+          >
+            {temperatureK >= fromK && temperatureK <= toK && (
+              <Probe frame={frame} writer={writer} temperatureK={temperatureK} crossings={crossings} />
+            )}
+            <Labels labels={[...labels, ...numbers]} />
+          </svg>
         )}
       </div>
       {failed && <p className={look.quiet}>The picture could not be loaded. The table below holds the same numbers.</p>}

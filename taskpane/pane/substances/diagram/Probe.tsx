@@ -1,4 +1,4 @@
-import { number } from '../../look/number';
+import { useId } from 'react';
 import { onScale, type UnitWriter } from '../facts/unitWriter';
 import type { Crossing } from './crossings';
 import { pixelX, pixelY, type Frame } from './frame';
@@ -10,20 +10,19 @@ export interface ProbeProps {
   readonly crossings: readonly Crossing[];
 }
 
-/** Half the length of the mark that shows a slope, and the shortest bracket that has room for its number, pixels. */
+/** Half the length of the mark that shows a slope, pixels. */
 const HALF_TANGENT = 20;
-const LEAST_BRACKET = 24;
 
-/** The line of one temperature: a dot with its slope on every curve, brackets with the heat between neighbours. */
+/** The line of one temperature: a dot with its slope on every curve, brackets between neighbours. */
 export function Probe({ frame, writer, temperatureK, crossings }: ProbeProps) {
-  const { temperature, heat, decimal } = writer;
+  const clip = useId();
+  const { temperature, heat } = writer;
   const x = pixelX(frame, onScale(temperatureK, temperature));
   const dots = crossings.map((crossing) => ({ ...crossing, y: pixelY(frame, onScale(crossing.enthalpy, heat)) }));
   const brackets = dots.slice(1).map((upper, i) => {
     const lower = dots[i] ?? upper;
-    return { from: lower.y, to: upper.y, heat: (upper.enthalpy - lower.enthalpy) * heat.scale };
+    return { from: lower.y, to: upper.y };
   });
-  const onRight = x < (frame.left + frame.width - frame.right) / 2;
   const tangent = (slope: number) => {
     const perPixel = (frame.xTo - frame.xFrom) / (frame.width - frame.left - frame.right);
     const rise = ((slope * heat.scale) / temperature.scale) * perPixel;
@@ -32,13 +31,15 @@ export function Probe({ frame, writer, temperatureK, crossings }: ProbeProps) {
     return { x: half, y: half * down };
   };
   return (
-    <svg
-      width={frame.width}
-      height={frame.height}
-      aria-hidden="true"
-      focusable="false"
-      style={{ position: 'absolute', inset: 0, overflow: 'visible', pointerEvents: 'none' }}
-    >
+    <g clipPath={`url(#${clip})`}>
+      <clipPath id={clip}>
+        <rect
+          x={frame.left - 7}
+          y={0}
+          width={frame.width - frame.left - frame.right + 14}
+          height={frame.height - frame.bottom + 7}
+        />
+      </clipPath>
       <line
         x1={x}
         x2={x}
@@ -48,26 +49,8 @@ export function Probe({ frame, writer, temperatureK, crossings }: ProbeProps) {
         strokeWidth={1}
         strokeDasharray="1 3"
       />
-      {brackets.map(({ from, to, heat: gap }, i) => (
-        <g key={i}>
-          <line x1={x} x2={x} y1={from} y2={to} stroke="var(--plotLine)" strokeWidth={1.6} />
-          {from - to >= LEAST_BRACKET && (
-            <text
-              x={onRight ? x + 8 : x - 8}
-              y={(from + to) / 2}
-              textAnchor={onRight ? 'start' : 'end'}
-              dominantBaseline="central"
-              fontSize={13}
-              fontWeight={600}
-              fill="var(--plotAxis)"
-              stroke="var(--paper)"
-              strokeWidth={4}
-              paintOrder="stroke"
-            >
-              {number(Number(gap.toPrecision(5)), decimal)}
-            </text>
-          )}
-        </g>
+      {brackets.map(({ from, to }, i) => (
+        <line key={i} x1={x} x2={x} y1={from} y2={to} stroke="var(--plotLine)" strokeWidth={1.6} />
       ))}
       {dots.map(({ name, y, slope, stable }) => {
         const way = slope === undefined ? undefined : tangent(slope);
@@ -95,6 +78,6 @@ export function Probe({ frame, writer, temperatureK, crossings }: ProbeProps) {
           </g>
         );
       })}
-    </svg>
+    </g>
   );
 }

@@ -35,12 +35,20 @@ const STEPS = 40;
 /**
  * What is drawn at one pressure: a line for every rung of the ladder, a dashed line where a phase is followed beyond
  * the temperatures at which it is stable, and the transitions between them.
+ *
+ * @param followed names of the phases that are followed beyond their own temperatures; all where none are named
  */
-export function diagramOf(substance: Substance, ladder: Ladder, window: Window): Diagram {
+export function diagramOf(
+  substance: Substance,
+  ladder: Ladder,
+  window: Window,
+  followed: readonly string[] | undefined,
+): Diagram {
   const stable = ladder.rungs.map((rung) =>
     lineOf(rung, true, clipped(rung.fromK, rung.toK, window), (t) => rung.enthalpy(t)),
   );
   const beyond = phasesOf(substance).flatMap(({ phase, form }) => {
+    if (followed?.includes(rungName({ phase, ...(form === undefined ? {} : { form }) })) === false) return [];
     const curve = curveOf(substance, phase, ladder.pressurePa, form);
     if (curve === undefined) return [];
     const own = ladder.rungs.filter((rung) => belongsTo(rung, phase, form));

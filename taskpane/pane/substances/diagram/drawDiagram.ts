@@ -1,14 +1,12 @@
-import { line, link, plot, text } from '@observablehq/plot';
+import { line, link, plot } from '@observablehq/plot';
 import { number } from '../../look/number';
 import { onScale, type UnitWriter } from '../facts/unitWriter';
 import type { Diagram } from './diagramOf';
 import type { Frame } from './frame';
-import type { PlacedLabel } from './placeLabels';
 
 export interface DiagramPicture {
   readonly diagram: Diagram;
   readonly frame: Frame;
-  readonly labels: readonly PlacedLabel[];
   readonly writer: UnitWriter;
   /** What a person who cannot see the picture is told. */
   readonly words: string;
@@ -24,14 +22,8 @@ const style = {
   maxWidth: 'none',
 };
 
-const INK: Readonly<Record<PlacedLabel['role'], string>> = {
-  phase: 'var(--plotPoint)',
-  transition: 'var(--warmAccent)',
-  beyond: 'var(--plotAxis)',
-};
-
-/** Draws axes, curves, transitions and names; the movable temperature is laid over it. */
-export function drawDiagram({ diagram, frame, labels, writer, words }: DiagramPicture): SVGSVGElement | HTMLElement {
+/** Draws axes, curves and transitions; names and the movable temperature are laid over it. */
+export function drawDiagram({ diagram, frame, writer, words }: DiagramPicture): SVGSVGElement | HTMLElement {
   const { temperature, heat, decimal } = writer;
   const tickFormat = (value: number) => number(value, decimal);
   const rows = diagram.lines.map((drawn) => ({
@@ -83,20 +75,6 @@ export function drawDiagram({ diagram, frame, labels, writer, words }: DiagramPi
         .map((one) =>
           line(one.rows, { x: 'x', y: 'y', stroke: 'var(--plotPoint)', strokeWidth: 3, strokeLinecap: 'round' }),
         ),
-      ...labels.map((label) =>
-        text([label.text], {
-          frameAnchor: 'top-left',
-          dx: label.x - frame.left,
-          dy: label.y - frame.top,
-          textAnchor: label.anchor,
-          lineAnchor: 'middle',
-          fill: INK[label.role],
-          fontStyle: label.role === 'beyond' ? 'italic' : 'normal',
-          fontWeight: label.role === 'transition' ? 600 : 400,
-          stroke: 'var(--paper)',
-          strokeWidth: 4,
-        }),
-      ),
     ],
   });
   for (const group of svg.querySelectorAll('[aria-label]')) group.removeAttribute('aria-label');

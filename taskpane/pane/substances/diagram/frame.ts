@@ -15,6 +15,8 @@ export interface Frame {
 }
 
 const MARGIN = { left: 54, right: 10, top: 26, bottom: 40 };
+/** Air above and below, as a share of the span: room for one name. */
+const AIR = 0.09;
 export const DIAGRAM_HEIGHT = 300;
 
 /** Turns SI into the units shown. */
@@ -31,7 +33,7 @@ export function frameOf({ lines, gaps, window }: Diagram, width: number, { x, y 
   ];
   const low = Math.min(...heights);
   const high = Math.max(...heights);
-  const air = high > low ? 0.05 * (high - low) : Math.max(1, Math.abs(high) * 0.05);
+  const air = high > low ? AIR * (high - low) : Math.max(1, Math.abs(high) * AIR);
   return {
     ...MARGIN,
     width,

@@ -3,7 +3,7 @@ import type { UnitWriter } from '../facts/unitWriter';
 import { onScale } from '../facts/unitWriter';
 import type { Diagram, DiagramLine } from './diagramOf';
 import { pixelX, pixelY, type Frame } from './frame';
-import { placeLabels, type LabelPlace, type PlacedLabel, type WantedLabel } from './placeLabels';
+import { placeLabels, type LabelArea, type LabelPlace, type PlacedLabel, type WantedLabel } from './placeLabels';
 
 /** Pixels between a label and what it names. */
 const OFF = 9;
@@ -24,7 +24,7 @@ export function labelsOf(diagram: Diagram, frame: Frame, writer: UnitWriter): Pl
   const gaps = diagram.gaps.map(({ change, temperatureK, below, above }): WantedLabel => {
     const middle = at(temperatureK, (below + above) / 2);
     return {
-      text: `${change} ${number(Number(((above - below) * heat.scale).toPrecision(4)), decimal)}`,
+      texts: gapTexts(change, (above - below) * heat.scale, decimal),
       role: 'transition',
       places: besideGap(middle, Math.abs(at(temperatureK, above).y - at(temperatureK, below).y) / 2),
     };
@@ -34,8 +34,8 @@ export function labelsOf(diagram: Diagram, frame: Frame, writer: UnitWriter): Pl
     const digits =
       slope === undefined ? '' : `, ${number(Number((slope * heatCapacity.scale).toPrecision(3)), decimal)}`;
     return {
-      text: line.stable ? `${line.name}${digits}` : line.name,
-      role: line.stable ? 'phase' : 'beyond',
+      texts: digits === '' ? [line.name] : [`${line.name}${digits}`, line.name],
+      role: 'phase',
       places: alongLine(pixels(line)),
     };
   };
@@ -43,17 +43,24 @@ export function labelsOf(diagram: Diagram, frame: Frame, writer: UnitWriter): Pl
     ...diagram.lines.flatMap((line) => between(pixels(line))),
     ...diagram.gaps.flatMap((gap) => between([at(gap.temperatureK, gap.below), at(gap.temperatureK, gap.above)], 12)),
   ];
-  const lines = [...diagram.lines].sort((a, b) => Number(b.stable) - Number(a.stable));
-  return placeLabels(
-    [...gaps, ...lines.map(phase)],
-    {
-      left: frame.left + 2,
-      right: frame.width - 2,
-      top: frame.top,
-      bottom: frame.height - frame.bottom,
-    },
-    drawn,
-  );
+  const stable = diagram.lines.filter((line) => line.stable);
+  const dashed = diagram.lines.filter((line) => !line.stable);
+  const beyond = [...new Set(dashed.map(({ name }) => name))].map((name): WantedLabel => {
+    const own = dashed.filter((line) => line.name === name);
+    return { texts: [name], role: 'beyond', places: own.flatMap((line) => alongLine(pixels(line))) };
+  });
+  return placeLabels([...gaps, ...stable.map(phase), ...beyond], labelArea(frame), drawn);
+}
+
+/** A change without a gap, where only the slope changes, says no number. */
+function gapTexts(change: string, latent: number, decimal: '.' | ','): string[] {
+  const digits = Number(latent.toPrecision(4));
+  return Math.abs(digits) < 1e-6 ? [change] : [`${change} ${number(digits, decimal)}`, change];
+}
+
+/** Where names may stand: inside the frame, and a little over its right edge. */
+export function labelArea({ left, width, top, height, bottom }: Frame): LabelArea {
+  return { left: left + 2, right: width - 2, top, bottom: height - bottom };
 }
 
 /** Mean slope over what is shown, J/(mol K). */
@@ -64,7 +71,7 @@ function meanSlope({ points }: DiagramLine): number | undefined {
 }
 
 function besideGap({ x, y }: Pixel, half: number): LabelPlace[] {
-  const heights = [0, 0.5 * half, -0.5 * half, half + OFF, -half - OFF, half + 2 * OFF, -half - 2 * OFF];
+  const heights = [0, 0.5 * half, -0.5 * half, half + OFF, -half - OFF, 0.8 * half, -0.8 * half];
   return heights.flatMap((up) => [
     { x: x + OFF, y: y - up, anchor: 'start' as const },
     { x: x - OFF, y: y - up, anchor: 'end' as const },
@@ -73,10 +80,10 @@ function besideGap({ x, y }: Pixel, half: number): LabelPlace[] {
 
 /** Above and below the line, at its middle, its quarters and its ends. */
 function alongLine(points: readonly Pixel[]): LabelPlace[] {
-  return [0.5, 0.3, 0.7, 0.12, 0.88].flatMap((share) => {
+  return [0.5, 0.3, 0.7, 0.1, 0.9, 0, 1].flatMap((share) => {
     const point = points[Math.round(share * (points.length - 1))];
     if (point === undefined) return [];
-    return [1.3, -1.3, 2.2, -2.2, 3.4, -3.4].flatMap((off) => [
+    return [1.3, -1.3, 1.8, -1.8, 2.3, -2.3].flatMap((off) => [
       { x: point.x, y: point.y + off * OFF, anchor: 'middle' as const },
       { x: point.x - 4, y: point.y + off * OFF, anchor: 'end' as const },
       { x: point.x + 4, y: point.y + off * OFF, anchor: 'start' as const },

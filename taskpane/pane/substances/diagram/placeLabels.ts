@@ -1,7 +1,8 @@
 /** A text that wants a place, with the points where it may begin, end or be centred: the first free one is taken. */
 export interface WantedLabel {
-  readonly text: string;
-  readonly role: 'phase' | 'transition' | 'beyond';
+  /** The text, and shorter ones that will do where there is no room for it. */
+  readonly texts: readonly string[];
+  readonly role: 'phase' | 'transition' | 'beyond' | 'probe';
   readonly places: readonly LabelPlace[];
 }
 
@@ -11,7 +12,10 @@ export interface LabelPlace {
   readonly anchor: 'start' | 'middle' | 'end';
 }
 
-export type PlacedLabel = Omit<WantedLabel, 'places'> & LabelPlace;
+export interface PlacedLabel extends LabelPlace {
+  readonly text: string;
+  readonly role: WantedLabel['role'];
+}
 
 /** Pixels, of a rectangle in which labels may stand. */
 export interface LabelArea {
@@ -28,12 +32,12 @@ interface Box {
   readonly bottom: number;
 }
 
-/** Width of a letter and half the height of a line in the diagram's type, pixels. */
-const LETTER = 6.4;
+/** Width of a letter in the widest of the pane's typefaces, and half the height of a line, pixels. */
+const LETTER: Readonly<Record<WantedLabel['role'], number>> = { phase: 6.4, beyond: 6.4, transition: 7.3, probe: 7.3 };
 const HALF_LINE = 7;
 
-function boxOf(text: string, { x, y, anchor }: LabelPlace): Box {
-  const width = text.length * LETTER;
+function boxOf({ text, role, x, y, anchor }: PlacedLabel): Box {
+  const width = text.length * LETTER[role];
   const left = anchor === 'start' ? x : anchor === 'end' ? x - width : x - width / 2;
   return { left, right: left + width, top: y - HALF_LINE, bottom: y + HALF_LINE };
 }
@@ -49,23 +53,31 @@ export function placeLabels(
   wanted: readonly WantedLabel[],
   area: LabelArea,
   drawn: readonly { readonly x: number; readonly y: number }[],
+  already: readonly PlacedLabel[] = [],
 ): PlacedLabel[] {
-  const boxes: Box[] = [];
+  const boxes = already.map(boxOf);
   const placed: PlacedLabel[] = [];
-  for (const { text, role, places } of wanted) {
-    const free = places.find((place) => {
-      const box = boxOf(text, place);
-      const inside =
-        box.left >= area.left && box.right <= area.right && box.top >= area.top && box.bottom <= area.bottom;
-      return (
-        inside &&
-        boxes.every((other) => apart(box, other)) &&
-        drawn.every(({ x, y }) => x < box.left || x > box.right || y < box.top || y > box.bottom)
-      );
-    });
-    if (free === undefined) continue;
-    boxes.push(boxOf(text, free));
-    placed.push({ text, role, ...free });
+  for (const { texts, role, places } of wanted) {
+    const fitting = texts
+      .flatMap((text) => places.map((place) => ({ text, role, ...place })))
+      .find((label) => isFree(boxOf(label), area, boxes, drawn));
+    if (fitting === undefined) continue;
+    boxes.push(boxOf(fitting));
+    placed.push(fitting);
   }
   return placed;
+}
+
+function isFree(
+  box: Box,
+  area: LabelArea,
+  boxes: readonly Box[],
+  drawn: readonly { readonly x: number; readonly y: number }[],
+): boolean {
+  const inside = box.left >= area.left && box.right <= area.right && box.top >= area.top && box.bottom <= area.bottom;
+  return (
+    inside &&
+    boxes.every((other) => apart(box, other)) &&
+    drawn.every(({ x, y }) => x < box.left || x > box.right || y < box.top || y > box.bottom)
+  );
 }

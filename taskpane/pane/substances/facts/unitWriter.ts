@@ -3,6 +3,7 @@ import { fromMolar } from '../../../../core/units/fromMolar';
 import { fromSi } from '../../../../core/units/fromSi';
 import type { Linear } from '../../../../core/units/linear';
 import type { Unit } from '../../../../core/units/unit';
+import { unitOf } from '../../../../core/units/unitOf';
 import type { Settings } from '../../../../functions/settings/settings';
 import { number, prettyUnit } from '../../look/number';
 import { roundToUncertainty } from '../../look/roundToUncertainty';
@@ -19,13 +20,26 @@ export interface UnitWriter {
   readonly heat: Scale;
   readonly heatCapacity: Scale;
   readonly decimal: '.' | ',';
+  /** Unit settings that a formula needs beside the workbook's, where a material without a molar mass can't follow those. */
+  readonly ownUnits: { readonly heat?: string; readonly heatCapacity?: string };
   /** Writes temperatures and pressures inside the words of a refusal. */
   readonly words: QuantityWriter;
 }
 
-/** Compiles the conversions. @throws Problem where a unit per mass is asked of a substance without a molar mass */
+/**
+ * Compiles the conversions.
+ *
+ * @param settings the workbook's
+ * @param molarMass kg/mol; NaN for a material without one, which is counted per kilogram whatever the workbook says
+ */
 export function unitWriter(settings: Settings, molarMass: number): UnitWriter {
-  const { units, decimal } = settings;
+  const { decimal } = settings;
+  const ownUnits = Number.isNaN(molarMass) ? perKilogram(settings) : {};
+  const units = {
+    ...settings.units,
+    ...(ownUnits.heat === undefined ? {} : { heat: unitOf(ownUnits.heat, 'heat') }),
+    ...(ownUnits.heatCapacity === undefined ? {} : { heatCapacity: unitOf(ownUnits.heatCapacity, 'heatCapacity') }),
+  };
   const scaled = (linear: Linear, { symbol }: Unit): Scale => ({ ...linear, unit: prettyUnit(symbol) });
   const temperature = scaled(fromSi(units.temperature), units.temperature);
   const pressure = scaled(fromSi(units.pressure, settings.barometerPa), units.pressure);
@@ -35,6 +49,7 @@ export function unitWriter(settings: Settings, molarMass: number): UnitWriter {
     heat: scaled(fromMolar(units.heat, molarMass), units.heat),
     heatCapacity: scaled(fromMolar(units.heatCapacity, molarMass), units.heatCapacity),
     decimal,
+    ownUnits,
     words: {
       temperature: (kelvin) => written(kelvin, temperature, decimal),
       pressure: (pascal) => written(pascal, pressure, decimal),
@@ -42,9 +57,21 @@ export function unitWriter(settings: Settings, molarMass: number): UnitWriter {
   };
 }
 
+function perKilogram({ units }: Settings): UnitWriter['ownUnits'] {
+  return {
+    ...(units.heat.basis === 'mole' ? { heat: 'kJ/kg' } : {}),
+    ...(units.heatCapacity.basis === 'mole' ? { heatCapacity: 'kJ/(kg K)' } : {}),
+  };
+}
+
 /** An SI value with its unit, six significant digits. */
 export function written(si: number, scale: Scale, decimal: '.' | ','): string {
   return `${number(onScale(si, scale), decimal)} ${scale.unit}`;
+}
+
+/** A temperature to two decimals, for labels. */
+export function roundTemperature(kelvin: number, scale: Scale, decimal: '.' | ','): string {
+  return `${number(Number(onScale(kelvin, scale).toFixed(2)) + 0, decimal)} ${scale.unit}`;
 }
 
 export function onScale(si: number, { scale, offset }: Linear): number {
