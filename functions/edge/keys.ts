@@ -1,7 +1,6 @@
 import {
   findChange,
   findPhaseOf,
-  findSubstance,
   refused,
   type FoundChange,
   type FoundPhase,
@@ -10,6 +9,7 @@ import type { LatentKind } from '../../core/answer';
 import { Problem } from '../../core/problem';
 import { parseQuantity } from '../../core/units/parseQuantity';
 import type { Substance, Surface } from '../../core/substance';
+import { currentRegistry } from '../house/currentRegistry';
 import type { Settings } from '../settings/settings';
 import type { Key } from './spec';
 
@@ -25,7 +25,7 @@ export function textKey(argument: string, key: Key): string {
 }
 
 export function substanceKey(key: Key): Substance {
-  return findSubstance(textKey('substance', key));
+  return currentRegistry().find(textKey('substance', key));
 }
 
 export function changeKey(substance: Substance, key: Key): FoundChange {

@@ -1,3 +1,4 @@
+import { houseStore } from '../house/store';
 import type { Settings } from '../settings/settings';
 import type { ArgKind, CellwiseSpec, Key, Plan } from './spec';
 import { unitFor } from './unitFor';
@@ -14,10 +15,10 @@ export interface LastPlan {
 
 let kept = new WeakMap<CellwiseSpec, LastPlan>();
 
-/** Drops every kept plan: what a name means has changed. */
-export function forgetPlans(): void {
+// What a name means may have changed: no kept plan holds.
+houseStore.subscribe(() => {
   kept = new WeakMap();
-}
+});
 
 export function lastPlanOf(spec: CellwiseSpec): LastPlan | undefined {
   return kept.get(spec);
