@@ -19,6 +19,7 @@ export function loadFunctions(): Readonly<Record<string, CellFunction | undefine
     CustomFunctions: { associate: (id: string, fn: CellFunction) => void (mappings[id] = fn), Error: HostError },
   });
   vm.runInThisContext(readFileSync(path.join(import.meta.dirname, '../../dist/functions.js'), 'utf8'));
+  Latentry.house.publish({ state: 'absent' });
   Latentry.settings.publish({ state: 'absent' });
   return mappings;
 }

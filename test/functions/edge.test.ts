@@ -1,5 +1,6 @@
 import { beforeEach, describe, expect, it } from 'vitest';
 import { DEFAULT_SETTINGS, parseSettingsBlock, settingsRows } from '../../functions/settings/settings';
+import { houseStore } from '../../functions/house/store';
 import { settingsStore } from '../../functions/settings/store';
 import { setBlankReader } from '../../functions/edge/blanks';
 import { enthalpy } from '../../functions/enthalpy';
@@ -19,6 +20,7 @@ const at60 = (value: unknown): void => {
 
 beforeEach(() => {
   settingsStore.publish({ state: 'absent' });
+  houseStore.publish({ state: 'absent' });
   setBlankReader(undefined);
 });
 
