@@ -35,6 +35,13 @@ export { readRows, type Rows } from './fit/readRows';
 export { readForm, type Form } from './kirchhoff/form';
 export { kirchhoff, type KirchhoffInput, type KirchhoffResult } from './kirchhoff/kirchhoff';
 
+export { nasa9Cp } from './nasa9/nasa9Cp';
+export { nasa9Enthalpy } from './nasa9/nasa9Enthalpy';
+export { nasa9Entropy } from './nasa9/nasa9Entropy';
+export { nasa9Gibbs } from './nasa9/nasa9Gibbs';
+export { nasa9Species } from './nasa9/nasa9Species';
+export type { Nasa9Species } from './nasa9/nasa9Types';
+
 export { enthalpy } from './path/enthalpy';
 export { heat } from './path/heat';
 export { heatSteps, type HeatPath, type HeatStep } from './path/heatSteps';

@@ -59,9 +59,15 @@ export const changeWords: readonly string[] = [
 export function findChange(substance: Substance, text: string): FoundChange {
   const plain = plainName(text);
   const word = CHANGE_WORDS[plain];
-  const named = substance.changes.find((change) => plainName(change) === (word?.[0] ?? plain));
+  const { changes } = substance;
+  // with its hyphen first: II-I and I-II differ by nothing else
+  const exact = changes.find((change) => plainParts(change) === plainParts(text));
+  if (exact !== undefined) return { change: exact, sign: 1 };
+  const turned = changes.find((change) => plainParts(reversed(change)) === plainParts(text));
+  if (turned !== undefined) return { change: turned, sign: -1 };
+  const named = changes.find((change) => plainName(change) === (word?.[0] ?? plain) && !eitherWay(change));
   if (named !== undefined) return { change: named, sign: word?.[1] ?? 1 };
-  const back = substance.changes.find((change) => reversed(change) === plain);
+  const back = changes.find((change) => plainName(reversed(change)) === plain && !eitherWay(change));
   if (back !== undefined) return { change: back, sign: -1 };
   const lambda = substance.lambdaPoints?.find(({ name }) => plainName(name) === plain);
   if (lambda !== undefined) {
@@ -83,7 +89,17 @@ export function findChange(substance: Substance, text: string): FoundChange {
 
 function reversed(change: Change): string {
   const at = change.indexOf('-');
-  return at < 0 ? '' : plainName(`${change.slice(at + 1)}-${change.slice(0, at)}`);
+  return at < 0 ? '' : `${change.slice(at + 1)}-${change.slice(0, at)}`;
+}
+
+/** A name without regard to case and spaces, its hyphens kept. */
+function plainParts(text: string): string {
+  return text.split('-').map(plainName).join('-');
+}
+
+/** True where a name reads the same both ways once its hyphen is gone, as III-II does. */
+function eitherWay(change: Change): boolean {
+  return change.includes('-') && plainName(change) === plainName(reversed(change));
 }
 
 function listed(words: readonly string[]): string {

@@ -16,6 +16,7 @@ import type { Nasa9Interval, Nasa9Species } from './nasa9Types';
  * @returns J/(mol K)
  * @source McBride, Zehe & Gordon, NASA/TP-2002-211556 (2002), equation for Cp°/R
  * @example
+ * import { nasa9Cp, nasa9Species } from 'latentry';
  * nasa9Cp(nasa9Species('N2'), 298.15) // => 29.1242
  */
 export function nasa9Cp(species: Nasa9Species, temperatureK: number): number {
@@ -29,6 +30,9 @@ export function nasa9Cp(species: Nasa9Species, temperatureK: number): number {
 
 /** cp/R of one interval. */
 export function cpOverR({ a }: Nasa9Interval, t: number): number {
-  const [a1 = 0, a2 = 0, a3 = 0, a4 = 0, a5 = 0, a6 = 0, a7 = 0] = a;
-  return (a1 / t + a2) / t + a3 + t * (a4 + t * (a5 + t * (a6 + t * a7)));
+  return (
+    ((a[0] ?? 0) / t + (a[1] ?? 0)) / t +
+    (a[2] ?? 0) +
+    t * ((a[3] ?? 0) + t * ((a[4] ?? 0) + t * ((a[5] ?? 0) + t * (a[6] ?? 0))))
+  );
 }

@@ -15,21 +15,22 @@ import type { Nasa9Interval, Nasa9Species } from './nasa9Types';
  * @returns J/mol
  * @source McBride, Zehe & Gordon, NASA/TP-2002-211556 (2002), equation for H°/(RT)
  * @example
+ * import { nasa9Enthalpy, nasa9Species } from 'latentry';
  * nasa9Enthalpy(nasa9Species('C2H5OH'), 298.15) // => -234950
  */
 export function nasa9Enthalpy(species: Nasa9Species, temperatureK: number): number {
   const { fromK, toK } = species;
   if (temperatureK < fromK) {
     const { floor, height, thetaK } = species.low;
-    const start = overR(intervalAt(species, fromK), fromK);
+    const start = enthalpyOverR(intervalAt(species, fromK), fromK);
     const heat = (t: number): number => floor * t + height * vibration(thetaK, t);
     return NASA9_R * (start + heat(temperatureK) - heat(fromK));
   }
   if (temperatureK > toK) {
     const last = intervalAt(species, toK);
-    return NASA9_R * (overR(last, toK) + cpOverR(last, toK) * (temperatureK - toK));
+    return NASA9_R * (enthalpyOverR(last, toK) + cpOverR(last, toK) * (temperatureK - toK));
   }
-  return NASA9_R * overR(intervalAt(species, temperatureK), temperatureK);
+  return NASA9_R * enthalpyOverR(intervalAt(species, temperatureK), temperatureK);
 }
 
 /** θ/(e^(θ/T) − 1): what one vibration holds at T, K. */
@@ -38,7 +39,11 @@ function vibration(thetaK: number, t: number): number {
 }
 
 /** H/R of one interval, K. */
-function overR({ a, b1 }: Nasa9Interval, t: number): number {
-  const [a1 = 0, a2 = 0, a3 = 0, a4 = 0, a5 = 0, a6 = 0, a7 = 0] = a;
-  return -a1 / t + a2 * Math.log(t) + b1 + t * (a3 + t * (a4 / 2 + t * (a5 / 3 + t * (a6 / 4 + (t * a7) / 5))));
+export function enthalpyOverR({ a, b1 }: Nasa9Interval, t: number, logarithm = Math.log(t)): number {
+  return (
+    -(a[0] ?? 0) / t +
+    (a[1] ?? 0) * logarithm +
+    b1 +
+    t * ((a[2] ?? 0) + t * ((a[3] ?? 0) / 2 + t * ((a[4] ?? 0) / 3 + t * ((a[5] ?? 0) / 4 + (t * (a[6] ?? 0)) / 5))))
+  );
 }

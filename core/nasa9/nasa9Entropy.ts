@@ -15,21 +15,22 @@ import type { Nasa9Interval, Nasa9Species } from './nasa9Types';
  * @returns J/(mol K)
  * @source McBride, Zehe & Gordon, NASA/TP-2002-211556 (2002), equation for S°/R
  * @example
+ * import { nasa9Entropy, nasa9Species } from 'latentry';
  * nasa9Entropy(nasa9Species('N2'), 298.15) // => 191.6098
  */
 export function nasa9Entropy(species: Nasa9Species, temperatureK: number): number {
   const { fromK, toK } = species;
   if (temperatureK < fromK) {
     const { floor, height, thetaK } = species.low;
-    const start = overR(intervalAt(species, fromK), fromK);
+    const start = entropyOverR(intervalAt(species, fromK), fromK);
     const gain = (t: number): number => floor * Math.log(t) + height * vibration(thetaK / t);
     return NASA9_R * (start + gain(temperatureK) - gain(fromK));
   }
   if (temperatureK > toK) {
     const last = intervalAt(species, toK);
-    return NASA9_R * (overR(last, toK) + cpOverR(last, toK) * Math.log(temperatureK / toK));
+    return NASA9_R * (entropyOverR(last, toK) + cpOverR(last, toK) * Math.log(temperatureK / toK));
   }
-  return NASA9_R * overR(intervalAt(species, temperatureK), temperatureK);
+  return NASA9_R * entropyOverR(intervalAt(species, temperatureK), temperatureK);
 }
 
 /** Entropy of one vibration at x = θ/T, divided by R. */
@@ -38,7 +39,11 @@ function vibration(x: number): number {
 }
 
 /** S/R of one interval. */
-function overR({ a, b2 }: Nasa9Interval, t: number): number {
-  const [a1 = 0, a2 = 0, a3 = 0, a4 = 0, a5 = 0, a6 = 0, a7 = 0] = a;
-  return (-a1 / (2 * t) - a2) / t + a3 * Math.log(t) + b2 + t * (a4 + t * (a5 / 2 + t * (a6 / 3 + (t * a7) / 4)));
+export function entropyOverR({ a, b2 }: Nasa9Interval, t: number, logarithm = Math.log(t)): number {
+  return (
+    (-(a[0] ?? 0) / (2 * t) - (a[1] ?? 0)) / t +
+    (a[2] ?? 0) * logarithm +
+    b2 +
+    t * ((a[3] ?? 0) + t * ((a[4] ?? 0) / 2 + t * ((a[5] ?? 0) / 3 + (t * (a[6] ?? 0)) / 4)))
+  );
 }

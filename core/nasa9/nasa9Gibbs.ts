@@ -1,6 +1,7 @@
-import { nasa9Enthalpy } from './nasa9Enthalpy';
-import { nasa9Entropy } from './nasa9Entropy';
+import { emptyNasa9State, nasa9State } from './nasa9State';
 import type { Nasa9Species } from './nasa9Types';
+
+const state = emptyNasa9State();
 
 /**
  * Gibbs energy at 1 bar.
@@ -12,8 +13,10 @@ import type { Nasa9Species } from './nasa9Types';
  * @returns J/mol
  * @source McBride, Zehe & Gordon, NASA/TP-2002-211556 (2002)
  * @example
+ * import { nasa9Gibbs, nasa9Species } from 'latentry';
  * nasa9Gibbs(nasa9Species('N2'), 298.15) // => -57128.4
  */
 export function nasa9Gibbs(species: Nasa9Species, temperatureK: number): number {
-  return nasa9Enthalpy(species, temperatureK) - temperatureK * nasa9Entropy(species, temperatureK);
+  nasa9State(species, temperatureK, state);
+  return state.gibbs;
 }

@@ -26,6 +26,7 @@ const read = new Map<string, Nasa9Species>();
  * @throws Problem `missing` for a species that is not carried here
  * @source McBride, Zehe & Gordon, NASA/TP-2002-211556 (2002), data release of 9 September 2021
  * @example
+ * import { nasa9Species } from 'latentry';
  * nasa9Species('AL2O3(L)').fromK // => 2327
  */
 export function nasa9Species(name: string): Nasa9Species {

@@ -3,11 +3,15 @@ import type { Change, Curve } from '../../substance';
 import { nasa9Cp } from '../nasa9Cp';
 import { nasa9Enthalpy } from '../nasa9Enthalpy';
 import { nasa9Gibbs } from '../nasa9Gibbs';
+import { NASA9_R } from '../nasa9Source';
+import { emptyNasa9State, nasa9State } from '../nasa9State';
 import type { CondensedForm } from './forms';
 import { IDEAL_GAS, METASTABLE } from './marks';
 import { checkPressure, missing, noLine, noSuchChange, noVapour, solidAt, type CondensedModel } from './model';
 import type { SaturationLine } from './saturation';
 import { BOILING_WORDS, SPREAD_WORDS, spreadOf, vapourPart } from './uncertainty';
+
+const phase = emptyNasa9State();
 
 export type Asked = 'latent' | 'slope';
 
@@ -138,11 +142,13 @@ function alongLine(model: CondensedModel, change: Change, asked: Asked): Curve {
   if (vapour === undefined || line === undefined) throw noLine(model, change);
   const part = asked === 'latent' ? vapourPart(model) : undefined;
   const at = (t: number): number => {
-    const { species } = formAt(t);
-    const { enthalpy, heatCapacity, enthalpyPerPascal, pressurePa } = vapour.over(t, nasa9Gibbs(species, t));
-    if (asked === 'latent') return enthalpy - nasa9Enthalpy(species, t);
-    const along = enthalpyPerPascal === 0 ? 0 : (enthalpyPerPascal * pressurePa * line.steepness(t)) / t;
-    return heatCapacity - nasa9Cp(species, t) + along;
+    nasa9State(formAt(t).species, t, phase);
+    const { enthalpy, heatCapacity, enthalpyPerPascal, pressurePa, unitsPerMolecule } = vapour.over(t, phase.gibbs);
+    const heat = enthalpy - phase.enthalpy;
+    if (asked === 'latent') return heat;
+    // dp/dT = ν·p·Δh/(R·T²)
+    const along = (enthalpyPerPascal * unitsPerMolecule * pressurePa * heat) / (NASA9_R * t * t);
+    return heatCapacity - phase.heatCapacity + along;
   };
   return {
     axis: 'temperature',

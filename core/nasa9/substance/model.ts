@@ -5,7 +5,7 @@ import type { Nasa9Species } from '../nasa9Types';
 import { formsOf, METASTABLE_PART, type CondensedForm } from './forms';
 import type { CondensedRecord } from './record';
 import { LEAST_PRESSURE_PA, saturationLine, type SaturationLine } from './saturation';
-import { Vapour } from './vapour';
+import { makeVapour, type Vapour } from './vapour';
 
 /** Above this pressure the volumes that the data set lacks would be felt: 50 cm³/mol · 10 MPa = 0.5 kJ/mol. */
 export const HIGHEST_PRESSURE_PA = 1e7;
@@ -29,7 +29,7 @@ export function makeModel(record: CondensedRecord): CondensedModel {
   const forms = formsOf(record);
   const solids = forms.filter(({ phase }) => phase === 'solid');
   const liquid = forms.find(({ phase }) => phase === 'liquid');
-  const vapour = record.vapour === undefined ? undefined : new Vapour(record.vapour);
+  const vapour = record.vapour === undefined ? undefined : makeVapour(record.vapour);
   const species = [...forms.map((form) => form.species), ...(vapour?.species ?? [])];
   const model = {
     record,

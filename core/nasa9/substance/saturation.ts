@@ -1,8 +1,7 @@
-import { nasa9Enthalpy } from '../nasa9Enthalpy';
-import { nasa9Gibbs } from '../nasa9Gibbs';
 import { NASA9_R } from '../nasa9Source';
+import { emptyNasa9State, nasa9State } from '../nasa9State';
 import type { Nasa9Species } from '../nasa9Types';
-import type { Vapour } from './vapour';
+import type { Vapour, VapourState } from './vapour';
 
 /** How many pressures a line keeps to start its inverse from. */
 const NODES = 24;
@@ -38,12 +37,16 @@ export function saturationLine(
   range: readonly [fromK: number, toK: number],
   highestPa: number,
 ): SaturationLine {
-  const pressurePa = (t: number): number => vapour.pressureOver(t, nasa9Gibbs(condensed(t), t));
-  const steepness = (t: number): number => {
-    const one = condensed(t);
-    const { enthalpy, unitsPerMolecule } = vapour.over(t, nasa9Gibbs(one, t));
-    return (unitsPerMolecule * (enthalpy - nasa9Enthalpy(one, t))) / (NASA9_R * t);
+  const phase = emptyNasa9State();
+  /** Fills the state of the condensed phase and gives that of its vapour. */
+  const vapourOver = (t: number): VapourState => {
+    nasa9State(condensed(t), t, phase);
+    return vapour.over(t, phase.gibbs);
   };
+  const steep = ({ unitsPerMolecule, enthalpy }: VapourState, t: number): number =>
+    (unitsPerMolecule * (enthalpy - phase.enthalpy)) / (NASA9_R * t);
+  const pressurePa = (t: number): number => vapourOver(t).pressurePa;
+  const steepness = (t: number): number => steep(vapourOver(t), t);
   const fromK = reaching(pressurePa, LEAST_PRESSURE_PA, range);
   const toK = reaching(pressurePa, highestPa, [fromK, range[1]]);
   const inverse = new Float64Array(NODES);
@@ -59,9 +62,11 @@ export function saturationLine(
     const [x0 = 0, x1 = 0, y0 = 0, y1 = 0] = [inverse[i - 1], inverse[i], lnP[i - 1], lnP[i]];
     let t = 1 / (x0 + ((wanted - y0) / (y1 - y0)) * (x1 - x0));
     for (let step = 0; step < 12; step++) {
-      const change = (wanted - Math.log(pressurePa(t))) / steepness(t);
+      const state = vapourOver(t);
+      const change = (wanted - Math.log(state.pressurePa)) / steep(state, t);
       t /= 1 - change;
-      if (!(Math.abs(change) > 1e-9)) break;
+      // the next step would change the last digits only
+      if (!(Math.abs(change) > 1e-8)) break;
     }
     return t;
   };

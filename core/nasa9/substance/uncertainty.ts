@@ -38,5 +38,5 @@ export function vapourPart(model: CondensedModel): number | undefined {
   const printed = model.record.vapour?.boils;
   const computed = boilingK(model);
   if (printed === undefined || computed === undefined) return undefined;
-  return Math.max(LEAST_VAPOUR_PART, Math.abs(computed - printed[0]) / printed[0]);
+  return Math.max(LEAST_VAPOUR_PART, Math.abs(computed - printed[0]) / Math.min(computed, printed[0]));
 }
