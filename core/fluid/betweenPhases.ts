@@ -1,0 +1,95 @@
+import type { Mark } from '../answer';
+import { Problem, shortNumber } from '../problem';
+import type { Change, Curve, Phase } from '../substance';
+import { noSuchChange } from './coexistence';
+import { ATMOSPHERE_PA, STANDARD_PRESSURE_PA } from './constants';
+import { fluidBranch, idealBranch, type FluidBranch } from './fluidBranch';
+import { fluidCurve } from './fluidCurve';
+import { unconfirmedMark } from './fluidMarks';
+import { lacking, type FluidParts } from './fluidParts';
+import { spreadAt } from './spreadAt';
+
+const ENDS: Readonly<Record<string, readonly [cold: Phase, hot: Phase]>> = {
+  fusion: ['solid', 'liquid'],
+  vaporization: ['liquid', 'gas'],
+  sublimation: ['solid', 'gas'],
+};
+
+/** Latent heat or its slope between two phases at one pressure: `isobaric` of the real phases, `standard` at 1 bar with ideal gas. */
+export function betweenPhases(
+  parts: FluidParts,
+  change: Change,
+  kind: 'isobaric' | 'standard',
+  answered: 'latent' | 'slope',
+  pressurePa = ATMOSPHERE_PA,
+): Curve {
+  const { numbers, line } = parts;
+  const ends = ENDS[change];
+  if (ends === undefined) throw noSuchChange(parts, change);
+  const pressure = kind === 'standard' ? STANDARD_PRESSURE_PA : pressurePa;
+  const where = kind === 'standard' ? 'in its standard states (1 bar)' : `at ${shortNumber(pressure)} Pa`;
+  const subject = `${change} ${answered === 'latent' ? '' : 'slope '}of ${numbers.name} ${where}`;
+  if (change === 'fusion' && (answered === 'latent' || parts.solid === undefined)) {
+    return fusionAtPoint(parts, kind, answered, subject);
+  }
+  const cold = fluidBranch(parts, ends[0], pressure);
+  const ideal = kind === 'standard' && ends[1] === 'gas';
+  const hot = ideal ? idealBranch(parts) : fluidBranch(parts, ends[1], pressure);
+  const from = Math.max(cold.fromK, hot.fromK);
+  const to = Math.min(cold.toK, hot.toK);
+  if (!(from <= to)) throw apart(subject, cold, hot);
+  const { nodes, latent } = numbers.spread;
+  const relative = (k: number): number => spreadAt(nodes, latent, k / numbers.criticalK);
+  return fluidCurve({
+    from,
+    to,
+    subject,
+    unit: answered === 'latent' ? 'J/mol' : 'J/(mol K)',
+    kind,
+    method: `${hot.method}, less ${cold.method}`,
+    sources: [...new Set([...numbers.sources.latent, ...numbers.sources.heatCapacity, ...numbers.sources.gas])],
+    value:
+      answered === 'latent'
+        ? (k) => hot.enthalpy(k) - cold.enthalpy(k)
+        : (k) => hot.heatCapacity(k) - cold.heatCapacity(k),
+    ...(answered === 'latent' && change === 'vaporization'
+      ? { uncertaintyAt: (k: number) => (k < numbers.criticalK ? relative(k) * line.latent(k) : undefined) }
+      : {}),
+    marksAt: (k): readonly Mark[] => [...cold.marks(k), ...(ideal ? [] : hot.marks(k))],
+  });
+}
+
+/** Melting at its own temperature: what the cited enthalpy of fusion says. */
+function fusionAtPoint(
+  { numbers, solid, liquid }: FluidParts,
+  kind: 'isobaric' | 'standard',
+  answered: 'latent' | 'slope',
+  subject: string,
+): Curve {
+  const { fusion, meltingK, name } = numbers;
+  if (fusion === undefined) throw lacking(`enthalpy of fusion of ${name}`);
+  if (answered === 'slope') throw lacking(`heat capacity of solid ${name}`);
+  const { value, uncertainty, source, confirmed } = fusion;
+  const at = solid === undefined ? () => value : (k: number) => liquid.enthalpy(k, ATMOSPHERE_PA) - solid.enthalpy(k);
+  return fluidCurve({
+    from: solid === undefined ? meltingK : Math.max(numbers.lineFromK, solid.fromK),
+    to: meltingK,
+    subject,
+    unit: 'J/mol',
+    kind,
+    method:
+      solid === undefined ? 'cited enthalpy of fusion' : 'cited enthalpy of fusion and heat capacities of both phases',
+    sources: [source],
+    value: at,
+    ...(uncertainty === undefined ? {} : { uncertaintyAt: () => uncertainty }),
+    ...(confirmed ? {} : { marksAt: () => unconfirmedMark('enthalpy of fusion') }),
+  });
+}
+
+function apart(subject: string, cold: FluidBranch, hot: FluidBranch): Problem {
+  return new Problem({
+    code: 'missing',
+    subject,
+    reason: `the colder phase ends at ${shortNumber(cold.toK)} K and the warmer one begins at ${shortNumber(hot.fromK)} K`,
+  });
+}

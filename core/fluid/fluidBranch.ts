@@ -1,0 +1,156 @@
+import type { Mark } from '../answer';
+import { Problem } from '../problem';
+import type { Phase } from '../substance';
+import { lacking, requireGas, type FluidParts } from './fluidParts';
+
+/** One phase at one pressure: where it is described, and its two curves. */
+export interface FluidBranch {
+  readonly fromK: number;
+  readonly toK: number;
+  readonly method: string;
+  /** J/mol; NaN where there is no such state. */
+  enthalpy(temperatureK: number): number;
+  /** J/(mol K) */
+  heatCapacity(temperatureK: number): number;
+  marks(temperatureK: number): readonly Mark[];
+}
+
+const NO_MARKS: readonly Mark[] = [];
+const metastable = (text: string): readonly Mark[] => [{ code: 'metastable', text }];
+const SUPERCOOLED = metastable('supercooled liquid: the solid is the stable phase here');
+const SUPERHEATED = metastable('superheated liquid: vapour is the stable phase here');
+const SUPERSATURATED = metastable('supersaturated vapour: liquid is the stable phase here');
+const IDEAL: readonly Mark[] = [{ code: 'ideal-gas', text: 'ideal gas' }];
+
+/** A metastable branch is followed until its heat capacity has grown by half since the saturated phase. */
+const HIGHEST_GROWTH = 1.5;
+
+/** Liquid is described to this part of the critical temperature where it does not boil before. */
+const HOTTEST_LIQUID = 0.95;
+
+/** Vapour and ideal gas end here at the latest, K. */
+const HOTTEST_GAS_K = 1500;
+
+/** Lowest pressure of the liquid and of paths, Pa. */
+export const LOWEST_PRESSURE_PA = 1e-10;
+
+export function requirePressure(pressurePa: number, to: number, subject: string): void {
+  if (pressurePa >= LOWEST_PRESSURE_PA && pressurePa <= to) return;
+  if (!Number.isFinite(pressurePa)) {
+    throw new Problem({
+      code: 'argument',
+      argument: 'pressure',
+      allowed: 'a finite number',
+      received: String(pressurePa),
+    });
+  }
+  throw new Problem({
+    code: 'range',
+    argument: 'pressure',
+    quantity: 'pressure',
+    received: pressurePa,
+    from: LOWEST_PRESSURE_PA,
+    to,
+    subject,
+  });
+}
+
+/** The branch of a phase at a pressure. */
+export function fluidBranch(parts: FluidParts, phase: Phase, pressurePa: number): FluidBranch {
+  return phase === 'solid'
+    ? solidBranch(parts)
+    : phase === 'liquid'
+      ? liquidBranch(parts, pressurePa)
+      : gasBranch(parts, pressurePa);
+}
+
+function solidBranch({ solid, numbers }: FluidParts): FluidBranch {
+  if (solid === undefined) throw lacking(`heat capacity of solid ${numbers.name}`);
+  return {
+    fromK: solid.fromK,
+    toK: numbers.meltingK,
+    method: 'enthalpy of fusion and heat capacity of the solid',
+    enthalpy: solid.enthalpy,
+    heatCapacity: solid.heatCapacity,
+    marks: () => NO_MARKS,
+  };
+}
+
+function liquidBranch({ liquid, line, numbers, highestLiquidPa }: FluidParts, pressurePa: number): FluidBranch {
+  const { name, lineFromK, meltingK, criticalK, vapourToK } = numbers;
+  requirePressure(pressurePa, highestLiquidPa, `liquid ${name}`);
+  const boils = pressurePa < line.pressure(vapourToK) ? line.temperature(pressurePa) : Infinity;
+  const end = HOTTEST_LIQUID * criticalK;
+  const sound = (k: number): boolean =>
+    liquid.heatCapacity(k, pressurePa) <= HIGHEST_GROWTH * liquid.saturatedHeatCapacity(k);
+  const toK = boils === Infinity ? end : edge(sound, Math.max(boils, lineFromK), Math.max(boils, end));
+  return {
+    fromK: lineFromK,
+    toK,
+    method: 'enthalpy of the saturated liquid and its change with pressure',
+    enthalpy: (k) => (k < criticalK ? liquid.enthalpy(k, pressurePa) : NaN),
+    heatCapacity: (k) => (k < criticalK ? liquid.heatCapacity(k, pressurePa) : NaN),
+    marks: (k) => (k < meltingK ? SUPERCOOLED : k > boils ? SUPERHEATED : NO_MARKS),
+  };
+}
+
+function gasBranch(parts: FluidParts, pressurePa: number): FluidBranch {
+  const { line, numbers, highestVapourPa } = parts;
+  const gas = requireGas(parts);
+  requirePressure(pressurePa, highestVapourPa, `${numbers.name} vapour`);
+  const coldest = coldestVapour(parts);
+  const dew = Math.max(coldest, line.temperature(Math.max(pressurePa, line.pressure(numbers.lineFromK))));
+  const stableFrom = Math.max(dew, coldest);
+  const most = HIGHEST_GROWTH * gas.heatCapacity(stableFrom, pressurePa);
+  const sound = (k: number): boolean => gas.heatCapacity(k, pressurePa) <= most;
+  return {
+    fromK: edge(sound, stableFrom, coldest),
+    toK: Math.min(gas.ideal.toK, HOTTEST_GAS_K),
+    method: 'ideal gas and departure of the real vapour from it',
+    enthalpy: (k) => gas.enthalpy(k, pressurePa),
+    heatCapacity: (k) => gas.heatCapacity(k, pressurePa),
+    marks: (k) => (k < stableFrom ? SUPERSATURATED : NO_MARKS),
+  };
+}
+
+/** Vapour as an ideal gas. */
+export function idealBranch(parts: FluidParts): FluidBranch {
+  const gas = requireGas(parts);
+  return {
+    fromK: coldestVapour(parts),
+    toK: Math.min(gas.ideal.toK, HOTTEST_GAS_K),
+    method: 'ideal gas',
+    enthalpy: gas.idealEnthalpy,
+    heatCapacity: gas.idealHeatCapacity,
+    marks: () => IDEAL,
+  };
+}
+
+/** Vapour begins where the line does, or at the temperature of sublimation at one atmosphere. */
+function coldestVapour({ numbers }: FluidParts): number {
+  return Math.min(numbers.lineFromK, numbers.sublimesAtK ?? Infinity);
+}
+
+/** Walks from a stable temperature towards an end in growing steps, and returns the last sound one. */
+function edge(sound: (k: number) => boolean, stable: number, end: number): number {
+  let good = stable;
+  let step = Math.sign(end - stable) * 1e-3;
+  while (good !== end) {
+    const next = Math.abs(end - good) <= Math.abs(step) ? end : good + step;
+    if (!sound(next)) return between(sound, good, next);
+    good = next;
+    step = Math.sign(step) * Math.min(2 * Math.abs(step), 8);
+  }
+  return end;
+}
+
+function between(sound: (k: number) => boolean, inside: number, outside: number): number {
+  let good = inside;
+  let bad = outside;
+  while (Math.abs(good - bad) > 1e-3) {
+    const middle = 0.5 * (good + bad);
+    if (sound(middle)) good = middle;
+    else bad = middle;
+  }
+  return good;
+}

@@ -1,0 +1,74 @@
+import type { Nasa9Species } from '../nasa9/nasa9Types';
+import type { LatentTerms } from './latentLine';
+import type { LiquidTerms } from './liquidLine';
+import type { WagnerTerms } from './wagner';
+
+/** A cited number of a fluid. */
+export interface Cited {
+  readonly value: number;
+  readonly uncertainty?: number;
+  readonly source: string;
+  readonly confirmed: boolean;
+}
+
+/** Relative standard uncertainties at reduced temperatures, straight between them. */
+export interface Spread {
+  readonly nodes: readonly number[];
+  readonly pressure: readonly number[];
+  readonly latent: readonly number[];
+  readonly heatCapacity: readonly number[];
+}
+
+/** The solid just below the melting point, where something is known of it. */
+export interface SolidNumbers {
+  /** Down to where the heat capacity is taken as known, K. */
+  readonly fromK: number;
+  /** Crystal of the nine-coefficient data, or a constant heat capacity in J/(mol K). */
+  readonly heatCapacity: Nasa9Species | number;
+  readonly source: string;
+}
+
+/** Difference of separately fitted latent heat and heat capacities: a cubic in the reduced temperature, J/mol. */
+export interface DisagreementNumbers {
+  readonly fromK: number;
+  readonly toK: number;
+  readonly cubic: readonly number[];
+  /** Standard uncertainty of a difference over the whole range, J/mol. */
+  readonly uncertainty: number;
+}
+
+/** Everything that is stored about one fluid. */
+export interface FluidNumbers {
+  readonly name: string;
+  readonly formula: string;
+  readonly cas: string;
+  readonly synonyms: readonly string[];
+  /** kg/mol */
+  readonly molarMass: number;
+  readonly criticalK: number;
+  readonly criticalPa: number;
+  readonly acentric: number;
+  readonly polar: number;
+  readonly bonding: number;
+  readonly meltingK: number;
+  /** At one atmosphere the solid turns into vapour, not into liquid. */
+  readonly sublimesAtK?: number;
+  /** Colder end of the saturation line, and the end up to which the vapour on it is described. */
+  readonly lineFromK: number;
+  readonly vapourToK: number;
+  readonly ideal?: Nasa9Species;
+  readonly dimer?: Nasa9Species;
+  readonly pressure: WagnerTerms;
+  readonly latent: LatentTerms;
+  readonly liquid: LiquidTerms;
+  readonly spread: Spread;
+  readonly constants: Readonly<Record<string, Cited>>;
+  readonly fusion?: Cited;
+  readonly solid?: SolidNumbers;
+  readonly disagreement?: DisagreementNumbers;
+  readonly sources: Readonly<Record<'latent' | 'pressure' | 'heatCapacity' | 'gas', readonly string[]>>;
+  /** Properties that rest on unconfirmed values. */
+  readonly unconfirmed: ReadonlySet<string>;
+  readonly notes: readonly string[];
+  readonly enthalpyReference: string;
+}

@@ -1,0 +1,161 @@
+import { nasa9Species } from '../nasa9/nasa9Species';
+import type { Nasa9Species } from '../nasa9/nasa9Types';
+import type { Cited, FluidNumbers, SolidNumbers } from './fluidNumbers';
+import { gasFromPoints } from './gasFromPoints';
+
+/** Fields of a packed fluid, in their order. */
+export const FLUID_FIELDS = [
+  'name',
+  'formula',
+  'cas',
+  'synonyms',
+  'grams',
+  'gas',
+  'dimer',
+  'limits',
+  'terms',
+  'pressure',
+  'latent',
+  'liquid',
+  'nodes',
+  'pressureSpread',
+  'latentSpread',
+  'heatCapacitySpread',
+  'constants',
+  'fusion',
+  'solid',
+  'disagreement',
+  'latentSources',
+  'pressureSources',
+  'heatCapacitySources',
+  'gasSources',
+  'unconfirmed',
+  'notes',
+] as const;
+
+type Fields = Record<(typeof FLUID_FIELDS)[number], string>;
+
+/** How a fluid is called, without reading the rest of it. */
+export function fluidNames(packed: string): Pick<FluidNumbers, 'name' | 'formula' | 'cas' | 'synonyms'> {
+  const [name = '', formula = '', cas = '', synonyms = ''] = packed.split('|', 4);
+  return { name, formula, cas, synonyms: listed(synonyms) };
+}
+
+/**
+ * A fluid from the text that the generator writes.
+ *
+ * @param packed fields of `FLUID_FIELDS` between bars
+ * @param sources full citations, which the fields name by their place
+ */
+export function unpackFluid(packed: string, sources: readonly string[]): FluidNumbers {
+  const texts = packed.split('|');
+  const fields = Object.fromEntries(FLUID_FIELDS.map((field, i) => [field, texts[i] ?? ''])) as Fields;
+  const cite = (text: string): string[] => numbersOf(text).map((i) => sources[i] ?? '');
+  const [lineFromK = NaN, vapourToK = NaN, sublimesAtK] = numbersOf(fields.limits);
+  const [polar = 0, bonding = 0] = numbersOf(fields.terms);
+  const constants = Object.fromEntries(
+    fields.constants.split(';').map((text) => {
+      const [item = '', ...rest] = text.split(',');
+      return [item, cited(rest, sources)];
+    }),
+  );
+  const value = (item: string): number => constants[item]?.value ?? NaN;
+  const molarMass = Number(fields.grams) / 1000;
+  const ideal = idealOf(fields, molarMass);
+  const solid = solidOf(fields.solid, sources);
+  const disagreement = numbersOf(fields.disagreement);
+  return {
+    ...fluidNames(packed),
+    molarMass,
+    criticalK: value('critical temperature'),
+    criticalPa: value('critical pressure'),
+    acentric: value('acentric factor'),
+    polar,
+    bonding,
+    meltingK: value('melting temperature'),
+    lineFromK,
+    vapourToK,
+    ...(sublimesAtK === undefined ? {} : { sublimesAtK }),
+    ...(ideal === undefined ? {} : { ideal }),
+    ...(fields.dimer === '' ? {} : { dimer: nasa9Species(fields.dimer) }),
+    pressure: numbersOf(fields.pressure) as unknown as FluidNumbers['pressure'],
+    latent: numbersOf(fields.latent) as unknown as FluidNumbers['latent'],
+    liquid: numbersOf(fields.liquid) as unknown as FluidNumbers['liquid'],
+    spread: {
+      nodes: numbersOf(fields.nodes),
+      pressure: numbersOf(fields.pressureSpread),
+      latent: numbersOf(fields.latentSpread),
+      heatCapacity: numbersOf(fields.heatCapacitySpread),
+    },
+    constants,
+    ...(fields.fusion === '' ? {} : { fusion: cited(fields.fusion.split(','), sources) }),
+    ...(solid === undefined ? {} : { solid }),
+    ...(disagreement.length === 0
+      ? {}
+      : {
+          disagreement: {
+            fromK: disagreement[0] ?? NaN,
+            toK: disagreement[1] ?? NaN,
+            uncertainty: disagreement[2] ?? NaN,
+            cubic: disagreement.slice(3),
+          },
+        }),
+    sources: {
+      latent: cite(fields.latentSources),
+      pressure: cite(fields.pressureSources),
+      heatCapacity: cite(fields.heatCapacitySources),
+      gas: cite(fields.gasSources),
+    },
+    unconfirmed: new Set(listed(fields.unconfirmed)),
+    notes: listed(fields.notes),
+    enthalpyReference: referenceOf(fields.gas),
+  };
+}
+
+function listed(text: string): string[] {
+  return text === '' ? [] : text.split(';');
+}
+
+function numbersOf(text: string): number[] {
+  return text === '' ? [] : text.split(',').map(Number);
+}
+
+/** `value,uncertainty,source,1 where confirmed`; the uncertainty may be empty. */
+function cited(
+  [value = '', uncertainty = '', source = '', confirmed]: readonly string[],
+  sources: readonly string[],
+): Cited {
+  return {
+    value: Number(value),
+    ...(uncertainty === '' ? {} : { uncertainty: Number(uncertainty) }),
+    source: sources[Number(source)] ?? '',
+    confirmed: confirmed === '1',
+  };
+}
+
+/** A species of the nine-coefficient data, or `=` and a cubic with its range. */
+function idealOf({ gas, name }: Fields, molarMass: number): Nasa9Species | undefined {
+  if (gas === '') return undefined;
+  if (!gas.startsWith('=')) return nasa9Species(gas);
+  const [fromK = NaN, toK = NaN, ...cubic] = numbersOf(gas.slice(1));
+  return gasFromPoints(name, molarMass, cubic, fromK, toK);
+}
+
+function referenceOf(gas: string): string {
+  if (gas === '') return 'saturated liquid at its melting temperature is zero';
+  return gas.startsWith('=')
+    ? 'ideal gas at 298.15 K is zero'
+    : 'elements in their reference states at 298.15 K and 1 bar are zero: the ideal gas has its enthalpy of formation there';
+}
+
+/** `fromK,heat capacity or crystal,source` */
+function solidOf(text: string, sources: readonly string[]): SolidNumbers | undefined {
+  if (text === '') return undefined;
+  const [fromK = '', what = '', source = ''] = text.split(',');
+  const constant = Number(what);
+  return {
+    fromK: Number(fromK),
+    heatCapacity: Number.isNaN(constant) ? nasa9Species(what) : constant,
+    source: sources[Number(source)] ?? '',
+  };
+}
