@@ -113,17 +113,20 @@ function itemsOf(substance: Substance, settings: Settings): string[] {
   const forms = (substance.forms ?? []).map((form) => `solid ${form}`);
   const phases = ['solid', ...forms, 'liquid', 'gas', 'ideal gas'].map((phase) => `${phase} ${HEAT_CAPACITY}`);
   const properties = ['saturation pressure', 'saturation temperature', ...phases];
+  const changes = substance.changes.filter((change) =>
+    has(() => substance.latent(change, substance.defaultKind(change))),
+  );
   return [
-    ...substance.changes,
-    ...properties.filter((property) => hasProperty(substance, property, settings)),
+    ...changes,
+    ...properties.filter((property) => has(() => propertyOf(substance, property, settings))),
     ...substance.constants.map(({ item }) => item),
     'notes',
   ];
 }
 
-function hasProperty(substance: Substance, property: string, settings: Settings): boolean {
+function has(curve: () => Curve | undefined): boolean {
   try {
-    return propertyOf(substance, property, settings) !== undefined;
+    return curve() !== undefined;
   } catch (thrown) {
     if (thrown instanceof Problem) return false;
     throw thrown;

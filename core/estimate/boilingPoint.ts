@@ -18,7 +18,7 @@ export interface BoilingPoint {
 export interface BoilingMethod {
   readonly name: string;
   /** Latent heat over R·Tb from the reduced boiling temperature and the critical pressure in bar. */
-  ratio(reducedK: number, criticalBar: number): number;
+  readonly ratio: (reducedK: number, criticalBar: number) => number;
   /** Root mean square deviation from printed latent heats, as a share. */
   readonly relativeError: number;
   readonly source: string;

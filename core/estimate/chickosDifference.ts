@@ -4,7 +4,7 @@ import { above } from './boilingPoint';
 interface Constants {
   readonly a: number;
   readonly b: number;
-  uncertainty(difference: number): number;
+  readonly uncertainty: (difference: number) => number;
   readonly error: string;
   readonly source: string;
   readonly marks: readonly Mark[];
