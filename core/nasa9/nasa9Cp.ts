@@ -17,7 +17,7 @@ import type { Nasa9Interval, Nasa9Species } from './nasa9Types';
  * @source McBride, Zehe & Gordon, NASA/TP-2002-211556 (2002), equation for Cp°/R
  * @example
  * import { nasa9Cp, nasa9Species } from 'latentry';
- * nasa9Cp(nasa9Species('N2'), 298.15) // => 29.1242
+ * nasa9Cp(nasa9Species('N2'), 298.15) // => 29.1244
  */
 export function nasa9Cp(species: Nasa9Species, temperatureK: number): number {
   if (temperatureK < species.fromK) {

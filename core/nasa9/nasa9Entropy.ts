@@ -16,7 +16,7 @@ import type { Nasa9Interval, Nasa9Species } from './nasa9Types';
  * @source McBride, Zehe & Gordon, NASA/TP-2002-211556 (2002), equation for S°/R
  * @example
  * import { nasa9Entropy, nasa9Species } from 'latentry';
- * nasa9Entropy(nasa9Species('N2'), 298.15) // => 191.6098
+ * nasa9Entropy(nasa9Species('N2'), 298.15) // => 191.6097
  */
 export function nasa9Entropy(species: Nasa9Species, temperatureK: number): number {
   const { fromK, toK } = species;

@@ -45,7 +45,10 @@ describe('entries of metals, salts and oxides', () => {
   it('have CAS numbers whose check digit is right', () => {
     for (const { name, cas } of condensedEntries) {
       const digits = cas.replace(/-/g, '');
-      const check = Array.from(digits.slice(0, -1)).reverse().reduce((sum, digit, i) => sum + (i + 1) * Number(digit), 0) % 10;
+      const check =
+        Array.from(digits.slice(0, -1))
+          .reverse()
+          .reduce((sum, digit, i) => sum + (i + 1) * Number(digit), 0) % 10;
       expect(cas, name).toMatch(/^\d{2,7}-\d{2}-\d$/);
       expect(check, `${name} ${cas}`).toBe(Number(digits.slice(-1)));
     }
