@@ -13,8 +13,10 @@ export interface Unseen {
   readonly status: string;
 }
 
+type Uncertainty = Readonly<Partial<Record<Unseen['quantity'], number>>>;
+
 interface UnseenFile {
-  readonly sources: Readonly<Record<string, { readonly citation: string; readonly uncertainty: object }>>;
+  readonly sources: Readonly<Record<string, { readonly citation: string; readonly uncertainty: Uncertainty }>>;
   readonly agreement: Readonly<
     Record<string, { readonly T_K: number; readonly p_sat_kPa: number; readonly dHvap_kJ_per_mol?: number }>
   >;
@@ -41,6 +43,8 @@ export interface Judged {
   readonly deviation: number;
   /** Standard uncertainty that the catalogue states, relative; Infinity where it states none. */
   readonly stated: number;
+  /** Expanded uncertainty (k = 2) of the published value itself, relative. */
+  readonly published: number;
 }
 
 /** Compares the catalogue with one published value; undefined where that lies outside the curve's range. */
@@ -58,6 +62,7 @@ export function judge(at: Unseen): Judged | undefined {
     tr: at.T_K / critical,
     deviation: curve.at(at.T_K) / published - 1,
     stated: stated === undefined ? Infinity : stated / published,
+    published: unseen.sources[at.source]?.uncertainty[at.quantity] ?? NaN,
   };
 }
 
