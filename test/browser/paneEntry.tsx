@@ -1,6 +1,10 @@
+import { constant } from '../../functions/constant';
+import { deltaCp } from '../../functions/deltaCp';
 import { fitDeltaCp } from '../../functions/fitDeltaCp';
 import { fitLatent } from '../../functions/fitLatent';
+import { heatCap } from '../../functions/heatCap';
 import { latent } from '../../functions/latent';
+import { satPressure } from '../../functions/satPressure';
 import { settingsStore } from '../../functions/settings/store';
 import { startSettings } from '../../taskpane/boot/startSettings';
 import { parseArea, parseReference } from '../../taskpane/hosts/address';
@@ -44,6 +48,11 @@ function evaluate(formula: string, at: Ref): Cell | Cell[][] {
       return fitDeltaCp(args[0] ?? [], args[1] ?? [], args[2], args[3], rest(args, 4)) as Cell[][];
     if (name === 'FITLATENT') return fitLatent(args[0] ?? [], args[1] ?? [], rest(args, 2)) as Cell[][];
     if (name === 'LATENT') return latent(args[0] ?? [], args[1] ?? [], args[2], rest(args, 3)) as Cell[][];
+    if (name === 'DELTACP') return deltaCp(args[0] ?? [], args[1] ?? [], args[2], rest(args, 3)) as Cell[][];
+    if (name === 'SATPRESSURE') return satPressure(args[0] ?? [], args[1] ?? [], rest(args, 2)) as Cell[][];
+    if (name === 'CONSTANT') return constant(args[0] ?? [], args[1] ?? [], rest(args, 2)) as Cell[][];
+    if (name === 'HEATCAP')
+      return heatCap(args[0] ?? [], args[1] ?? [], args[2] ?? [], args[3], args[4], rest(args, 5)) as Cell[][];
   } catch (error) {
     if (error instanceof CellError) return { error: error.code as '#VALUE!', message: error.message };
     throw error;

@@ -12,6 +12,12 @@ export function stateWords(ladder: Ladder | undefined, temperatureK: number, wri
     const sides = ladder.rungs.slice(place, place + 2).map(rungName);
     return `${at}: ${gap.change}, ${sides.join(' and ')} together`;
   }
-  if (rung === undefined) return `${at}: the stable phase is not known`;
+  if (rung === undefined) return `${at}: ${beyondWords(ladder, temperatureK)}`;
   return rung.phase === 'supercritical' ? `${at}: supercritical fluid` : `${at}: ${rungName(rung)}`;
+}
+
+/** What a path beyond the ends of the ladder lacks. */
+function beyondWords({ rungs, missingBelow, missingAbove }: Ladder, temperatureK: number): string {
+  const lacking = temperatureK < (rungs[0]?.fromK ?? 0) ? missingBelow : missingAbove;
+  return lacking === undefined ? 'the stable phase is not known' : `beyond the ${lacking}`;
 }
