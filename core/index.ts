@@ -32,6 +32,11 @@ export type { LeftOut } from './fit/leftOut';
 export { readFitTable, type FitFromTable } from './fit/readFitTable';
 export { readRows, type Rows } from './fit/readRows';
 
+export type { House, HouseFault } from './house/house';
+export { houseRegistry } from './house/houseRegistry';
+export { monotoneTable } from './house/monotoneTable';
+export { readHouse, type HouseOptions } from './house/readHouse';
+
 export { readForm, type Form } from './kirchhoff/form';
 export { kirchhoff, type KirchhoffInput, type KirchhoffResult } from './kirchhoff/kirchhoff';
 

@@ -62,8 +62,6 @@ const FORMS = '([a-z0-9]+)-([a-z0-9]+)';
  * `boiling temperature at 10 kPa`, `heat of alpha-beta`.
  *
  * @returns `undefined` for a text that is none of them
- * @example
- * readProperty('Heat of melting') // => { is: 'heat', change: 'fusion', kind: 'isobaric', kindSaid: false }
  */
 export function readProperty(text: string): HouseProperty | undefined {
   const at = /^(.*?)\s+at\s+(.+)$/i.exec(text.trim());

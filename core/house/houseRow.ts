@@ -19,6 +19,21 @@ export const HOUSE_COLUMNS = [
 ] as const;
 export type HouseColumn = (typeof HOUSE_COLUMNS)[number];
 
+/** The header row as the workbook writes it; bare temperatures of a range are in the unit that it names. */
+export const HOUSE_HEADS: readonly string[] = [
+  ...[
+    'Substance',
+    'Property',
+    'Form',
+    'Coefficients',
+    'Unit',
+    'Valid from, degC',
+    'Valid to, degC',
+    'Source',
+    'Revision',
+  ],
+];
+
 const OTHER_HEADS: Readonly<Record<string, HouseColumn>> = {
   material: 'substance',
   coefficient: 'coefficients',
@@ -55,6 +70,12 @@ function columnOf(head: string): HouseColumn | undefined {
   return HOUSE_COLUMNS.find((column) => plainName(column) === plain) ?? OTHER_HEADS[plain];
 }
 
+/** Which column each cell of a header row heads; `undefined` for a row that is no header. */
+export function headerOrder(cells: readonly unknown[]): readonly (HouseColumn | undefined)[] | undefined {
+  const heads = cells.map((cell) => columnOf(cellText(cell)));
+  return heads.includes('substance') && heads.includes('property') ? heads : undefined;
+}
+
 /**
  * Takes a block apart into rows. Its first row that is not blank may be the header: then columns may stand in any order,
  * others beside them don't count, and the heads of "valid from" and "valid to" may name their unit.
@@ -74,8 +95,8 @@ export function houseRows(values: readonly (readonly unknown[])[], firstRow: num
     if (texts.every((text) => text === '')) return;
     if (first) {
       first = false;
-      const heads = texts.map(columnOf);
-      if (heads.includes('substance') && heads.includes('property')) {
+      const heads = headerOrder(cells);
+      if (heads !== undefined) {
         order = heads;
         fromUnit = headUnit(texts[heads.indexOf('valid from')]) ?? degC;
         toUnit = headUnit(texts[heads.indexOf('valid to')]) ?? fromUnit;

@@ -8,8 +8,6 @@ import type { Shape } from './shape';
  * @param beta β
  * @param criticalK Tc
  * @source V. Majer and V. Svoboda, Enthalpies of Vaporization of Organic Compounds, IUPAC Chemical Data Series 32 (1985)
- * @example
- * majerSvobodaShape(50, 0, 0.38, 500).at(0) // => 50
  */
 export function majerSvobodaShape(heat: number, alpha: number, beta: number, criticalK: number): Shape {
   const at = (t: number): number => {

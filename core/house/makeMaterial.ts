@@ -20,8 +20,6 @@ import { formsOf } from './stations';
  * latent heat given.
  *
  * @param data constants, heats, heat capacities and vapour pressures, each readable or a problem
- * @example
- * makeMaterial(data).latent('fusion', 'isobaric').at(300)
  */
 export function makeMaterial(data: MaterialData): Substance {
   const ladder = remember((pressurePa: number) => materialLadder(data, pressurePa));

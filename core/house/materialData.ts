@@ -18,6 +18,8 @@ export interface Evidence {
 /** J/(mol K) against K; per kilogram where the material has no molar mass. */
 export interface HeatCapacityData extends Evidence {
   readonly shape: AreaShape;
+  /** Standard uncertainty where it is no fixed share of the value. */
+  readonly uncertaintyAt?: (temperatureK: number) => number;
 }
 
 /** J/mol against K; per kilogram where the material has no molar mass. */

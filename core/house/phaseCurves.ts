@@ -21,7 +21,8 @@ export function materialHeatCapacity(
   const own = form === undefined ? undefined : data.heatCapacities.get(form);
   const piece = form === undefined ? `${phase} heat capacity` : `${phase} ${form} heat capacity`;
   const given = need(data, own ?? data.heatCapacities.get(phase), piece);
-  const { shape, fromK, toK, method, sources, relativeUncertainty } = given;
+  const { shape, fromK, toK, method, sources, relativeUncertainty: share } = given;
+  const uncertaintyAt = given.uncertaintyAt ?? (share === undefined ? undefined : (t: number) => share * shape.at(t));
   const marks = phase === 'gas' && at !== 'standard' ? joined(given.marks, IDEAL_GAS) : given.marks;
   return {
     axis: 'temperature',
@@ -33,7 +34,7 @@ export function materialHeatCapacity(
     method,
     sources,
     at: (t) => shape.at(t),
-    ...(relativeUncertainty === undefined ? {} : { uncertaintyAt: (t) => relativeUncertainty * shape.at(t) }),
+    ...(uncertaintyAt === undefined ? {} : { uncertaintyAt }),
     marksAt: () => marks,
   };
 }

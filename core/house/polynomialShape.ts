@@ -5,8 +5,6 @@ import type { AreaShape } from './shape';
  *
  * @param coefficients c0, c1, …; one alone is a constant
  * @param originK 0 for a polynomial in kelvin, 273.15 for one in degrees Celsius
- * @example
- * polynomialShape([2, 0.5], 273.15).at(283.15) // => 7
  */
 export function polynomialShape(coefficients: readonly number[], originK: number): AreaShape {
   const plain = Float64Array.from(coefficients);

@@ -1,12 +1,11 @@
 import { nearest } from '../nearest';
 import { Problem } from '../problem';
 import type { Decimal } from '../units/parseNumber';
-import { CONSTITUENTS, type Constituent } from './choiOkos';
+import { COMPOSITION_PARTS, type Composition } from '../estimate/compositionHeatCapacity';
+import type { CompositionPart } from '../estimate/compositionConstants';
 import { cellNumbers } from './cellNumbers';
 
-export type Composition = Readonly<Partial<Record<Constituent, number>>>;
-
-const OTHER_WORDS: Readonly<Record<string, Constituent>> = {
+const OTHER_WORDS: Readonly<Record<string, CompositionPart>> = {
   fiber: 'fibre',
   carbohydrates: 'carbohydrate',
   minerals: 'ash',
@@ -21,13 +20,11 @@ const OTHER_WORDS: Readonly<Record<string, Constituent>> = {
  *
  * @throws Problem `argument` for an unknown constituent (with the nearest), one given twice, a fraction outside [0, 1],
  * and a sum that is not 1
- * @example
- * readComposition('water 60 %; carbohydrate 40 %', '.').water // => 0.6
  */
 export function readComposition(text: string, decimal: Decimal): Composition {
   const parts = text.split(/[;\n]/).filter((part) => part.trim() !== '');
   if (parts.length === 0) throw refused('nothing', 'mass fractions, as water 0.6; carbohydrate 0.3; ash 0.1');
-  const found: Partial<Record<Constituent, number>> = {};
+  const found: Partial<Record<CompositionPart, number>> = {};
   let sum = 0;
   let rounding = 1e-9;
   for (const part of parts) {
@@ -51,15 +48,15 @@ export function readComposition(text: string, decimal: Decimal): Composition {
   return Object.fromEntries(Object.entries(found).map(([name, fraction]) => [name, fraction / sum]));
 }
 
-function constituent(word: string, part: string): Constituent {
+function constituent(word: string, part: string): CompositionPart {
   const plain = word.toLowerCase();
-  const name = CONSTITUENTS.find((each) => each === plain) ?? OTHER_WORDS[plain];
+  const name = COMPOSITION_PARTS.find((each) => each === plain) ?? OTHER_WORDS[plain];
   if (name !== undefined) return name;
-  const close = nearest(plain, CONSTITUENTS);
+  const close = nearest(plain, COMPOSITION_PARTS);
   throw new Problem({
     code: 'argument',
     argument: 'coefficients',
-    allowed: CONSTITUENTS.join(', '),
+    allowed: COMPOSITION_PARTS.join(', '),
     received: `"${part.trim()}"`,
     ...(close === undefined ? {} : { nearest: close }),
   });

@@ -1,6 +1,8 @@
-import { CHOI_OKOS, choiOkos, COMPOSITION_FROM_K, COMPOSITION_TO_K, CONSTITUENTS, FROM_MEMORY } from './choiOkos';
+import { COMPOSITION_SOURCE, PARTS, type CompositionPart } from '../estimate/compositionConstants';
+import { COMPOSITION_PARTS, type Composition } from '../estimate/compositionHeatCapacity';
+import { composedCapacity } from './composedCapacity';
 import type { HeatCapacityData } from './materialData';
-import { readComposition, type Composition } from './readComposition';
+import { readComposition } from './readComposition';
 import type { FormWord } from './readForm';
 import { readPolynomial } from './readPolynomial';
 import { readTable } from './readTable';
@@ -26,20 +28,30 @@ export function readComposedCapacity(reader: RowReader): HeatCapacityData & { re
     readComposition(reader.text('coefficients'), reader.beside.decimal),
   );
   const molarMass = reader.beside.molarMass();
-  const remembered = CONSTITUENTS.filter((name) => FROM_MEMORY.includes(name) && (fractions[name] ?? 0) > 0);
-  const text = `constants of ${remembered.join(', ')} are from memory, wholly or in one term`;
-  const natural = { fromK: COMPOSITION_FROM_K, toK: COMPOSITION_TO_K };
-  const { fromK = natural.fromK, toK = natural.toK } = reader.limits();
+  const kilograms = Number.isNaN(molarMass) ? 1 : molarMass;
+  const composed = composedCapacity(fractions);
+  const remembered = COMPOSITION_PARTS.filter((part) => (fractions[part] ?? 0) > 0 && isRemembered(part));
+  const text = `coefficients of ${remembered.join(' and ')} are from memory`;
+  const { fromK = composed.fromK, toK = composed.toK } = reader.limits();
   const piece = reader.bounded(
     {
-      shape: scaled(choiOkos(fractions), Number.isNaN(molarMass) ? 1 : molarMass),
-      natural,
-      method: 'sum over the mass fractions of the constituents (Choi and Okos 1986)',
+      shape: scaled(composed.shape, kilograms),
+      natural: composed,
+      method: 'sum over the mass fractions of the constituents (Choi & Okos)',
       marks: remembered.length === 0 ? [] : [{ code: 'unconfirmed', text }],
     },
     { fromK, toK },
   );
-  return { ...piece, sources: [...piece.sources, CHOI_OKOS], fractions };
+  return {
+    ...piece,
+    sources: [...piece.sources, COMPOSITION_SOURCE],
+    uncertaintyAt: (t) => kilograms * composed.uncertaintyAt(t),
+    fractions,
+  };
+}
+
+function isRemembered(part: CompositionPart): boolean {
+  return part !== 'water' && PARTS[part].status.startsWith('from memory');
 }
 
 function scaled(shape: AreaShape, by: number): AreaShape {

@@ -28,7 +28,8 @@ export interface HouseOptions {
  * @param options decimal separator of numbers in texts, place of the block, built-in substances
  * @returns entries by name and every fault
  * @example
- * readHouse([['brine', 'liquid heat capacity', '', 3.1, 'kJ/(kg K)', -10, 60, 'our own', '1']], options).entries[0].name // => 'brine'
+ * const row = ['brine', 'liquid heat capacity', '', 3.1, 'kJ/(kg K)', -10, 60, 'our own', '1'];
+ * readHouse([row], { decimal: '.', firstRow: 5, builtIn: [] }).entries[0]?.name // => 'brine'
  */
 export function readHouse(values: readonly (readonly unknown[])[], options: HouseOptions): House {
   const rows = houseRows(values, options.firstRow);

@@ -11,8 +11,6 @@ export const WATSON_EXPONENT = 0.38;
  * @param criticalK Tc, above T₁
  * @param exponent n
  * @source K. M. Watson, Ind. Eng. Chem. 35 (1943) 398; n = 0.38
- * @example
- * watsonShape(40, 300, 500).at(300) // => 40
  */
 export function watsonShape(heat: number, atK: number, criticalK: number, exponent = WATSON_EXPONENT): Shape {
   const at = (t: number): number => (t >= criticalK ? 0 : heat * ((criticalK - t) / (criticalK - atK)) ** exponent);

@@ -1,8 +1,8 @@
 import type { LatentryBundle } from '../../functions/index';
 import type { StoreState } from '../../functions/settings/store';
-import { formatArea, parseArea, parseReference } from '../../taskpane/hosts/address';
-import type { Cell } from '../../taskpane/port';
+import { formatArea } from '../../taskpane/hosts/address';
 import type { Book } from '../book';
+import { handedOver, namedBlock } from './namedBlock';
 
 /** The block of unit settings in a workbook. */
 const UNITS_NAME = 'latentry_units';
@@ -27,24 +27,16 @@ export function bookSettings(
 }
 
 function blockState(book: Book, latentry: LatentryBundle): StoreState {
-  const name = book.names.find((each) => each.sheet === undefined && each.name.toLowerCase() === UNITS_NAME);
-  if (name === undefined) return { state: 'absent' };
-  const ref = parseReference(name.formula);
-  const area = parseArea(ref?.address ?? '');
-  const sheet = book.sheets.find((each) => each.name.toLowerCase() === ref?.sheet.toLowerCase());
-  if (area === null || sheet === undefined) {
-    return {
-      state: 'broken',
-      cell: name.name,
-      text: name.formula,
-      message: 'a range of two columns on a sheet of this workbook',
-    };
+  const block = namedBlock(book, UNITS_NAME);
+  if (block === undefined) return { state: 'absent' };
+  if (block.area === undefined) {
+    const message = 'a range of two columns on a sheet of this workbook';
+    return { state: 'broken', cell: block.name, text: block.text, message };
   }
+  const { area } = block;
   const cell = (row: number, column: number) =>
     formatArea({ top: area.top + row, left: area.left + column, rows: 1, columns: 1 });
-  const values = Array.from({ length: area.rows }, (_row, r) =>
-    Array.from({ length: area.columns }, (_column, c) => handedOver(sheet.cells[cell(r, c)]?.value ?? null)),
-  );
+  const values = block.values.map((row) => row.map(handedOver));
   try {
     const settings = latentry.parseSettingsBlock(values, latentry.defaultSettings);
     return { state: 'ready', settings, stamp: JSON.stringify(latentry.settingsRows(settings)) };
@@ -55,10 +47,6 @@ function blockState(book: Book, latentry: LatentryBundle): StoreState {
     const words = nearest === undefined ? allowed : `${allowed} (nearest: ${nearest})`;
     return { state: 'broken', cell: cell(row, inValue ? 1 : 0), text: received, message: words };
   }
-}
-
-function handedOver(value: Cell): unknown {
-  return typeof value === 'object' && value !== null ? { code: value.error } : value;
 }
 
 interface BlockProblem {

@@ -4,6 +4,7 @@ import type { Book } from '../book';
 import { createCellMessages } from '../grid/cellMessages';
 import { createLateAnswers } from '../grid/lateAnswers';
 import { bookSettings } from './bookSettings';
+import { bookSubstances } from './bookSubstances';
 import { calculatedBook, type Anchor } from './calculatedBook';
 import { sheetId, type EngineBook, type EngineValue } from './engineBook';
 import { engineBookOf } from './engineBookOf';
@@ -87,23 +88,30 @@ export async function openEngine(options: { readonly bundlePath: string }): Prom
     return errorWords(value.code, said, anchor.formula, () => formulas.functionNames());
   };
 
+  /** Tells the functions what the book says; whether any of it is new to them. */
+  const publish = (book: Book | undefined, unitsText: string | undefined): boolean => {
+    const settings = bookSettings(book, unitsText, latentry);
+    const substances = latentry.house.publish(bookSubstances(book, settings, latentry));
+    return latentry.settings.publish(settings) || substances;
+  };
+
   const calculate = async (book: Book, unitsText: string | undefined): Promise<Book> => {
     const followed = followedBook(book);
     const cells = engineBookOf(followed);
     let known = book;
     for (let round = 1; ; round++) {
-      const changed = latentry.settings.publish(bookSettings(known, unitsText, latentry));
+      const changed = publish(known, unitsText);
       if (round > 1 && !changed) return known;
       const calculated = await untilSettled(() => formulas.calculate(cells));
       known = withKeptFormulas(calculatedBook(followed, calculated, readValue), book);
-      // Unit settings may themselves be calculated: then again, with what they came to.
+      // Settings and substances may themselves be calculated: then again, with what they came to.
       if (round === MOST_SETTINGS_ROUNDS) return known;
     }
   };
 
   const evaluate = async (texts: readonly string[], { book, unitsText }: EvaluateOptions): Promise<Evaluated[]> => {
     const known = book === undefined ? undefined : await calculate(book, unitsText);
-    if (known === undefined) latentry.settings.publish(bookSettings(undefined, unitsText, latentry));
+    if (known === undefined) publish(undefined, unitsText);
     const base = known === undefined ? NO_BOOK : engineBookOf(followedBook(known));
     const asked = texts.map(asFormula);
     const refusals = asked.map((formula) =>

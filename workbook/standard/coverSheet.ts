@@ -10,6 +10,7 @@ const SHEETS: readonly (readonly [string, string])[] = [
     'ΔCp fit',
     'A line through published latent heats: its slope, with its kind said. Carries a latent heat to another temperature.',
   ],
+  ['Substances', 'The plant’s own materials, a property a row. What stands there works in every function.'],
   ['Checks', 'Each function against a published figure. Look here first when an answer surprises.'],
 ];
 

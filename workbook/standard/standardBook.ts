@@ -7,6 +7,7 @@ import { deltaCpSheet } from './deltaCpSheet';
 import { latentHeatSheet } from './latentHeatSheet';
 import { listsSheet } from './listsSheet';
 import { standardStyles } from './styles';
+import { substancesName, substancesSheet } from './substancesSheet';
 import { unitsName, unitsSheet } from './unitsSheet';
 
 export interface StandardBookOptions {
@@ -20,10 +21,10 @@ export interface StandardBookOptions {
  * The standard workbook as plain data: formulas stand in it, their values come from whoever calculates it.
  *
  * @param options - settings and date, both optional
- * @returns Cover, Units, Latent heat, ΔCp fit, Checks, and the hidden lists of choices
+ * @returns Cover, Units, Latent heat, ΔCp fit, Substances, Checks, and the hidden lists of choices
  * @example
  * standardBook().sheets.map((sheet) => sheet.name)
- * // => ['Cover', 'Units', 'Latent heat', 'ΔCp fit', 'Checks', 'Lists']
+ * // => ['Cover', 'Units', 'Latent heat', 'ΔCp fit', 'Substances', 'Checks', 'Lists']
  */
 export function standardBook(options: StandardBookOptions = {}): Book {
   const settings = options.settings ?? DEFAULT_SETTINGS;
@@ -33,10 +34,11 @@ export function standardBook(options: StandardBookOptions = {}): Book {
       unitsSheet(settings),
       latentHeatSheet(settings),
       deltaCpSheet(),
+      substancesSheet(),
       checksSheet(),
       listsSheet(),
     ],
-    names: [unitsName],
+    names: [unitsName, substancesName],
     styles: standardStyles,
     properties: {},
   };

@@ -20,6 +20,7 @@ const list = {
     { id: 'LATE', name: 'LATE', parameters: [matrix('value')] },
     { id: 'LATEREFUSE', name: 'LATEREFUSE', parameters: [] },
     { id: 'NOTNUMBER', name: 'NOTNUMBER', parameters: [] },
+    { id: 'HOUSE', name: 'HOUSE', parameters: [] },
     { id: 'SETTING', name: 'SETTING', parameters: [matrix('key')] },
     { id: 'GONE', name: 'GONE', parameters: [] },
   ],
@@ -29,6 +30,7 @@ const list = {
 const source = `
 const later = (give) => new Promise((resolve, reject) => setTimeout(() => give(resolve, reject), 5));
 let state = { state: 'unread' };
+let house = { state: 'unread' };
 const parse = (text, base) => {
   const settings = { ...base };
   for (const part of text.split(';')) {
@@ -55,6 +57,8 @@ globalThis.Latentry = {
   parseSettingsText: parse,
   parseSettingsBlock: block,
   settingsRows: (settings) => Object.entries(settings),
+  house: { current: () => house, publish: (next) => { const changed = JSON.stringify(next) !== JSON.stringify(house); house = next; return changed; } },
+  readHouseBlock: (block) => ({ state: 'ready', house: block, stamp: JSON.stringify(block) }),
 };
 const is = (cell) => cell[0][0];
 CustomFunctions.associate('ECHO', (...args) => JSON.stringify(args));
@@ -65,6 +69,7 @@ CustomFunctions.associate('CRASH', () => undefined.length);
 CustomFunctions.associate('LATE', (value) => later((resolve) => resolve([[is(value) * 2]])));
 CustomFunctions.associate('LATEREFUSE', () => later((_, reject) => reject(new CustomFunctions.Error('#N/A', 'came to nothing'))));
 CustomFunctions.associate('NOTNUMBER', () => Infinity);
+CustomFunctions.associate('HOUSE', () => JSON.stringify(house));
 CustomFunctions.associate('SETTING', (key) => {
   if (state.state === 'broken') throw new CustomFunctions.Error('#VALUE!', state.cell + ': ' + state.message + '; ' + state.text);
   return String((state.settings ?? Latentry.defaultSettings)[is(key)]);

@@ -29,6 +29,7 @@ describe('the standard workbook', () => {
       ['Units', false],
       ['Latent heat', false],
       ['ΔCp fit', false],
+      ['Substances', false],
       ['Checks', false],
       ['Lists', true],
     ]);

@@ -1,0 +1,113 @@
+import { HOUSE_PROPERTIES } from '../../core/house/houseProperty';
+import { HOUSE_HEADS } from '../../core/house/houseRow';
+import { HOUSE_FORMS } from '../../core/house/readForm';
+import type { BookCell, BookName, BookSheet } from '../book';
+import { emptySheet } from '../emptySheet';
+import { choiceSource } from './listsSheet';
+import { put, putFormula } from './place';
+import { UNITS_NAME } from './unitHead';
+
+/** The block of the team's own substances, by its name in the workbook. */
+export const SUBSTANCES_NAME = 'Latentry_substances';
+
+const HEAD = 8;
+const ROOM = 50;
+const LAST = HEAD + ROOM;
+
+const DEMO = 'demo, invented for this workbook';
+const CONCENTRATE = 'kelp concentrate';
+
+/** Invented: a kelp extract concentrate, moist and frozen. */
+const ROWS: readonly (readonly (string | number | null)[])[] = [
+  [
+    CONCENTRATE,
+    'composition',
+    'mass fractions',
+    'water 0.72; carbohydrate 0.17; protein 0.04; fibre 0.02; ash 0.05',
+    null,
+    0,
+    95,
+    DEMO,
+    'A',
+  ],
+  [
+    CONCENTRATE,
+    'solid composition',
+    'mass fractions',
+    'ice 0.60; water 0.12; carbohydrate 0.17; protein 0.04; fibre 0.02; ash 0.05',
+    null,
+    -35,
+    -12,
+    DEMO,
+    'A',
+  ],
+  ['kelp wax', 'melting temperature', 'constant', 58, 'degC', null, null, DEMO, 'A'],
+  ['kelp wax', 'heat of fusion', 'constant', 180, 'kJ/kg', null, null, DEMO, 'A'],
+  ['kelp wax', 'solid heat capacity', 'table', '10:1.92; 30:2.10; 58:2.45', 'kJ/(kg K)', 10, 58, DEMO, 'A'],
+  ['kelp wax', 'liquid heat capacity', 'polynomial in degC', '2.05; 0.0021', 'kJ/(kg K)', 58, 110, DEMO, 'A'],
+];
+
+const HOW: readonly string[] = [
+  'One property a row. A name that stands here works in every function, beside the built-in substances.',
+  'Numbers of a polynomial or a table are parted by semicolons: 2.05; 0.0021 or 10:1.92; 30:2.10. Equations take temperatures in K, tables and ranges in °C, unless a cell says another unit.',
+  'A row that can’t be read says so in the answers that need it; all others go on working. The side pane lists what could not be read.',
+];
+
+/** The team's own substances: header, room for rows, a demo of two invented materials and two answers from them. */
+export function substancesSheet(): BookSheet {
+  const cells: Record<string, BookCell> = {};
+  const rowHeights: Record<string, number> = { '1': 34, '2': 20, '3': 34, '4': 20, [String(HEAD)]: 34 };
+  put(cells, 'A1', 'Substances', 'title');
+  HOW.forEach((text, i) => put(cells, `A${2 + i}`, text, 'subtitle'));
+  answer(
+    cells,
+    5,
+    'Heat to warm the concentrate from 10 to 60 °C, per amount',
+    `HEAT("${CONCENTRATE}","10 degC","60 degC",,`,
+  );
+  answer(
+    cells,
+    6,
+    'Heat to melt kelp wax that is at 20 °C, per amount',
+    'HEAT("kelp wax","20 degC","melting liquid",,',
+  );
+  HOUSE_HEADS.forEach((head, i) => put(cells, `${letter(i)}${HEAD}`, head, 'heading'));
+  for (let row = HEAD + 1; row <= LAST; row++) {
+    HOUSE_HEADS.forEach((_, i) => {
+      const value = ROWS[row - HEAD - 1]?.[i] ?? null;
+      put(cells, `${letter(i)}${row}`, value, 'input', RANGE_COLUMNS.includes(i) ? undefined : '@');
+    });
+  }
+  return {
+    ...emptySheet('Substances'),
+    cells,
+    columnWidths: { A: 22, B: 24, C: 22, D: 54, E: 16, F: 14, G: 14, H: 36, I: 12 },
+    rowHeights,
+    merges: ['A2:I2', 'A3:I3', 'A4:I4', 'A5:C5', 'A6:C6'],
+    lists: [
+      { range: `B${HEAD + 1}:B${LAST}`, values: HOUSE_PROPERTIES, source: choiceSource('property'), open: true },
+      { range: `C${HEAD + 1}:C${LAST}`, values: HOUSE_FORMS, source: choiceSource('form'), open: true },
+    ],
+    freeze: { rows: HEAD, columns: 1 },
+    gridLines: false,
+    print: { landscape: true, fitWidth: true },
+  };
+}
+
+/** The valid range; all other entries stay as typed, so that 10:1.92 is no time of day and a CAS number no date. */
+const RANGE_COLUMNS = [5, 6];
+
+function letter(column: number): string {
+  return String.fromCharCode(65 + column);
+}
+
+function answer(cells: Record<string, BookCell>, row: number, words: string, call: string): void {
+  put(cells, `A${row}`, words, 'label');
+  putFormula(cells, `D${row}`, `=LATENTRY.${call}${UNITS_NAME},${SUBSTANCES_NAME})`, 'answer', null, '#,##0.00');
+}
+
+/** The name under which the block is found, its header included. */
+export const substancesName: BookName = {
+  name: SUBSTANCES_NAME,
+  formula: `Substances!$A$${HEAD}:$I$${LAST}`,
+};
