@@ -50,7 +50,7 @@ function datumWords({ source, uncertainty, unit, confirmed }: Datum): string {
   const u =
     uncertainty === undefined
       ? 'no stated uncertainty'
-      : `standard uncertainty ${shortNumber(uncertainty)} ${unit} (k = 1)`;
+      : `standard uncertainty ${shortNumber(uncertainty)}${unit === '1' ? '' : ` ${unit}`} (k = 1)`;
   return `${source}; ${u}; ${confirmed ? 'confirmed' : 'unconfirmed'}`;
 }
 
@@ -62,7 +62,7 @@ function curveWords(curve: Curve, transition: number | undefined, settings: Sett
   const u = curve.uncertaintyAt?.(place);
   const unconfirmed = (curve.marksAt?.(place) ?? []).filter((mark) => mark.code === 'unconfirmed');
   return [
-    curve.sources.join('; '),
+    curve.sources.filter((text) => text !== '').join('; ') || 'no source stated',
     curve.method,
     from === to ? `valid at ${write(from)} only` : `valid from ${write(from)} to ${write(to)}`,
     u === undefined
