@@ -26,8 +26,7 @@ const spec: CellwiseSpec = {
 };
 
 /**
- * How far independent data for a latent heat and for the heat capacities of its phases disagree between two temperatures.
- * Rise of the latent heat from one temperature to the other, less what the heat capacities make of it: positive where the latent heat rises more, or falls less, than they say; 0 where both come from one equation.
+ * How far independent data for a latent heat and for the heat capacities of its phases disagree between two temperatures: its rise less what they make of it, positive where it rises more; 0 where both come from one equation.
  * @customfunction DISAGREEMENT
  * @requiresParameterAddresses
  * @param substance Substance by name, formula or CAS number, as "ethanol".
