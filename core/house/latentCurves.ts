@@ -8,8 +8,7 @@ import { heatKey, usualKind, type HeatCapacityData, type HeatData, type Material
 import type { MaterialLadder, MaterialRung } from './materialLadder';
 import { formsOf, heatCapacityOf } from './stations';
 
-const STANDARD_PRESSURE_PA = 1e5;
-const ATMOSPHERE_PA = 101325;
+export const ATMOSPHERE_PA = 101325;
 
 /** What a change is asked for: the heat, or its slope with temperature. */
 export type Answered = 'latent' | 'slope';
@@ -133,7 +132,8 @@ export function temperatureWords(change: Change): string {
   return change === 'vaporization' ? 'boiling temperature' : `${change} temperature`;
 }
 
-const ENDS: Readonly<Record<string, readonly [Phase, Phase]>> = {
+/** The phases of a change, cold and hot; solid-solid changes have two forms of the solid. */
+export const ENDS: Readonly<Record<string, readonly [Phase, Phase]>> = {
   fusion: ['solid', 'liquid'],
   vaporization: ['liquid', 'gas'],
   sublimation: ['solid', 'gas'],
@@ -220,28 +220,3 @@ function carried(data: MaterialData, change: Change, answered: Answered, joint: 
     at: (t) => heat + b.area(at, t) - a.area(at, t),
   });
 }
-
-/**
- * The part of the coexistence slope that is no heat-capacity difference: the slope of the heat given less the
- * difference of the heat capacities given, J/(mol K).
- */
-export function coexistenceTermCurve(around: Around, change: Change): Curve {
-  const { data } = around;
-  const line = latentCurve(around, change, 'coexistence', 'slope');
-  const [coldPhase, hotPhase] = ENDS[change] ?? ['solid', 'solid'];
-  const cold = need(data, data.heatCapacities.get(coldPhase), `${coldPhase} heat capacity`);
-  const hot = need(data, data.heatCapacities.get(hotPhase), `${hotPhase} heat capacity`);
-  const { kind: _kind, uncertaintyAt: _u, ...rest } = line;
-  const marks = joined(line.marksAt?.(line.from) ?? NO_MARKS, cold.marks, hot.marks, IDEAL_GAS);
-  return {
-    ...rest,
-    subject: `pressure term of the heat of ${change} of ${data.name}`,
-    from: Math.max(line.from, cold.fromK, hot.fromK),
-    to: Math.min(line.to, cold.toK, hot.toK),
-    method: 'slope of the heat along the two-phase line less the difference of the heat capacities',
-    at: (t) => line.at(t) - (hot.shape.at(t) - cold.shape.at(t)),
-    marksAt: () => marks,
-  };
-}
-
-export { ATMOSPHERE_PA, STANDARD_PRESSURE_PA };

@@ -1,11 +1,12 @@
-import type { Answer, LatentKind } from '../answer';
+import type { LatentKind } from '../answer';
 import { remember } from '../water/remember';
 import { Problem } from '../problem';
 import type { Change, Curve, Substance } from '../substance';
-import { missing, need, readable } from './given';
-import { ATMOSPHERE_PA, coexistenceTermCurve, latentCurve, type Around, type Answered } from './latentCurves';
-import { joined, NO_MARKS } from './marks';
-import { heatKey, usualKind, type MaterialData } from './materialData';
+import { missing, readable } from './given';
+import { coexistenceTermCurve } from './coexistenceTerm';
+import { defaultKind, disagreementOf } from './disagreementOf';
+import { ATMOSPHERE_PA, latentCurve, type Around, type Answered } from './latentCurves';
+import { heatKey, type MaterialData } from './materialData';
 import { materialLadder } from './materialLadder';
 import { materialEnthalpy, materialHeatCapacity } from './phaseCurves';
 import { materialBoiling, materialPressure } from './saturationCurves';
@@ -85,72 +86,11 @@ function changesOf(data: MaterialData): readonly Change[] {
   return [...data.solidChanges, 'fusion', 'vaporization', 'sublimation'].filter(has);
 }
 
-/** The usual kind, unless only another one is given. */
-function defaultKind(data: MaterialData, change: Change): LatentKind {
-  const usual = usualKind(change);
-  const kinds = [usual, 'coexistence', 'isobaric', 'standard'] as const;
-  return kinds.find((kind) => data.heats.has(heatKey(change, kind))) ?? usual;
-}
-
-function referenceOf({ ladder }: Around): string {
+function referenceOf(around: Around): string {
   try {
-    return `${ladder(ATMOSPHERE_PA).reference}: h = 0`;
+    return `${around.ladder(ATMOSPHERE_PA).reference}: h = 0`;
   } catch (thrown) {
     if (thrown instanceof Problem) return 'no path at one atmosphere';
     throw thrown;
   }
-}
-
-/** [L(to) − L(from)] − ∫Δcp dT where the heat is given by itself over a range; the two-phase line to the vapour needs real-gas data. */
-function disagreementOf({ data, ladder }: Around, change: Change, fromK: number, toK: number): Answer {
-  const kind = defaultKind(data, change);
-  if (kind === 'coexistence') {
-    throw missing(
-      data,
-      `real-gas correction along the two-phase line, without which the heat of ${change} and heat capacities can't be compared,`,
-    );
-  }
-  const found = need(data, data.heats.get(heatKey(change, kind)), `heat of ${change}`);
-  if (found.single) throw missing(data, `second value of the heat of ${change}, at another temperature,`);
-  const curve = latentCurve({ data, ladder }, change, kind, 'latent');
-  const hotPhase =
-    change === 'vaporization' || change === 'sublimation' ? 'gas' : change === 'fusion' ? 'liquid' : 'solid';
-  const coldPhase = change === 'vaporization' ? 'liquid' : 'solid';
-  const [coldForm, hotForm] = hotPhase === 'solid' ? change.split('-') : [formsOf(data.solidChanges).at(-1), undefined];
-  const cold = materialHeatCapacity(data, coldPhase, 'standard', coldPhase === 'solid' ? coldForm : undefined);
-  const hot = materialHeatCapacity(data, hotPhase, 'standard', hotForm);
-  const from = Math.max(curve.from, cold.from, hot.from);
-  const to = Math.min(curve.to, cold.to, hot.to);
-  for (const received of [fromK, toK]) {
-    if (received >= from && received <= to) continue;
-    throw new Problem({
-      code: 'range',
-      argument: 'temperature',
-      quantity: 'temperature',
-      received,
-      from,
-      to,
-      subject: `disagreement about ${change} of ${data.name}`,
-    });
-  }
-  const area = (phase: string, form: string | undefined): number => {
-    const given = data.heatCapacities.get(form ?? phase) ?? data.heatCapacities.get(phase);
-    return need(data, given, `${phase} heat capacity`).shape.area(fromK, toK);
-  };
-  return {
-    value:
-      curve.at(toK) -
-      curve.at(fromK) -
-      (area(hotPhase, hotForm) - area(coldPhase, coldPhase === 'solid' ? coldForm : undefined)),
-    unit: 'J/mol',
-    kind,
-    method: 'change of the heat given less the integral of the heat-capacity difference given',
-    sources: [...new Set([...curve.sources, ...cold.sources, ...hot.sources])],
-    range: { axis: 'temperature', from, to },
-    marks: joined(
-      curve.marksAt?.(fromK) ?? NO_MARKS,
-      cold.marksAt?.(fromK) ?? NO_MARKS,
-      hot.marksAt?.(fromK) ?? NO_MARKS,
-    ),
-  };
 }

@@ -1,4 +1,5 @@
 import { monotoneTable } from './monotoneTable';
+import type { Shape } from './shape';
 
 /** A two-phase line: pressure in Pa against temperature in K, both ways. */
 export interface PressureShape {
@@ -41,30 +42,24 @@ export function pressureTable(temperaturesK: readonly number[], pressuresPa: rea
   const last = -1 / (temperaturesK[temperaturesK.length - 1] as number);
   return {
     at: (t) => Math.exp(table.at(-1 / t)),
-    inverse: (p) => -1 / rootOf(table.at, table.slope, Math.log(p), first, last),
+    inverse: (p) => -1 / rootOf(table, Math.log(p), first, last),
   };
 }
 
 const MOST_STEPS = 60;
 
 /** Newton's steps, halving the bracket wherever one would leave it. */
-function rootOf(
-  f: (x: number) => number,
-  slope: (x: number) => number,
-  wanted: number,
-  first: number,
-  last: number,
-): number {
+function rootOf(line: Shape, wanted: number, first: number, last: number): number {
   let low = first;
   let high = last;
-  if (wanted <= f(low)) return low + (wanted - f(low)) / slope(low);
-  if (wanted >= f(high)) return high + (wanted - f(high)) / slope(high);
+  if (wanted <= line.at(low)) return low + (wanted - line.at(low)) / line.slope(low);
+  if (wanted >= line.at(high)) return high + (wanted - line.at(high)) / line.slope(high);
   let x = (low + high) / 2;
   for (let step = 0; step < MOST_STEPS; step++) {
-    const miss = f(x) - wanted;
+    const miss = line.at(x) - wanted;
     if (miss > 0) high = x;
     else low = x;
-    const newton = x - miss / slope(x);
+    const newton = x - miss / line.slope(x);
     const next = newton > low && newton < high ? newton : (low + high) / 2;
     if (Math.abs(next - x) <= 2e-16 * Math.abs(x)) return next;
     x = next;
