@@ -2,13 +2,8 @@ import { loadModule } from './enumLists.mjs';
 
 /** One help page a function and an index, made from the finished list of functions and the published checks. */
 export function helpPages(list) {
-  const { waterChecks } = loadModule('functions/checks/waterChecks.ts');
-  const { condensedChecks } = loadModule('functions/checks/condensedChecks.ts');
-  const { storageChecks } = loadModule('functions/checks/storageChecks.ts');
-  const { fitChecks } = loadModule('functions/checks/fitChecks.ts');
-  const { unitChecks } = loadModule('functions/checks/unitChecks.ts');
+  const { checkList: checks } = loadModule('functions/checks/checkList.ts');
   const { formulaOf } = loadModule('functions/checks/check.ts');
-  const checks = [...waterChecks, ...condensedChecks, ...storageChecks, ...fitChecks, ...unitChecks];
   const pages = list.functions.map((entry) => [
     `help/${entry.id.toLowerCase()}.html`,
     page(

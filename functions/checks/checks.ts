@@ -9,12 +9,7 @@ import { satPressure } from '../satPressure';
 import { satTemperature } from '../satTemperature';
 import { toUnits } from '../toUnits';
 import type { Check } from './check';
-import { condensedChecks } from './condensedChecks';
-import { estimateChecks } from './estimateChecks';
-import { fitChecks } from './fitChecks';
-import { storageChecks } from './storageChecks';
-import { unitChecks } from './unitChecks';
-import { waterChecks } from './waterChecks';
+import { checkList } from './checkList';
 
 const functions: Readonly<Record<string, (...args: never[]) => unknown[][]>> = {
   LATENT: latent,
@@ -30,14 +25,10 @@ const functions: Readonly<Record<string, (...args: never[]) => unknown[][]>> = {
 };
 
 /** Every check with the call that computes it. */
-export const checks: readonly { readonly check: Check; readonly run: () => number }[] = [
-  ...waterChecks,
-  ...condensedChecks,
-  ...storageChecks,
-  ...estimateChecks,
-  ...fitChecks,
-  ...unitChecks,
-].map((check) => ({ check, run: () => compute(check) }));
+export const checks: readonly { readonly check: Check; readonly run: () => number }[] = checkList.map((check) => ({
+  check,
+  run: () => compute(check),
+}));
 
 function compute(check: Check): number {
   const fn = functions[check.call];
