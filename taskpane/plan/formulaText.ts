@@ -1,5 +1,5 @@
 import type { LatentKind } from '../../core/answer';
-import { UNITS_NAME } from '../boot/readSnapshot';
+import { SUBSTANCES_NAME, UNITS_NAME } from '../boot/readSnapshot';
 
 /** `pressure` is left out at one standard atmosphere, `stated pressure` never is. */
 export type FormulaArgument = { readonly text: string } | 'temperature' | 'pressure' | 'stated pressure' | 'blank';
@@ -16,6 +16,8 @@ export interface FormulaAsk {
 
 /** What the formula is asked at. */
 export interface FormulaAt {
+  /** True for a substance of the workbook's own: its rows become an argument, so that the formula follows them. */
+  readonly house?: boolean;
   /** A number in the workbook's unit, or a cell that holds one. */
   readonly temperature: number | string;
   readonly pressure: {
@@ -40,8 +42,9 @@ export function formulaText(ask: FormulaAsk, at: FormulaAt): string {
   const kind = ask.kind === undefined ? [] : [`kind=${ask.kind}`];
   const pressure = ask.atPressure === true && !at.pressure.usual ? [`at_pressure=${at.pressure.text}`] : [];
   const options = [...unitOptions(ask, at), ...kind, ...pressure].join('; ');
+  const rows = at.house === true ? [SUBSTANCES_NAME] : [];
   const last = options === '' ? [] : [quoted(options)];
-  return `=LATENTRY.${ask.name}(${[...written, UNITS_NAME, ...last].join(',')})`;
+  return `=LATENTRY.${ask.name}(${[...written, UNITS_NAME, ...rows, ...last].join(',')})`;
 }
 
 function unitOptions({ name }: FormulaAsk, { units }: FormulaAt): string[] {

@@ -33,6 +33,7 @@ const steps = (): Promise<number> => page.evaluate(() => paneTest.host.undoLog.l
 const button = (name: string | RegExp) => page.getByRole('button', { name });
 const alert = () => page.getByRole('alert').filter({ visible: true });
 const field = () => page.getByRole('combobox', { name: 'Find a substance' });
+const listed = () => page.getByRole('listbox', { name: 'Substances' });
 const slider = () => page.getByRole('slider', { name: 'Temperature' });
 const press = async (...keys: string[]): Promise<void> => {
   for (const key of keys) await page.keyboard.press(key);
@@ -62,11 +63,11 @@ describe('finding a substance', () => {
     await press('Tab');
     expect(await field().evaluate((input) => input === document.activeElement)).toBe(true);
     await page.keyboard.type('steam');
-    await page.getByRole('option', { name: 'water steam' }).waitFor();
+    await listed().getByRole('option', { name: 'water steam' }).waitFor();
     await page.getByRole('status').filter({ hasText: 'One match: water.' }).waitFor();
     await press('ArrowDown');
     const active = await field().getAttribute('aria-activedescendant');
-    expect(await page.getByRole('option', { selected: true }).getAttribute('id')).toBe(active);
+    expect(await listed().getByRole('option', { selected: true }).getAttribute('id')).toBe(active);
     await press('Enter');
     await page.getByRole('article', { name: 'water' }).waitFor();
     expect(await field().getAttribute('aria-expanded')).toBe('false');
@@ -79,7 +80,9 @@ describe('finding a substance', () => {
   ])('by %s, and says by which word', async (text, by) => {
     await openSection();
     await field().fill(text);
-    await page.getByRole('option', { name: `water ${by}` }).click();
+    await listed()
+      .getByRole('option', { name: `water ${by}` })
+      .click();
     await page.getByRole('article', { name: 'water' }).waitFor();
   });
 
@@ -94,13 +97,13 @@ describe('finding a substance', () => {
   it('lists everything without a word, and closes with Escape', async () => {
     await openSection();
     await field().click();
-    const all = await page.getByRole('option').count();
+    const all = await listed().getByRole('option').count();
     await page
       .getByRole('status')
       .filter({ hasText: `${all} substances.` })
       .waitFor();
     await press('Escape');
-    expect(await page.getByRole('option').count()).toBe(0);
+    expect(await listed().getByRole('option').count()).toBe(0);
   });
 });
 
@@ -169,6 +172,7 @@ describe('the card', () => {
       .first()
       .waitFor();
     expect(await page.getByText('ΔCp at 101.325 kPa').first().isVisible()).toBe(false);
+    await page.getByRole('textbox', { name: 'Temperature, °C' }).fill('99');
     await page.getByText('Other kinds of this heat').nth(1).click();
     for (const label of ['ΔCp at 101.325 kPa', 'ΔCp° of the standard states']) {
       await page.getByText(label).filter({ visible: true }).first().waitFor();
@@ -261,6 +265,63 @@ describe('inserting a formula', () => {
     await page.getByRole('status').filter({ hasText: 'In Data!A1 now:' }).waitFor();
     // IAPWS R6-95(2018): 18.015268 g/mol; one rounding from kg/mol.
     expect(Math.abs(Number(await value('A1')) - 18.015268)).toBeLessThanOrEqual(4e-15);
+  });
+});
+
+describe('a substance of the workbook’s own', () => {
+  const input = (label: string) => page.getByLabel(label, { exact: true });
+  const fill = async (texts: Readonly<Record<string, string>>): Promise<void> => {
+    for (const [label, text] of Object.entries(texts)) await input(label).fill(text);
+  };
+  const add = () => button('Add to the Substances sheet');
+
+  it('is checked, written as rows, listed with a badge, and works in formulas that follow its rows', async () => {
+    await openSection();
+    await page.getByText('Add a substance of your own').click();
+    await fill({ Name: 'kelp extract', Property: 'liquid heat capacty', Coefficients: '3.6' });
+    await add().click();
+    await page.getByText('Perhaps liquid heat capacity?').waitFor();
+    await expect.poll(() => input('Property').evaluate((e) => e === document.activeElement)).toBe(true);
+    expect(await steps()).toBe(0);
+    await fill({ Property: 'liquid heat capacity', Unit: 'kJ/(kg K)', 'Valid from': '0', 'Valid to': '90' });
+    await fill({ Source: 'our own log' });
+    await add().click();
+    await page.getByText('Written to Substances!A5:I5').waitFor();
+    await fill({ Property: 'melting temperature', Coefficients: '-3', Unit: 'degC' });
+    await add().click();
+    await page.getByText('Written to Substances!A6:I6').waitFor();
+    await button('Show kelp extract').click();
+    await page.getByRole('article', { name: 'kelp extract' }).waitFor();
+    await select('B2');
+    await button('Insert formula: heat capacity: liquid').click();
+    await page.getByRole('status').filter({ hasText: 'In Data!B2 now:' }).waitFor();
+    expect(await formula('B2')).toBe(
+      '=LATENTRY.HEATCAP("kelp extract","liquid",25,,,Latentry_units,Latentry_substances)',
+    );
+    // 3.6 as typed, through J/(kg K) and back: two roundings.
+    expect(Math.abs(Number(await value('B2')) - 3.6)).toBeLessThanOrEqual(2e-15);
+    await field().fill('kelp');
+    expect(await listed().getByRole('option').first().innerText()).toMatch(/kelp extract[\s\S]*house/);
+  });
+
+  it('shows rows that can’t be read with their message', async () => {
+    await page.evaluate(() => paneTest.host.book.addSheet('Substances'));
+    await type(
+      'A1:I2',
+      [
+        ['Substance', 'Property', 'Form', 'Coefficients', 'Unit', 'Valid from', 'Valid to', 'Source', 'Revision'],
+        ['brine', 'liquid heat capacity', 'constant', 3.1, 'kJ/kg', 0, 50, 'our own log', 1],
+      ],
+      'Substances',
+    );
+    await page.evaluate(() => {
+      paneTest.host.book.names.set('latentry_substances', {
+        name: 'Latentry_substances',
+        ref: { sheet: 'Substances', address: 'A1:I2' },
+      });
+    });
+    await openSection();
+    await page.getByText(/^Substances row 2 \(brine, liquid heat capacity\), unit: allowed/).waitFor();
   });
 });
 

@@ -6,6 +6,7 @@ import type { Settings } from '../../../functions/settings/settings';
 import type { WorkbookHost } from '../../port';
 import { number } from '../look/number';
 import { useLook } from '../look/useLook';
+import { captionWords } from './diagram/captionWords';
 import { crossings } from './diagram/crossings';
 import { Diagram } from './diagram/Diagram';
 import { diagramOf } from './diagram/diagramOf';
@@ -38,6 +39,7 @@ export function SubstanceCard({ host, substance, settings, withoutUnits }: Subst
   const card = useCard(substance);
   const { ladder, pressurePa, temperatureK, window } = card;
   const writer = useMemo(() => unitWriter(settings, substance.molarMass), [settings, substance]);
+  const house = substance.group === 'house';
   const [cell, setCell] = useState('');
   const { temperature, pressure, decimal } = writer;
   const pressureText = `${plain(onScale(pressurePa, pressure), decimal)} ${settings.units.pressure.symbol}`;
@@ -47,6 +49,7 @@ export function SubstanceCard({ host, substance, settings, withoutUnits }: Subst
       temperature: onScale(temperatureK, temperature),
       pressure: { value: onScale(pressurePa, pressure), text: pressureText, usual: pressurePa === ATMOSPHERE_PA },
       units: writer.ownUnits,
+      house,
     },
     cell,
     withoutUnits,
@@ -62,6 +65,7 @@ export function SubstanceCard({ host, substance, settings, withoutUnits }: Subst
       ({ name, stable }) => stable || shown === undefined || shown.includes(name),
     );
   }, [substance, ladder, temperatureK, card.around]);
+  const marks = [...new Set(here.flatMap((crossing) => crossing.marks))];
   const step = niceStep(Math.abs(temperature.scale) * (window.toK - window.fromK), 200);
   const stepBy = (steps: number) => {
     const shown = onStep(onScale(temperatureK, temperature) + steps * step, step);
@@ -72,10 +76,10 @@ export function SubstanceCard({ host, substance, settings, withoutUnits }: Subst
     <article className={look.stack} aria-label={substance.name}>
       <header className={look.tight}>
         <h3 className={look.title}>
-          {substance.name} {substance.group === 'house' && <Badge appearance="outline">house</Badge>}
+          {substance.name} {house && <Badge appearance="outline">house</Badge>}
         </h3>
         <p className={look.quiet}>
-          {[substance.formula, substance.cas === '' ? '' : `CAS ${substance.cas}`, substance.group]
+          {[substance.formula, substance.cas === '' ? '' : `CAS ${substance.cas}`, house ? '' : substance.group]
             .filter((word) => word !== '')
             .join(' · ')}
         </p>
@@ -104,9 +108,8 @@ export function SubstanceCard({ host, substance, settings, withoutUnits }: Subst
             <PartOfDiagram ladder={ladder} around={card.around} onAround={card.setAround} label={rounded} />
           )}
           <figcaption className={look.quiet}>
-            A line’s slope is a heat capacity, in {writer.heatCapacity.unit}; a gap is a latent heat, in{' '}
-            {writer.heat.unit}, of the isobaric kind, since all of it is at {written(pressurePa, pressure, decimal)}.
-            Dashed: not the stable phase.
+            {captionWords(diagram, writer)}
+            {marks.length > 0 && ` Here: ${marks.join('; ')}.`}
           </figcaption>
           <details>
             <summary className={look.summary}>The diagram as a table</summary>
@@ -156,9 +159,13 @@ export function SubstanceCard({ host, substance, settings, withoutUnits }: Subst
         writer={writer}
         inserting={inserting}
       />
-      <h4 className={look.subtitle}>Constants</h4>
+      {substance.constants.length > 0 && (
+        <>
+          <h4 className={look.subtitle}>Constants</h4>
+          <Constants substance={substance} writer={writer} inserting={inserting} />
+        </>
+      )}
       {substance.synonyms.length > 0 && <p className={look.quiet}>Also found as {substance.synonyms.join(', ')}.</p>}
-      <Constants substance={substance} writer={writer} inserting={inserting} />
       <h4 className={look.subtitle}>What is known, and where from</h4>
       <Known substance={substance} pressurePa={pressurePa} writer={writer} />
       <DisagreementLine substance={substance} writer={writer} />

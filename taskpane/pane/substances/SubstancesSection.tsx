@@ -4,6 +4,7 @@ import type { WorkbookHost } from '../../port';
 import { Notice } from '../look/Notice';
 import { useLook } from '../look/useLook';
 import { settingsOf, useStore } from '../units/useUnits';
+import { AddSubstance } from './add/AddSubstance';
 import { HouseNotice } from './HouseNotice';
 import { SubstanceSearch } from './search/SubstanceSearch';
 import { SubstanceCard } from './SubstanceCard';
@@ -23,6 +24,7 @@ export function SubstancesSection({ host }: { readonly host: WorkbookHost }) {
       <h2 className={look.title}>Substances</h2>
       <HouseNotice state={state} faults={faults} />
       <SubstanceSearch entries={registry.entries} chosen={chosen} onChoose={choose} />
+      {settings !== undefined && <AddSubstance host={host} decimal={settings.decimal} onShow={setName} />}
       {chosen !== undefined && settings === undefined && (
         <Notice tone="error">
           The unit settings of the workbook can’t be read. Repair them in the section Units first.

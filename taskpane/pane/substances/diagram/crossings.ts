@@ -11,6 +11,8 @@ export interface Crossing {
   /** Slope of the curve there, J/(mol K), where both sides of the point have a value. */
   readonly slope?: number;
   readonly stable: boolean;
+  /** What its reader should know of the curve there, beside that the phase is not the stable one. */
+  readonly marks: readonly string[];
 }
 
 /** The rungs on either side of a transition. */
@@ -30,7 +32,7 @@ export function crossings(substance: Substance, ladder: Ladder, temperatureK: nu
   for (const [side, one] of own.entries()) {
     const enthalpy = gap === undefined ? undefined : side === 0 ? gap.below : gap.above;
     const crossing = crossingOf(rungName(one), true, temperatureK, (t) => one.enthalpy(t), one.fromK, one.toK);
-    if (enthalpy !== undefined) found.push({ ...crossing, name: rungName(one), enthalpy, stable: true });
+    if (enthalpy !== undefined) found.push({ ...crossing, name: rungName(one), enthalpy, stable: true, marks: [] });
     else if (crossing !== undefined) found.push(crossing);
   }
   for (const named of phasesOf(substance)) {
@@ -39,7 +41,8 @@ export function crossings(substance: Substance, ladder: Ladder, temperatureK: nu
     const curve = attempt(() => substance.enthalpy(phase, ladder.pressurePa, form));
     if (curve === undefined || temperatureK < curve.from || temperatureK > curve.to) continue;
     const crossing = crossingOf(rungName(named), false, temperatureK, (t) => curve.at(t), curve.from, curve.to);
-    if (crossing !== undefined) found.push(crossing);
+    const marks = (curve.marksAt?.(temperatureK) ?? []).filter(({ code }) => code !== 'metastable');
+    if (crossing !== undefined) found.push({ ...crossing, marks: marks.map(({ text }) => text) });
   }
   return found.sort((a, b) => a.enthalpy - b.enthalpy);
 }
@@ -58,7 +61,7 @@ function crossingOf(
   const high = Math.min(toK, temperatureK + HALF_K);
   const slope = high > low ? attempt(() => (enthalpy(high) - enthalpy(low)) / (high - low)) : undefined;
   const known = slope !== undefined && Number.isFinite(slope);
-  return { name, enthalpy: here, stable, ...(known ? { slope } : {}) };
+  return { name, enthalpy: here, stable, marks: [], ...(known ? { slope } : {}) };
 }
 
 function attempt<T>(work: () => T): T | undefined {

@@ -6,6 +6,7 @@ import type { Inserting } from '../insert/useInsert';
 import { latentFacts, type ChangeFacts, type KindFacts } from './latentFacts';
 import { lineFacts } from './lineFacts';
 import { heatCapacityFacts } from './phaseFacts';
+import { withoutEchoes } from './withoutEchoes';
 import { Quantities } from './Quantities';
 import type { Quantity } from './quantity';
 import { written, type UnitWriter } from './unitWriter';
@@ -42,8 +43,12 @@ export function Facts({ substance, temperatureK, pressurePa, settings, writer, i
       {facts.changes.map((change) => (
         <ChangeBlock key={change.change} {...change} {...shared} />
       ))}
-      <Quantities caption={`Heat capacity at ${facts.pressureText}`} quantities={facts.capacities} {...shared} />
-      <Quantities caption="With its vapour, and by itself" quantities={facts.lines} {...shared} />
+      <Quantities
+        caption={`Heat capacity at ${facts.pressureText}`}
+        quantities={withoutEchoes(facts.capacities)}
+        {...shared}
+      />
+      <Quantities caption="With its vapour, and by itself" quantities={withoutEchoes(facts.lines)} {...shared} />
     </div>
   );
 }
