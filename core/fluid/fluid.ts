@@ -15,7 +15,11 @@ const DEFAULT_KINDS: Readonly<Record<string, LatentKind>> = {
   sublimation: 'coexistence',
 };
 
-const UNITS: Readonly<Record<string, string>> = { 'critical pressure': 'Pa', 'acentric factor': '1' };
+const UNITS: Readonly<Record<string, string>> = {
+  'molar mass': 'kg/mol',
+  'critical pressure': 'Pa',
+  'acentric factor': '1',
+};
 
 /**
  * A process fluid from its stored numbers: one enthalpy for all phases, so that latent heats are differences and cycles
@@ -71,13 +75,6 @@ function has({ numbers, sublimation }: FluidParts, change: Change): boolean {
   return change === 'vaporization' || (change === 'sublimation' && sublimation !== undefined);
 }
 
-function constantsOf({ constants, molarMass }: FluidNumbers): Datum[] {
-  const mass: Datum = {
-    item: 'molar mass',
-    value: molarMass,
-    unit: 'kg/mol',
-    source: 'standard atomic weights',
-    confirmed: true,
-  };
-  return [mass, ...Object.entries(constants).map(([item, cited]) => ({ item, unit: UNITS[item] ?? 'K', ...cited }))];
+function constantsOf({ constants }: FluidNumbers): Datum[] {
+  return Object.entries(constants).map(([item, cited]) => ({ item, unit: UNITS[item] ?? 'K', ...cited }));
 }

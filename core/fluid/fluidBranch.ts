@@ -9,10 +9,10 @@ export interface FluidBranch {
   readonly toK: number;
   readonly method: string;
   /** J/mol; NaN where there is no such state. */
-  enthalpy(temperatureK: number): number;
+  readonly enthalpy: (temperatureK: number) => number;
   /** J/(mol K) */
-  heatCapacity(temperatureK: number): number;
-  marks(temperatureK: number): readonly Mark[];
+  readonly heatCapacity: (temperatureK: number) => number;
+  readonly marks: (temperatureK: number) => readonly Mark[];
 }
 
 const NO_MARKS: readonly Mark[] = [];
@@ -24,6 +24,9 @@ const IDEAL: readonly Mark[] = [{ code: 'ideal-gas', text: 'ideal gas' }];
 
 /** A metastable branch is followed until its heat capacity has grown by half since the saturated phase. */
 const HIGHEST_GROWTH = 1.5;
+
+/** And until it falls below this part of the ideal gas's. */
+const LEAST_OF_IDEAL = 0.95;
 
 /** Liquid is described to this part of the critical temperature where it does not boil before. */
 const HOTTEST_LIQUID = 0.95;
@@ -102,7 +105,10 @@ function gasBranch(parts: FluidParts, pressurePa: number): FluidBranch {
   const dew = Math.max(coldest, line.temperature(Math.max(pressurePa, line.pressure(numbers.lineFromK))));
   const stableFrom = Math.max(dew, coldest);
   const most = HIGHEST_GROWTH * gas.heatCapacity(stableFrom, pressurePa);
-  const sound = (k: number): boolean => gas.heatCapacity(k, pressurePa) <= most;
+  const sound = (k: number): boolean => {
+    const cp = gas.heatCapacity(k, pressurePa);
+    return cp <= most && cp >= LEAST_OF_IDEAL * gas.idealHeatCapacity(k);
+  };
   return {
     fromK: edge(sound, stableFrom, coldest),
     toK: Math.min(gas.ideal.toK, HOTTEST_GAS_K),

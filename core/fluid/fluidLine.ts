@@ -7,19 +7,19 @@ import { lnPressureCurvature, lnPressureSlope, lnReducedPressure } from './wagne
 /** The saturation line of a fluid in SI units; temperatures below the critical one. */
 export interface FluidLine {
   /** Pa */
-  pressure(temperatureK: number): number;
+  readonly pressure: (temperatureK: number) => number;
   /** d ln p/dT, 1/K */
-  lnSlope(temperatureK: number): number;
+  readonly lnSlope: (temperatureK: number) => number;
   /** d² ln p/dT², 1/K² */
-  lnCurvature(temperatureK: number): number;
+  readonly lnCurvature: (temperatureK: number) => number;
   /** K */
-  temperature(pressurePa: number): number;
+  readonly temperature: (pressurePa: number) => number;
   /** Heat of vaporization, J/mol, and its slope along the line. */
-  latent(temperatureK: number): number;
-  latentSlope(temperatureK: number): number;
+  readonly latent: (temperatureK: number) => number;
+  readonly latentSlope: (temperatureK: number) => number;
   /** Enthalpy of the saturated liquid, J/mol, and its slope along the line. */
-  liquid(temperatureK: number): number;
-  liquidSlope(temperatureK: number): number;
+  readonly liquid: (temperatureK: number) => number;
+  readonly liquidSlope: (temperatureK: number) => number;
 }
 
 const MOST_STEPS = 60;

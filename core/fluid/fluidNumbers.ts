@@ -48,6 +48,7 @@ export interface FluidNumbers {
   readonly criticalK: number;
   readonly criticalPa: number;
   readonly acentric: number;
+  /** Polar and hydrogen-bond terms of the vapour; with a dimer the shifts of its heat (kJ/mol) and of ln K. */
   readonly polar: number;
   readonly bonding: number;
   readonly meltingK: number;

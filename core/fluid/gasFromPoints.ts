@@ -39,3 +39,12 @@ export function gasFromPoints(
     low: lowTail(fromK, cp, slope, BENT_FLOOR),
   };
 }
+
+/** The same gas with another heat capacity, divided by R, that is left as T → 0 below its data. */
+export function withFloor(gas: Nasa9Species, floor: number): Nasa9Species {
+  const [first] = gas.intervals;
+  if (first === undefined) return gas;
+  const cp = cpOverR(first, gas.fromK);
+  const slope = (cpOverR(first, gas.fromK + 0.01) - cp) / 0.01;
+  return { ...gas, low: lowTail(gas.fromK, cp, slope, floor) };
+}

@@ -9,15 +9,15 @@ import { emptyVapourState, vapourState, type VapourModel } from './vapourModel';
 export interface GasPhase {
   readonly ideal: Nasa9Species;
   /** J/mol; NaN where the equation has no vapour. */
-  enthalpy(temperatureK: number, pressurePa: number): number;
+  readonly enthalpy: (temperatureK: number, pressurePa: number) => number;
   /** Its derivative with temperature, J/(mol K). */
-  heatCapacity(temperatureK: number, pressurePa: number): number;
+  readonly heatCapacity: (temperatureK: number, pressurePa: number) => number;
   /** (∂h/∂p)·dp_sat/dT on the line, J/(mol K) */
-  pressureTerm(temperatureK: number): number;
+  readonly pressureTerm: (temperatureK: number) => number;
   /** pv/(RT); NaN where the equation has no vapour. */
-  compressibility(temperatureK: number, pressurePa: number): number;
-  idealEnthalpy(temperatureK: number): number;
-  idealHeatCapacity(temperatureK: number): number;
+  readonly compressibility: (temperatureK: number, pressurePa: number) => number;
+  readonly idealEnthalpy: (temperatureK: number) => number;
+  readonly idealHeatCapacity: (temperatureK: number) => number;
 }
 
 /** How fast the correction dies away above the line, as a part of the critical temperature. */
@@ -39,10 +39,10 @@ export function gasPhase(numbers: FluidNumbers, ideal: Nasa9Species, line: Fluid
     criticalK,
     criticalPa,
     acentric,
-    polar,
-    bonding,
     ideal,
-    ...(dimer === undefined ? {} : { dimer }),
+    ...(dimer === undefined
+      ? { polar, bonding }
+      : { polar: 0, bonding: 0, dimer, pairing: { heat: 1000 * polar, lnConstant: bonding } }),
   };
   let correction = 0;
   let correctionSlope = 0;

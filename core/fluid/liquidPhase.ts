@@ -6,12 +6,12 @@ import { emptyLiquidVolume, liquidVolume } from './liquidVolume';
 /** The liquid of a fluid on and off its saturation line. */
 export interface LiquidPhase {
   /** h = h(saturated) + (v − T·dv/dT)·(p − p_sat), J/mol */
-  enthalpy(temperatureK: number, pressurePa: number): number;
+  readonly enthalpy: (temperatureK: number, pressurePa: number) => number;
   /** Its derivative with temperature, J/(mol K). */
-  heatCapacity(temperatureK: number, pressurePa: number): number;
-  saturatedHeatCapacity(temperatureK: number): number;
+  readonly heatCapacity: (temperatureK: number, pressurePa: number) => number;
+  readonly saturatedHeatCapacity: (temperatureK: number) => number;
   /** (v − T·dv/dT)·dp_sat/dT, J/(mol K) */
-  pressureTerm(temperatureK: number): number;
+  readonly pressureTerm: (temperatureK: number) => number;
 }
 
 const scratch = emptyLiquidVolume();

@@ -6,8 +6,8 @@ import type { FluidNumbers } from './fluidNumbers';
 /** The solid below the melting point. */
 export interface SolidPhase {
   readonly fromK: number;
-  enthalpy(temperatureK: number): number;
-  heatCapacity(temperatureK: number): number;
+  readonly enthalpy: (temperatureK: number) => number;
+  readonly heatCapacity: (temperatureK: number) => number;
 }
 
 /** The solid, which lies the enthalpy of fusion below the liquid at the melting point; absent where no heat capacity is known. */

@@ -8,10 +8,10 @@ import type { SolidPhase } from './solidPhase';
 export interface SublimationLine {
   readonly fromK: number;
   readonly toK: number;
-  pressure(temperatureK: number): number;
+  readonly pressure: (temperatureK: number) => number;
   /** d ln p/dT, 1/K */
-  lnSlope(temperatureK: number): number;
-  temperature(pressurePa: number): number;
+  readonly lnSlope: (temperatureK: number) => number;
+  readonly temperature: (pressurePa: number) => number;
 }
 
 /** Abscissae and weights of the 5-point Gauss–Legendre rule on [−1, 1] (Abramowitz & Stegun, Table 25.4). */

@@ -1,7 +1,7 @@
 import { nasa9Species } from '../nasa9/nasa9Species';
 import type { Nasa9Species } from '../nasa9/nasa9Types';
 import type { Cited, FluidNumbers, SolidNumbers } from './fluidNumbers';
-import { gasFromPoints } from './gasFromPoints';
+import { gasFromPoints, withFloor } from './gasFromPoints';
 
 /** Fields of a packed fluid, in their order. */
 export const FLUID_FIELDS = [
@@ -9,7 +9,6 @@ export const FLUID_FIELDS = [
   'formula',
   'cas',
   'synonyms',
-  'grams',
   'gas',
   'dimer',
   'limits',
@@ -60,7 +59,7 @@ export function unpackFluid(packed: string, sources: readonly string[]): FluidNu
     }),
   );
   const value = (item: string): number => constants[item]?.value ?? NaN;
-  const molarMass = Number(fields.grams) / 1000;
+  const molarMass = value('molar mass');
   const ideal = idealOf(fields, molarMass);
   const solid = solidOf(fields.solid, sources);
   const disagreement = numbersOf(fields.disagreement);
@@ -80,7 +79,7 @@ export function unpackFluid(packed: string, sources: readonly string[]): FluidNu
     ...(fields.dimer === '' ? {} : { dimer: nasa9Species(fields.dimer) }),
     pressure: numbersOf(fields.pressure) as unknown as FluidNumbers['pressure'],
     latent: numbersOf(fields.latent) as unknown as FluidNumbers['latent'],
-    liquid: numbersOf(fields.liquid) as unknown as FluidNumbers['liquid'],
+    liquid: numbersOf(fields.liquid),
     spread: {
       nodes: numbersOf(fields.nodes),
       pressure: numbersOf(fields.pressureSpread),
@@ -133,12 +132,13 @@ function cited(
   };
 }
 
-/** A species of the nine-coefficient data, or `=` and a cubic with its range. */
+/** A species of the nine-coefficient data, or `=` and a cubic with its range; then `~` and the floor below its data. */
 function idealOf({ gas, name }: Fields, molarMass: number): Nasa9Species | undefined {
   if (gas === '') return undefined;
-  if (!gas.startsWith('=')) return nasa9Species(gas);
-  const [fromK = NaN, toK = NaN, ...cubic] = numbersOf(gas.slice(1));
-  return gasFromPoints(name, molarMass, cubic, fromK, toK);
+  const [what = '', floor] = gas.split('~');
+  const [fromK = NaN, toK = NaN, ...cubic] = numbersOf(what.slice(1));
+  const ideal = what.startsWith('=') ? gasFromPoints(name, molarMass, cubic, fromK, toK) : nasa9Species(what);
+  return floor === undefined ? ideal : withFloor(ideal, Number(floor));
 }
 
 function referenceOf(gas: string): string {

@@ -1,4 +1,4 @@
-import { fitFluid } from './fitFluid.mjs';
+import { fitFluid, vapourWith } from './fitFluid.mjs';
 import { leastSquares } from './leastSquares.mjs';
 import { deviation } from './spreadOf.mjs';
 
@@ -21,7 +21,7 @@ export function disagreementOf(models, fluid, points, joint) {
   const to = 0.8;
   const r = models.MOLAR_GAS_CONSTANT;
   const out = models.emptyVapourState();
-  const model = { ...fluid.vapour, polar: joint.polar, bonding: joint.bonding };
+  const model = vapourWith(fluid, joint);
   const rows = [];
   for (let i = 0; i < NODES; i++) {
     const t = from + ((to - from) * i) / (NODES - 1);

@@ -22,7 +22,7 @@ export async function fitAll(models) {
     .filter(({ name }) => !ELEMENTS.has(name))
     .map((record) => {
       const fluid = fluidOfRecord(models, record);
-      const points = readPoints(record);
+      const points = readPoints(models, record);
       const fit = fitFluid(models, fluid, points);
       return { record, fluid, points, fit, disagreement: disagreementOf(models, fluid, points, fit) };
     });

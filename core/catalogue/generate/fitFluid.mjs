@@ -8,20 +8,71 @@ const POLAR = 18;
 const BONDING = 19;
 const SIZE = 20;
 
+/** For a vapour in pairs: shifts of the enthalpy of pairing, kJ/mol, and of ln K, in the place of the two terms. */
+const PAIRS = { polar: [0, 4], bonding: [0, 0.4] };
+
 /**
  * How far a class of fluids may leave corresponding states: mean and standard deviation of the polar and the bonding term,
  * curvature of the ratio to corresponding states for latent heat and pressure, share of the departure that is unsure.
  */
 const CLASSES = {
-  normal: { polar: [0, 0.0005], bonding: [0, 1e-6], bend: 0.25, pressureBend: 0.25, vapour: 0.008, freedom: 1 },
-  polar: { polar: [0.006, 0.006], bonding: [0, 1e-6], bend: 1, pressureBend: 0.6, vapour: 0.015, freedom: 1.5 },
-  strong: { polar: [0.035, 0.01], bonding: [0, 1e-6], bend: 1.5, pressureBend: 0.8, vapour: 0.02, freedom: 1.5 },
-  nitrile: { polar: [0.1, 0.02], bonding: [0, 1e-6], bend: 2, pressureBend: 0.8, vapour: 0.03, freedom: 1.5 },
-  bonded: { polar: [0.016, 0.006], bonding: [0.0001, 0.0001], bend: 2.5, pressureBend: 1, vapour: 0.02, freedom: 1.5 },
-  alcohol: { polar: [0, 0.004], bonding: [0.003, 0.0015], bend: 5, pressureBend: 1.5, vapour: 0.03, freedom: 8 },
+  normal: {
+    polar: [0, 0.0005],
+    bonding: [0, 1e-6],
+    bend: 0.25,
+    pressureBend: 0.25,
+    vapour: 0.008,
+    freedom: 1,
+    heatBend: 0.006,
+  },
+  polar: {
+    polar: [0.006, 0.006],
+    bonding: [0, 1e-6],
+    bend: 1,
+    pressureBend: 0.6,
+    vapour: 0.015,
+    freedom: 1.5,
+    heatBend: 0.012,
+  },
+  strong: {
+    polar: [0.035, 0.01],
+    bonding: [0, 1e-6],
+    bend: 1.5,
+    pressureBend: 0.8,
+    vapour: 0.02,
+    freedom: 1.5,
+    heatBend: 0.012,
+  },
+  nitrile: {
+    polar: [0.1, 0.02],
+    bonding: [0, 1e-6],
+    bend: 2,
+    pressureBend: 0.8,
+    vapour: 0.03,
+    freedom: 1.5,
+    heatBend: 0.012,
+  },
+  bonded: {
+    polar: [0.016, 0.006],
+    bonding: [0.0001, 0.0001],
+    bend: 2.5,
+    pressureBend: 1,
+    vapour: 0.02,
+    freedom: 1.5,
+    heatBend: 0.015,
+  },
+  alcohol: {
+    polar: [0, 0.004],
+    bonding: [0.003, 0.0015],
+    bend: 5,
+    pressureBend: 1.5,
+    vapour: 0.03,
+    freedom: 8,
+    heatBend: 0.06,
+  },
 };
 
-const GRID_FROM = 0.3;
+const GRID_FROM = 0.2;
 
 /**
  * Fits saturation pressure, heat of vaporization and liquid enthalpy of one fluid together, so that they agree: Clapeyron's
@@ -33,11 +84,15 @@ const GRID_FROM = 0.3;
  * @param joint false: latent heat and heat capacities are fitted without each other
  */
 export function fitFluid(models, fluid, points, joint = true) {
-  const kind = CLASSES[fluid.class];
+  const pairs = fluid.vapour?.dimer === undefined ? {} : PAIRS;
+  const { expectedPolar: expected } = fluid;
+  const polar = expected === undefined ? {} : { polar: [expected, 0.25 * expected + 0.001] };
+  const kind = { ...CLASSES[fluid.class], ...polar, ...pairs };
   let state = start(models, fluid, kind);
   for (let round = 0; round < ROUNDS; round++) {
     const rows = [
       ...priors(models, fluid, kind, state),
+      ...smoothHeat(models, fluid, kind, points),
       ...points.flatMap((p) => dataRow(models, fluid, state, p)).map((row) => tempered(row, state)),
       ...(joint ? [...clapeyron(models, fluid, kind, state), ...closure(models, fluid, kind, state)] : []),
     ];
@@ -48,10 +103,10 @@ export function fitFluid(models, fluid, points, joint = true) {
   const rows = {
     pressure: (t) => withTerms(PRESSURE, pressureBasis(models, t)),
     latent: (t) => withTerms(LATENT, latentBasis(models, t)),
-    liquid: (t) => withTerms(LIQUID, liquidBasis(t)),
-    heatCapacity: (t) => withTerms(LIQUID, liquidSlopeBasis(t)),
+    liquid: (t) => withTerms(LIQUID, liquidBasis(models, t)),
+    heatCapacity: (t) => withTerms(LIQUID, liquidSlopeBasis(models, t)),
   };
-  return { ...state, rows };
+  return { ...state, liquid: joint ? refined(models, fluid, state) : extended(models, state.liquid), rows };
 }
 
 const ROUNDS = 12;
@@ -103,10 +158,17 @@ const empty = () => new Array(SIZE).fill(0);
 const pressureBasis = (models, t) => models.PRESSURE_POWERS.map((e) => (1 - t) ** e / t);
 const latentBasis = (models, t) => models.LATENT_POWERS.map((e) => (1 - t) ** e);
 const latentSlopeBasis = (models, t) => models.LATENT_POWERS.map((e) => -e * (1 - t) ** (e - 1));
-const liquidBasis = (t) => [1, t, t * t, t ** 3, t ** 4, Math.cbrt(1 - t), Math.cbrt(1 - t) ** 2];
-const liquidSlopeBasis = (t) => {
+const liquidBasis = (models, t) => {
+  const s = models.liquidVariable(t);
+  return [Math.cbrt(1 - t), Math.cbrt(1 - t) ** 2, 1, s, s * s, s ** 3, s ** 4];
+};
+const liquidSlopeBasis = (models, t) => {
+  const s = models.liquidVariable(t);
   const third = Math.cbrt(1 - t);
-  return [0, 1, 2 * t, 3 * t * t, 4 * t ** 3, -1 / (3 * third * third), -2 / (3 * third)];
+  const step = models.liquidVariable(1) - models.liquidVariable(0);
+  return [-1 / (3 * third * third), -2 / (3 * third), 0, 1, 2 * s, 3 * s * s, 4 * s ** 3].map((slope, i) =>
+    i < 2 ? slope : slope * step,
+  );
 };
 
 function withTerms(offset, terms, row = empty(), factor = 1) {
@@ -180,23 +242,47 @@ function priors(models, fluid, kind, state) {
   });
   // vapour and liquid approach their common enthalpy alike
   const half = empty();
-  half[LIQUID + 5] = 1;
+  half[LIQUID] = 1;
   half[LATENT] = 0.45;
   rows.push({ row: half, value: 0, sigma: 0.3 });
-  [30, 30, 30, 10, 5].forEach((sigma, i) => {
+  [3, 1e4, 40, 10, 4, 2].forEach((sigma, i) => {
     const row = empty();
-    row[LIQUID + i] = 1;
-    rows.push({ row, value: 0, sigma: i === 0 ? 1e4 : sigma * kind.freedom });
+    row[LIQUID + 1 + i] = 1;
+    rows.push({ row, value: 0, sigma: i < 2 ? sigma : sigma * kind.freedom });
   });
-  const second = empty();
-  second[LIQUID + 6] = 1;
-  rows.push({ row: second, value: 0, sigma: 3 });
   [kind.polar, kind.bonding].forEach(([value, sigma], i) => {
     const row = empty();
     row[POLAR + i] = 1;
     rows.push({ row, value, sigma });
   });
   return rows;
+}
+
+/** Apart from its rise at the critical point a liquid's heat capacity bends upwards, and little: this part of itself over a step. */
+const HEAT_BEND = 0.006;
+const HEAT_STEP = 0.06;
+
+function smoothHeat(models, fluid, kind, points) {
+  const known = points.filter(({ kind: of }) => of === 'cp').map(({ value }) => value / models.MOLAR_GAS_CONSTANT);
+  if (known.length === 0) return [];
+  const scale = known.sort((a, b) => a - b)[Math.floor(known.length / 2)];
+  const rows = [];
+  for (let t = fluid.meltingK / fluid.criticalK + HEAT_STEP; t < 0.8; t += HEAT_STEP / 2) {
+    const [before, here, after] = [-HEAT_STEP, 0, HEAT_STEP].map((h) => liquidSlopeBasis(models, t + h));
+    const row = withTerms(
+      LIQUID,
+      here.map((element, i) => (i < 2 ? 0 : before[i] - 2 * element + after[i])),
+    );
+    rows.push({ row, value: HEAT_BEND * scale, sigma: kind.heatBend * scale });
+  }
+  return rows;
+}
+
+/** The model of the vapour with its two fitted terms. */
+export function vapourWith({ vapour }, { polar, bonding }) {
+  return vapour.dimer === undefined
+    ? { ...vapour, polar, bonding }
+    : { ...vapour, pairing: { heat: 1000 * polar, lnConstant: bonding } };
 }
 
 /** The vapour on the line, with the derivatives of its compressibility and enthalpy by the two terms of attraction. */
@@ -208,11 +294,11 @@ function vapourOnLine(models, fluid, state, t) {
       return models.vapourDeparture(t, p, fluid.acentric, polar, bonding, out) ? out : undefined;
     }
     const out = models.emptyVapourState();
-    const model = { ...fluid.vapour, polar, bonding };
+    const model = vapourWith(fluid, { polar, bonding });
     return models.vapourState(model, t * fluid.criticalK, p * fluid.criticalPa, out) ? out : undefined;
   };
   const middle = at(state.polar, state.bonding);
-  const steps = [1e-4, 1e-6];
+  const steps = fluid.vapour?.dimer === undefined ? [1e-4, 1e-6] : [1e-2, 1e-3];
   const derived = steps.map((step, i) => {
     const above = at(state.polar + (i === 0 ? step : 0), state.bonding + (i === 1 ? step : 0));
     const below = at(state.polar - (i === 0 ? step : 0), state.bonding - (i === 1 ? step : 0));
@@ -243,7 +329,7 @@ function dataRow(models, fluid, state, { kind, temperatureK, value, sigma }) {
     const reduced = value / r;
     return [
       {
-        row: withTerms(LIQUID, liquidSlopeBasis(t)),
+        row: withTerms(LIQUID, liquidSlopeBasis(models, t)),
         value: reduced + liquidTerm(models, fluid, state, t),
         sigma: sigma * reduced,
       },
@@ -255,13 +341,11 @@ function dataRow(models, fluid, state, { kind, temperatureK, value, sigma }) {
   if (!fluid.vapour) return [];
   const vapour = vapourOnLine(models, fluid, state, t);
   const ideal = models.nasa9Enthalpy(fluid.vapour.ideal, temperatureK);
-  return [
-    {
-      row,
-      value: reduced + (vapour.enthalpy - ideal) / (r * fluid.criticalK),
-      sigma: sigma * reduced,
-    },
-  ];
+  const rc = r * fluid.criticalK;
+  const terms = [state.polar, state.bonding];
+  const fixed = vapour.by.reduce((sum, by, i) => sum - by.enthalpy * terms[i], vapour.enthalpy - ideal);
+  vapour.by.forEach((by, i) => (row[POLAR + i] -= by.enthalpy / rc));
+  return [{ row, value: reduced + fixed / rc, sigma: sigma * reduced }];
 }
 
 /** Where the vapour is known well: its ideal gas has data, and the departure is small. */
@@ -304,19 +388,51 @@ function closure(models, fluid, kind, state) {
     if (v === undefined) continue;
     const temperatureK = t * fluid.criticalK;
     const departure = v.enthalpy - models.nasa9Enthalpy(fluid.vapour.ideal, temperatureK);
-    const row = withTerms(LIQUID, liquidBasis(t), withTerms(LATENT, latentBasis(models, t)));
+    const row = withTerms(LIQUID, liquidBasis(models, t), withTerms(LATENT, latentBasis(models, t)));
     v.by.forEach((by, i) => (row[POLAR + i] -= by.enthalpy / rc));
     const value = (v.enthalpy - v.by[0].enthalpy * state.polar - v.by[1].enthalpy * state.bonding) / rc;
     const cold = Math.max(0, fluid.idealFromK - temperatureK);
-    const sigma = (Math.hypot(8, 1.2 * kind.vapour * 3 * departure, 0.4 * cold) * 1.6) / rc;
+    const pairs = fluid.vapour.dimer === undefined ? 0 : 100;
+    const sigma = (Math.hypot(4, pairs, 3.6 * kind.vapour * departure, 0.15 * cold) * 1.6) / rc;
     rows.push({ row, value, sigma });
   }
   return rows;
 }
 
+const extended = (models, liquid) => [...liquid, ...new Array(models.LIQUID_DEGREE + 3 - liquid.length).fill(0)];
+
+/** Where the vapour lacks this much of ideal volume, half of what is left of the closure is its, and half the liquid's. */
+const HALF_SHARE = 0.01;
+
+/**
+ * Terms of the saturated liquid to `LIQUID_DEGREE`, which take over what is left of h(vapour) − latent − h(liquid) where the
+ * vapour is nearly ideal and so cannot be the cause.
+ */
+function refined(models, fluid, state) {
+  const full = extended(models, state.liquid);
+  if (fluid.vapour === undefined || fluid.vapour.dimer !== undefined) return full;
+  const rc = models.MOLAR_GAS_CONSTANT * fluid.criticalK;
+  const rows = [];
+  const count = 120;
+  const from = (0.93 * fluid.meltingK) / fluid.criticalK;
+  for (let i = 0; i <= count; i++) {
+    const t = from + ((0.995 - from) * i) / count;
+    const s = models.liquidVariable(t);
+    const row = Array.from({ length: models.LIQUID_DEGREE + 1 }, (_, power) => s ** power);
+    const v = t < 0.93 ? vapourOnLine(models, fluid, state, t) : undefined;
+    const lack = v === undefined ? 1 : 1 - v.compressibility;
+    const share = (lack * lack) / (lack * lack + HALF_SHARE * HALF_SHARE);
+    const left =
+      v === undefined ? 0 : v.enthalpy / rc - models.reducedLatent(state.latent, t) - models.reducedLiquid(full, t);
+    rows.push({ row, value: left * (1 - share), sigma: 1 });
+  }
+  const { x } = leastSquares(rows, models.LIQUID_DEGREE + 1);
+  return full.map((term, i) => (i < 2 ? term : term + x[i - 2]));
+}
+
 /** Without the joint rows the liquid enthalpy still needs a zero and the vapour a mean. */
 function splitRows() {
   const row = empty();
-  row[LIQUID] = 1;
+  row[LIQUID + 2] = 1;
   return [{ row, value: 0, sigma: 1 }];
 }

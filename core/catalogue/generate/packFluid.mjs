@@ -14,7 +14,7 @@ const SOLID_FROM_K = 273.15;
 
 /** Text of one fluid for the generated file, in the order of FLUID_FIELDS. */
 export function packFluid(models, { record, fluid, points, fit, disagreement }, citations) {
-  const spread = spreadOf(models, fluid, fit, record);
+  const spread = spreadOf(models, fluid, fit, record, points);
   const { criticalK } = fluid;
   const sublimes = record.name === 'carbon dioxide' ? record.Tb.value : undefined;
   const lineFromK = Math.ceil(SUPERCOOLED * Math.min(fluid.meltingK, 303) * 100) / 100;
@@ -24,7 +24,6 @@ export function packFluid(models, { record, fluid, points, fit, disagreement }, 
     formula: record.formula,
     cas: record.cas,
     synonyms: record.synonyms.join(';'),
-    grams: String(record.molar_mass.value),
     gas: gasOf(fluid, record),
     dimer: fluid.vapour?.dimer?.name ?? '',
     limits: [lineFromK, vapourEnd(models, fluid, fit), ...(sublimes === undefined ? [] : [sublimes])]
@@ -59,23 +58,30 @@ export function packFluid(models, { record, fluid, points, fit, disagreement }, 
 /** Without an ideal gas the liquid at its melting point is the zero. */
 function zeroed(models, { vapour, meltingK, criticalK }, { liquid }) {
   if (vapour !== undefined) return liquid;
-  const [first, ...rest] = liquid;
-  return [first - models.reducedLiquid(liquid, meltingK / criticalK), ...rest];
+  const zero = models.reducedLiquid(liquid, meltingK / criticalK);
+  return liquid.map((term, i) => (i === 2 ? term - zero : term));
 }
 
 /** The hottest point on the line where the equation has a vapour, with some distance to where it has none. */
 function vapourEnd(models, fluid, fit) {
-  const { criticalK, acentric, dimer } = fluid;
+  const { criticalK, acentric } = fluid;
+  const dimer = fluid.vapour?.dimer;
+  const attraction = dimer === undefined ? [fit.polar, fit.bonding] : [0, 0];
   let t = 0.97;
   for (; t > 0.7; t -= 0.005) {
     const ahead = t + 0.012;
     const p = Math.exp(models.lnReducedPressure(fit.pressure, ahead));
-    if (models.vapourDeparture(ahead, p, acentric, fit.polar, fit.bonding, models.emptyDeparture())) break;
+    if (models.vapourDeparture(ahead, p, acentric, ...attraction, models.emptyDeparture())) break;
   }
   return Math.floor((dimer === undefined ? t : Math.min(t, 0.9)) * criticalK * 10) / 10;
 }
 
-function gasOf({ vapour }, { nasa9, Cp_gas_points: gasPoints }) {
+function gasOf(fluid, record) {
+  const gas = gasWithoutFloor(fluid, record);
+  return gas === '' || fluid.floor === undefined ? gas : `${gas}~${fluid.floor}`;
+}
+
+function gasWithoutFloor({ vapour }, { nasa9, Cp_gas_points: gasPoints }) {
   if (vapour === undefined) return '';
   if (gasPoints === undefined || nasa9?.gas) return nasa9.gas;
   const [interval] = vapour.ideal.intervals;
@@ -88,14 +94,17 @@ function cited({ value, uncertainty, source, detail, confirmed }, citations) {
   return `${short(value, 9)},${u},${citations.place(source, detail)},${confirmed === false ? 0 : 1}`;
 }
 
-function constantsOf({ name, Tm, Tb, Tc, Pc, acentric_factor: acentric }, citations) {
+function constantsOf(record, citations) {
+  const { name, Tm, Tb, Tc, Pc, acentric_factor: acentric } = record;
   const pascal = {
     ...Pc,
     value: Pc.value * 1e5,
     ...(Pc.uncertainty === undefined ? {} : { uncertainty: Pc.uncertainty * 1e5 }),
   };
   const carbonDioxide = name === 'carbon dioxide';
+  const { molar_mass: mass } = record;
   const rows = [
+    ['molar mass', { ...mass, value: mass.value / 1000 }],
     ['melting temperature', Tm],
     [carbonDioxide ? 'sublimation temperature' : 'boiling temperature', Tb],
     ['critical temperature', Tc],

@@ -4,8 +4,8 @@
  * `p`: pressure in Pa; `latent`: real vapour at saturation, J/mol; `standard`: ideal gas minus liquid, J/mol; `cp`: liquid at
  * saturation, J/(mol K). Rejected prints are in no fit.
  */
-export function readPoints(record) {
-  return [...pressures(record), ...latents(record), ...heatCapacities(record)];
+export function readPoints(models, record) {
+  return [...pressures(record), ...latents(record), ...heatCapacities(record), ...liquidOfNasa9(models, record)];
 }
 
 const usable = (value) => value !== undefined && value.rejected === undefined;
@@ -97,10 +97,25 @@ function heatCapacities({ Cp_liquid, Tc }) {
   return (Cp_liquid.values ?? [])
     .filter(usable)
     .filter(({ T_K }) => T_K < 0.97 * Tc.value)
-    .map((from) => point('cp', from.T_K, from.value, deviationOfHeatCapacity(from.T_K / Tc.value), from));
+    .map((from) => point('cp', from.T_K, from.value, deviationOfHeatCapacity(from.T_K / Tc.value, from), from));
 }
 
-/** Near the critical point it matters along which path a heat capacity was meant. */
-function deviationOfHeatCapacity(reduced) {
-  return reduced < 0.8 ? 0.008 : reduced < 0.9 ? 0.03 : 0.15;
+/** End points of a handbook's correlation are worse; near the critical point it matters along which path they were meant. */
+function deviationOfHeatCapacity(reduced, { source }) {
+  if (source !== 'perry2-72') return 0.006;
+  return reduced < 0.8 ? 0.008 : reduced < 0.85 ? 0.03 : 0.12;
+}
+
+const LIQUID_POINTS = 6;
+
+/** Heat capacities of a liquid of the nine-coefficient data, read at equal steps between melting point and 0.8 Tc. */
+function liquidOfNasa9(models, { nasa9, Tm, Tc }) {
+  if (!nasa9?.liquid) return [];
+  const liquid = models.nasa9Species(nasa9.liquid);
+  const from = Math.max(liquid.fromK, Tm.value);
+  const to = Math.min(liquid.toK, 0.8 * Tc.value);
+  return Array.from({ length: LIQUID_POINTS }, (_, i) => {
+    const t = from + ((to - from) * i) / (LIQUID_POINTS - 1);
+    return point('cp', t, models.nasa9Cp(liquid, t), 0.008 * Math.sqrt(LIQUID_POINTS / 2), { source: 'nasa9' });
+  });
 }
