@@ -1,12 +1,13 @@
 import { shortNumber } from '../problem';
-import type { Gap, Ladder, Rung } from '../substance';
-import { boilingAt, type Boiling } from './boilingAt';
+import type { Change, Gap, Ladder, Rung } from '../substance';
+import { boilingAt, samePressure, type Boiling } from './boilingAt';
 import { readable } from './given';
 import type { HeatCapacityData, MaterialData } from './materialData';
 import {
   condensedChain,
   covers,
   heatAt,
+  singleHeat,
   heatCapacityOf,
   SAME_K,
   type Chain,
@@ -55,7 +56,7 @@ const ROOM_K = 298.15;
 export function materialLadder(data: MaterialData, pressurePa: number): MaterialLadder {
   const condensed = condensedChain(data);
   const boiling = boilingAt(data, pressurePa);
-  const chain = 'lacking' in boiling ? condensed : withGas(data, condensed, boiling);
+  const chain = 'lacking' in boiling ? condensed : withGas(data, condensed, boiling, pressurePa);
   const pieces = piecesOf(chain, boiling);
   const best = pieces.reduce<Piece | undefined>((a, b) => (a === undefined || rank(b) > rank(a) ? b : a), undefined);
   if (best === undefined) {
@@ -76,16 +77,29 @@ function withGas(
   data: MaterialData,
   { stations, crossings }: Chain,
   boiling: Exclude<Boiling, { lacking: string }>,
+  pressurePa: number,
 ): Chain {
   const { change, temperatureK } = boiling;
   const sublimes = change === 'sublimation';
   const kept = sublimes ? stations.filter(({ phase }) => phase === 'solid') : stations;
   if (kept.length === 0) return { stations, crossings };
-  const top: Crossing = { change, temperatureK, heat: heatAt(data, change, temperatureK) };
+  const top: Crossing = { change, temperatureK, heat: heatToVapour(data, change, temperatureK, pressurePa) };
   return {
     stations: [...kept, { phase: 'gas', cp: heatCapacityOf(data, 'gas') }],
     crossings: [...crossings.slice(0, kept.length - 1), top],
   };
+}
+
+/** A single heat of vaporization holds where the material boils at the pressure of its boiling temperature. */
+function heatToVapour(
+  data: MaterialData,
+  change: Change,
+  temperatureK: number,
+  pressurePa: number,
+): number | undefined {
+  const point = readable(data.transitions.get(change));
+  const own = point !== undefined && samePressure(pressurePa, point.pressurePa);
+  return heatAt(data, change, temperatureK) ?? (own ? singleHeat(data, change, point.temperatureK) : undefined);
 }
 
 /** More transitions first, then one that has a liquid, then the wider one. */

@@ -1,5 +1,5 @@
 import type { Datum } from '../answer';
-import { Problem } from '../problem';
+import { Problem, shortNumber } from '../problem';
 import type { Decimal } from '../units/parseNumber';
 import { parseQuantity } from '../units/parseQuantity';
 import type { PropertyRow } from './gatherRows';
@@ -21,6 +21,9 @@ import { readPressure } from './readPressure';
 import { refusal, RowReader, type Beside } from './rowReader';
 
 const ATMOSPHERE_PA = 101325;
+
+/** A boiling temperature and a vapour pressure that are printed for one material agree within this, K. */
+const AGREEMENT_K = 1;
 
 /** Everything that the rows of one substance say; rows that can't be read are faults and stand in for their property. */
 export function readMaterial(names: NamedRows, decimal: Decimal, faults: HouseFault[]): MaterialData {
@@ -51,6 +54,7 @@ class MaterialReader {
     const order = (row: PropertyRow): number =>
       row.property.is === 'constant' ? 0 : row.property.is === 'transition' ? 1 : 2;
     for (const row of [...rows].sort((a, b) => order(a) - order(b))) this.readRow(row);
+    this.boilingOfPressure();
     const molar = this.constants.get('molar mass');
     const molarMass = molar === undefined || molar instanceof Problem ? NaN : molar.value;
     if (Number.isNaN(molarMass)) this.notes.unshift('no molar mass: answers per mass only');
@@ -70,6 +74,26 @@ class MaterialReader {
       pressures: this.pressures,
       lack: (piece) => this.lack(piece),
     };
+  }
+
+  /** Where the vapour pressure is one atmosphere the material boils; a boiling temperature beside it has to agree. */
+  private boilingOfPressure(): void {
+    const line = this.pressures.get('liquid');
+    const row = this.transitions.get('vaporization');
+    if (line === undefined || line instanceof Problem || row instanceof Problem) return;
+    const pressurePa = row?.pressurePa ?? ATMOSPHERE_PA;
+    if (!(pressurePa >= line.shape.at(line.fromK) && pressurePa <= line.shape.at(line.toK))) return;
+    const temperatureK = line.shape.inverse(pressurePa);
+    if (row === undefined) {
+      this.transitions.set('vaporization', { temperatureK, pressurePa });
+      return;
+    }
+    if (Math.abs(temperatureK - row.temperatureK) <= AGREEMENT_K) return;
+    const said = this.names.gathered.rows.find(
+      ({ property }) => property.is === 'transition' && property.change === 'vaporization',
+    );
+    const text = `the vapour pressure given says ${shortNumber(temperatureK)} K at this pressure; paths follow it`;
+    if (said !== undefined) this.beside(said.row.number, said.about).warn('coefficients', text);
   }
 
   /** Solid-solid changes by temperature, those without one last. */

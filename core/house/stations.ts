@@ -79,6 +79,12 @@ export function heatAt(data: MaterialData, change: Change, temperatureK: number)
   return undefined;
 }
 
+/** The heat that is given at the transition temperature only, J/mol. */
+export function singleHeat(data: MaterialData, change: Change, temperatureK: number): number | undefined {
+  const given = readable(data.heats.get(heatKey(change, usualKind(change))));
+  return given?.single === true ? given.shape.at(temperatureK) : undefined;
+}
+
 function reaches(data: MaterialData, change: Change, given: HeatData, temperatureK: number): boolean {
   if (!given.single) return covers(given, temperatureK);
   const at = readable(data.transitions.get(change))?.temperatureK;

@@ -5,7 +5,7 @@ import { heat } from '../../../core/path/heat';
 import { heatSteps } from '../../../core/path/heatSteps';
 import type { State } from '../../../core/path/state';
 import type { Curve, Substance } from '../../../core/substance';
-import { problemOf, row, substanceOf, WASH, type Row } from './rows';
+import { FIRST_ROW, houseOf, problemOf, row, substanceOf, WASH, type Row } from './rows';
 
 const SEED = { seed: 20260102, numRuns: 200 };
 const ATMOSPHERE_PA = 101325;
@@ -205,6 +205,33 @@ describe('parts of a material', () => {
     expect(problemOf(() => heat(still, at(283.15), { form: 'saturated', phase: 'gas' }, 1e5)).data.code).toBe(
       'missing',
     );
+  });
+
+  it('one heat of vaporization holds where it boils at one atmosphere, by its vapour pressure or its own row', () => {
+    const few = WASH.filter(([, property]) => property !== 'heat of vaporization');
+    const one = row('heat of vaporization', '', 846, 'kJ/kg');
+    for (const rows of [
+      [...few, one],
+      [...few, one, row('boiling temperature', '', 78.3, 'degC')],
+    ]) {
+      const still = substanceOf(rows);
+      const across = heat(
+        still,
+        { form: 'saturated', phase: 'liquid' },
+        { form: 'saturated', phase: 'gas' },
+        ATMOSPHERE_PA,
+      );
+      expect(across).toBeCloseTo(846 * 46, 6);
+      const boilingK = still.transitionTemperature('vaporization') ?? NaN;
+      expect(still.latent('vaporization', 'coexistence').at(boilingK)).toBeCloseTo(846 * 46, 6);
+      expect(still.ladder(5e4).gaps.map(({ change }) => change)).toEqual(['fusion']);
+    }
+  });
+
+  it('a boiling temperature that the vapour pressure contradicts is warned of', () => {
+    const { faults } = houseOf([...WASH, row('boiling temperature', '', 82, 'degC')]);
+    expect(faults).toMatchObject([{ row: FIRST_ROW + WASH.length, severity: 'warning', column: 'coefficients' }]);
+    expect(faults[0]?.message).toMatch(/says 351\.\d+ K at this pressure/);
   });
 
   it('a constant heat of vaporization with a range has no slope of its own but zero', () => {
