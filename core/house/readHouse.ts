@@ -1,11 +1,12 @@
-import type { CatalogueEntry } from '../substance';
+import type { CatalogueEntry, Substance } from '../substance';
 import type { Decimal } from '../units/parseNumber';
 import { EMPTY_HOUSE, type House, type HouseFault } from './house';
 import { houseRows } from './houseRow';
-import { houseNames } from './houseNames';
+import { houseNames, type NamedRows } from './houseNames';
 import { gatherRows } from './gatherRows';
 import { readMaterial } from './readMaterial';
 import { makeMaterial } from './makeMaterial';
+import type { MaterialData } from './materialData';
 
 export interface HouseOptions {
   readonly decimal: Decimal;
@@ -42,11 +43,14 @@ export function readHouse(values: readonly (readonly unknown[])[], options: Hous
   for (const names of named) {
     const material = readMaterial(names, options.decimal, faults);
     if (!names.reachable) continue;
-    const substance = makeMaterial(material);
-    const { name, formula, cas, synonyms } = names.words;
-    const entry: CatalogueEntry = { name, formula, cas, synonyms, group: 'house', make: () => substance };
-    (names.replaces ? replacing : entries).push(entry);
+    (names.replaces ? replacing : entries).push(entryOf(names, material));
   }
   faults.sort((a, b) => a.row - b.row);
   return { entries, replacing, faults };
+}
+
+function entryOf({ words }: NamedRows, material: MaterialData): CatalogueEntry {
+  const { name, formula, cas, synonyms } = words;
+  let made: Substance | undefined;
+  return { name, formula, cas, synonyms, group: 'house', make: () => (made ??= makeMaterial(material)) };
 }

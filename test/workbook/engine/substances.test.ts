@@ -19,11 +19,15 @@ function bookOf(cells: Record<string, BookCell>, formula = 'Substances!$A$4:$B$5
   };
 }
 
+function parsed(cell: unknown): unknown {
+  return JSON.parse(typeof cell === 'string' ? cell : 'null');
+}
+
 /** What the functions were told, as the small bundle echoes it. */
 async function told(book: Book | undefined, unitsText?: string): Promise<unknown> {
   const options = { ...(book === undefined ? {} : { book }), ...(unitsText === undefined ? {} : { unitsText }) };
   const [result] = await engine.evaluate(['=LATENTRY.HOUSE()'], options);
-  return JSON.parse(String(result?.values[0]?.[0]));
+  return parsed(result?.values[0]?.[0]);
 }
 
 describe('the substances of a book', () => {
@@ -61,7 +65,7 @@ describe('the substances of a book', () => {
     const calculated = await engine.calculate(
       bookOf({ ...cells, B5: { value: null, formula: '=1+2' }, D1: { value: null, formula: '=LATENTRY.HOUSE()' } }),
     );
-    expect(JSON.parse(String(calculated.sheets[0]?.cells['D1']?.value))).toMatchObject({
+    expect(parsed(calculated.sheets[0]?.cells['D1']?.value)).toMatchObject({
       house: {
         values: [
           ['Substance', 'Property'],
