@@ -20,8 +20,11 @@ function meantBy(word: string): readonly CatalogueEntry[] {
 
 /** A CAS registry number ends with the sum of its other digits, each times its place from the right, modulo 10. */
 function casHolds(cas: string): boolean {
-  const digits = cas.replace(/-/g, '');
-  const sum = [...digits.slice(0, -1)].reverse().reduce((s, digit, i) => s + (i + 1) * Number(digit), 0);
+  const digits = Array.from(cas.replace(/-/g, ''));
+  const sum = digits
+    .slice(0, -1)
+    .reverse()
+    .reduce((s, digit, i) => s + (i + 1) * Number(digit), 0);
   return /^\d{2,7}-\d\d-\d$/.test(cas) && sum % 10 === Number(digits.at(-1));
 }
 

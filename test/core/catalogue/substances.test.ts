@@ -324,7 +324,7 @@ describe('what is missing is said, never guessed', () => {
     expect(wrong).toEqual([]);
   });
 
-  it('disagreement is a finite number with its sources, or is said to be missing', () => {
+  it('disagreement is a small number with its sources, or is said to be missing', () => {
     const wrong: string[] = [];
     for (const substance of substances) {
       for (const change of substance.changes) {
@@ -333,7 +333,11 @@ describe('what is missing is said, never guessed', () => {
         const [a, b] = [0.4, 0.6].map((share) => latent.from + share * (latent.to - latent.from));
         const answer = ask(() => substance.disagreement(change, a!, b!));
         if (answer instanceof Problem) continue;
-        if (!Number.isFinite(answer.value) || answer.sources.length === 0) wrong.push(`${substance.name} ${change}`);
+        // Cited data of one substance may differ by some percent of the latent heat; more is a mistake.
+        const most = 0.1 * Math.abs(latent.at(a!));
+        if (!(Math.abs(answer.value) <= most) || answer.sources.length === 0) {
+          wrong.push(`${substance.name} ${change}: ${answer.value} J/mol of ${latent.at(a!)}`);
+        }
       }
     }
     expect(wrong).toEqual([]);
