@@ -11,10 +11,11 @@ const VAPOUR_SHARE = 0.1;
  * L(T) fitted without heat capacities less h(vapour) − h(liquid) with the liquid fitted without latent heats, as a cubic in
  * T/Tc between the melting point and 0.8 Tc: only its differences mean something.
  *
- * @returns [fromK, toK, standard uncertainty over the range, cubic], or undefined where the vapour is unknown
+ * @returns [fromK, toK, standard uncertainty over the range, cubic], or undefined where the vapour or the heat
+ * capacity of the liquid at two temperatures is unknown
  */
 export function disagreementOf(models, fluid, points, joint) {
-  if (fluid.vapour === undefined) return undefined;
+  if (fluid.vapour === undefined || !hasSlope(points)) return undefined;
   const apart = fitFluid(models, fluid, points, false);
   const { criticalK, criticalPa } = fluid;
   const from = Math.max(fluid.meltingK / criticalK, 0.3);
@@ -40,4 +41,12 @@ export function disagreementOf(models, fluid, points, joint) {
   );
   cubic[0] = 0;
   return [Math.ceil(from * criticalK * 100) / 100, Math.floor(to * criticalK * 100) / 100, uncertainty, ...cubic];
+}
+
+/** Two heat capacities so far apart say how it changes, K. */
+const APART_K = 30;
+
+function hasSlope(points) {
+  const ts = points.filter(({ kind }) => kind === 'cp').map(({ temperatureK }) => temperatureK);
+  return Math.max(...ts) - Math.min(...ts) > APART_K;
 }

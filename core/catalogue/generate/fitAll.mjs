@@ -9,7 +9,7 @@ import { readPoints } from './readPoints.mjs';
 const here = path.dirname(fileURLToPath(import.meta.url));
 
 /** Their liquid and gas are species of the nine-coefficient data, and they are in the catalogue as elements. */
-const ELEMENTS = new Set(['mercury', 'iodine']);
+export const ELEMENTS = new Set(['mercury', 'iodine']);
 
 export async function readRecords() {
   return JSON.parse(await readFile(path.join(here, 'records/fluids.json'), 'utf8'));

@@ -1,7 +1,8 @@
 /**
  * Writes `core/catalogue/fluids/fluids.generated.ts`: numbers fitted to the cited values in `records/fluids.json`.
  *
- * `--check` compares with the committed file instead of writing it; `--report` prints every residual.
+ * `--check` compares with the committed file instead of writing it; `--report` prints every residual, the disagreement of each fluid's
+ * data, and what the fits give for values that they have not seen.
  */
 import { readFile, writeFile } from 'node:fs/promises';
 import path from 'node:path';
@@ -9,6 +10,7 @@ import { fileURLToPath } from 'node:url';
 import { format, resolveConfig } from 'prettier';
 import { makeCitations } from './citations.mjs';
 import { fitAll } from './fitAll.mjs';
+import { loadForHoldOut } from './holdOut.mjs';
 import { loadModels } from './loadModels.mjs';
 import { packFluid } from './packFluid.mjs';
 import { report } from './report.mjs';
@@ -30,10 +32,11 @@ async function generated(fitted, sources, models) {
   return format(text, { ...(await resolveConfig(target)), parser: 'typescript' });
 }
 
-const models = await loadModels();
+const reporting = process.argv.includes('--report');
+const models = reporting ? await loadForHoldOut() : await loadModels();
 const { fitted, sources } = await fitAll(models);
-if (process.argv.includes('--report')) {
-  process.stdout.write(report(models, fitted));
+if (reporting) {
+  process.stdout.write(await report(models, fitted));
 } else {
   const text = await generated(fitted, sources, models);
   if (process.argv.includes('--check')) {

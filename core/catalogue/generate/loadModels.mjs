@@ -6,7 +6,7 @@ import { build } from 'esbuild';
 const here = path.dirname(fileURLToPath(import.meta.url));
 const root = path.resolve(here, '../../..');
 
-const MODELS = [
+export const MODELS = [
   'fluid/constants',
   'fluid/gasFromPoints',
   'fluid/latentLine',

@@ -1,0 +1,3 @@
+import type { Models } from './holdOut.mjs';
+
+export function fitAll(models: Models): Promise<{ readonly fitted: readonly unknown[] }>;
