@@ -95,7 +95,7 @@ export interface Substance {
   /** Crystal forms from cold to hot, where there are several. */
   readonly forms?: readonly string[];
   readonly lambdaPoints?: readonly LambdaPoint[];
-  /** kg/mol */
+  /** kg/mol; NaN where none is known (a plant's own concentrate): then every "mol" of this substance is a kilogram. */
   readonly molarMass: number;
   /** Named constants: full words, as `CONSTANT` takes them. */
   readonly constants: readonly Datum[];

@@ -125,7 +125,9 @@ function rowOf(
   for (const column of HOUSE_COLUMNS) {
     const index = order.indexOf(column);
     at[column] = index;
-    found[column] = index < 0 || texts[index] === '' ? '' : cells[index];
+    const cell = cells[index];
+    // A cell error stands as its text, which no column takes.
+    found[column] = texts[index] === '' || index < 0 ? '' : typeof cell === 'object' ? texts[index] : cell;
     if (found[column] !== '') blank = false;
   }
   return blank ? undefined : { cells: found, at };

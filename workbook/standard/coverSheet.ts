@@ -8,7 +8,7 @@ const SHEETS: readonly (readonly [string, string])[] = [
   ['Latent heat', 'Water for the evaporator and ice for the freeze-dryer, by temperature.'],
   [
     'ΔCp fit',
-    'A line through published latent heats: its slope, with its kind said. Carries a latent heat to another temperature.',
+    'A line through published latent heats: its slope and kind; carries a latent heat to another temperature.',
   ],
   ['Substances', 'The plant’s own materials, a property a row. What stands there works in every function.'],
   ['Checks', 'Each function against a published figure. Look here first when an answer surprises.'],

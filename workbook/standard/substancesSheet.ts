@@ -53,6 +53,11 @@ const HOW: readonly string[] = [
   'A row that can’t be read says so in the answers that need it; all others go on working. The side pane lists what could not be read.',
 ];
 
+const PROPERTY_PROMPT =
+  'A solid-solid change has the names of its forms: heat of alpha-beta, alpha-beta temperature. A heat may say its kind: heat of vaporization, standard.';
+const FORM_PROMPT =
+  'Blank for a single value. "polynomial in degC" or "table in K" say the unit of temperatures among the coefficients.';
+
 /** The team's own substances: header, room for rows, a demo of two invented materials and two answers from them. */
 export function substancesSheet(): BookSheet {
   const cells: Record<string, BookCell> = {};
@@ -85,8 +90,20 @@ export function substancesSheet(): BookSheet {
     rowHeights,
     merges: ['A2:I2', 'A3:I3', 'A4:I4', 'A5:C5', 'A6:C6'],
     lists: [
-      { range: `B${HEAD + 1}:B${LAST}`, values: HOUSE_PROPERTIES, source: choiceSource('property'), open: true },
-      { range: `C${HEAD + 1}:C${LAST}`, values: HOUSE_FORMS, source: choiceSource('form'), open: true },
+      {
+        range: `B${HEAD + 1}:B${LAST}`,
+        values: HOUSE_PROPERTIES,
+        source: choiceSource('property'),
+        prompt: PROPERTY_PROMPT,
+        open: true,
+      },
+      {
+        range: `C${HEAD + 1}:C${LAST}`,
+        values: HOUSE_FORMS,
+        source: choiceSource('form'),
+        prompt: FORM_PROMPT,
+        open: true,
+      },
     ],
     freeze: { rows: HEAD, columns: 1 },
     gridLines: false,

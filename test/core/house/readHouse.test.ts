@@ -194,6 +194,15 @@ describe('a row that cannot be read', () => {
   });
 });
 
+describe('a cell error', () => {
+  it('is said as what stands in the cell', () => {
+    const line = [...row('liquid heat capacity', '', 3, 'kJ/(kg K)', 0, 90)] as unknown[];
+    line[3] = { error: '#REF!' };
+    const { faults } = readHouse([line], { decimal: '.', firstRow: FIRST_ROW, builtIn: [] });
+    expect(faults[0]?.message).toContain('received "#REF!"');
+  });
+});
+
 describe('warnings', () => {
   it('say where a range is missing, and mark the answers', () => {
     const house = houseOf([row('liquid heat capacity', '', 3, 'kJ/(kg K)')]);
