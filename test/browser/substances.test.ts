@@ -119,7 +119,7 @@ describe('the card', () => {
 
   it('moves the temperature with the arrow keys, and all numbers with it', async () => {
     await openCard('water');
-    expect(await slider().getAttribute('aria-valuetext')).toMatch(/^25 °C, liquid, liquid to gas \d+/);
+    expect(await slider().getAttribute('aria-valuetext')).toMatch(/^25 °C, liquid, liquid to ideal gas \d+/);
     await slider().focus();
     await press('ArrowRight', 'ArrowRight');
     await page.getByTestId('state').filter({ hasText: 'At 27 °C: liquid' }).waitFor();

@@ -1,7 +1,6 @@
 import { Badge, Field, Input, Select } from '@fluentui/react-components';
 import { useMemo, useState } from 'react';
-import { plainWords } from '../../../core/problem';
-import type { Ladder, Substance } from '../../../core/substance';
+import type { CatalogueEntry, Ladder } from '../../../core/substance';
 import type { Settings } from '../../../functions/settings/settings';
 import type { WorkbookHost } from '../../port';
 import { number } from '../look/number';
@@ -12,6 +11,7 @@ import { Diagram } from './diagram/Diagram';
 import { diagramOf } from './diagram/diagramOf';
 import { diagramRows } from './diagram/diagramRows';
 import { DiagramTable } from './diagram/DiagramTable';
+import { IDEAL_GAS } from './diagram/idealGas';
 import { niceStep, onStep } from './diagram/niceStep';
 import { sidesOf } from './diagram/sidesOf';
 import { sliderWords } from './diagram/sliderWords';
@@ -25,16 +25,18 @@ import { DisagreementLine } from './known/DisagreementLine';
 import { Known } from './known/Known';
 import { QuantityField } from './QuantityField';
 import { ATMOSPHERE_PA, useCard } from './useCard';
+import { problemWords } from './facts/problemWords';
 
 export interface SubstanceCardProps {
   readonly host: WorkbookHost;
-  readonly substance: Substance;
+  readonly entry: CatalogueEntry;
   readonly settings: Settings;
   readonly withoutUnits: boolean;
 }
 
 /** One substance: its diagram with a movable temperature, the numbers there, and what stands behind them. */
-export function SubstanceCard({ host, substance, settings, withoutUnits }: SubstanceCardProps) {
+export function SubstanceCard({ host, entry, settings, withoutUnits }: SubstanceCardProps) {
+  const substance = entry.make();
   const look = useLook();
   const card = useCard(substance);
   const { ladder, pressurePa, temperatureK, window } = card;
@@ -62,7 +64,7 @@ export function SubstanceCard({ host, substance, settings, withoutUnits }: Subst
     if (ladder === undefined) return [];
     const shown = sidesOf(ladder, card.around);
     return crossings(substance, ladder, temperatureK).filter(
-      ({ name, stable }) => stable || shown === undefined || shown.includes(name),
+      ({ name, stable }) => stable || shown === undefined || shown.includes(name === IDEAL_GAS ? 'gas' : name),
     );
   }, [substance, ladder, temperatureK, card.around]);
   const marks = [...new Set(here.flatMap((crossing) => crossing.marks))];
@@ -84,7 +86,7 @@ export function SubstanceCard({ host, substance, settings, withoutUnits }: Subst
             .join(' · ')}
         </p>
       </header>
-      {card.problem !== undefined && <p className={look.text}>No diagram: {plainWords(card.problem, writer.words)}.</p>}
+      {card.problem !== undefined && <p className={look.text}>No diagram: {problemWords(card.problem, writer)}.</p>}
       {ladder !== undefined && diagram !== undefined && (
         <figure className={look.tight} style={{ margin: 0 }}>
           <Diagram

@@ -5,6 +5,7 @@ import { Notice } from '../look/Notice';
 import { useLook } from '../look/useLook';
 import { settingsOf, useStore } from '../units/useUnits';
 import { AddSubstance } from './add/AddSubstance';
+import { CardBoundary } from './CardBoundary';
 import { HouseNotice } from './HouseNotice';
 import { SubstanceSearch } from './search/SubstanceSearch';
 import { SubstanceCard } from './SubstanceCard';
@@ -31,13 +32,14 @@ export function SubstancesSection({ host }: { readonly host: WorkbookHost }) {
         </Notice>
       )}
       {chosen !== undefined && settings !== undefined && (
-        <SubstanceCard
-          key={`${chosen.group} ${chosen.name}`}
-          host={host}
-          substance={chosen.make()}
-          settings={settings}
-          withoutUnits={store.state === 'absent'}
-        />
+        <CardBoundary key={`${chosen.group} ${chosen.name}`} name={chosen.name}>
+          <SubstanceCard
+            host={host}
+            entry={chosen}
+            settings={settings}
+            withoutUnits={store.state === 'absent'}
+          />
+        </CardBoundary>
       )}
     </div>
   );

@@ -5,6 +5,7 @@ import { onScale, type UnitWriter } from '../facts/unitWriter';
 import type { Crossing } from './crossings';
 import type { Diagram as DiagramData } from './diagramOf';
 import { diagramWords } from './diagramWords';
+import { drawnPixels } from './drawnPixels';
 import { DIAGRAM_HEIGHT, frameOf, pixelX, valueAtX, type Frame } from './frame';
 import { Labels } from './Labels';
 import { labelsOf } from './labelsOf';
@@ -65,9 +66,13 @@ export function Diagram({ name, diagram, crossings, writer, temperatureK, step, 
     };
   }, [name, diagram, frame, writer]);
 
+  const drawn = useMemo(
+    () => (frame === undefined ? [] : drawnPixels(diagram, frame, writer)),
+    [diagram, frame, writer],
+  );
   const numbers = useMemo(
-    () => (frame === undefined ? [] : probeLabels(frame, crossings, temperatureK, writer, labels)),
-    [frame, crossings, temperatureK, writer, labels],
+    () => (frame === undefined ? [] : probeLabels(frame, crossings, temperatureK, writer, labels, drawn)),
+    [frame, crossings, temperatureK, writer, labels, drawn],
   );
 
   const move = (event: PointerEvent<HTMLDivElement>) => {

@@ -1,8 +1,10 @@
+import type { Mark } from '../../../../core/answer';
 import { Problem } from '../../../../core/problem';
 import type { Gap, Ladder, Rung, Substance } from '../../../../core/substance';
 import { phasesOf } from '../facts/phaseFacts';
 import { rungName, stableAt } from '../facts/stableAt';
 import { belongsTo } from './belongsTo';
+import { IDEAL_GAS, isIdeal } from './idealGas';
 
 /** Where the line of one temperature meets a curve. */
 export interface Crossing {
@@ -11,7 +13,7 @@ export interface Crossing {
   /** Slope of the curve there, J/(mol K), where both sides of the point have a value. */
   readonly slope?: number;
   readonly stable: boolean;
-  /** What its reader should know of the curve there, beside that the phase is not the stable one. */
+  /** What its reader should know of the curve there, beside what the picture shows. */
   readonly marks: readonly string[];
 }
 
@@ -20,6 +22,9 @@ function beside(ladder: Ladder, gap: Gap): readonly Rung[] {
   const at = ladder.gaps.indexOf(gap);
   return ladder.rungs.slice(at, at + 2);
 }
+
+/** Marks that the picture itself shows: by dashes and by the name. */
+const SHOWN: readonly Mark['code'][] = ['metastable', 'ideal-gas'];
 
 /** Half the width of the step that a slope is drawn from, K: wide against rounding, narrow against any bend. */
 const HALF_K = 0.05;
@@ -40,8 +45,15 @@ export function crossings(substance: Substance, ladder: Ladder, temperatureK: nu
     if (own.some((one) => belongsTo(one, phase, form))) continue;
     const curve = attempt(() => substance.enthalpy(phase, ladder.pressurePa, form));
     if (curve === undefined || temperatureK < curve.from || temperatureK > curve.to) continue;
-    const crossing = crossingOf(rungName(named), false, temperatureK, (t) => curve.at(t), curve.from, curve.to);
-    const marks = (curve.marksAt?.(temperatureK) ?? []).filter(({ code }) => code !== 'metastable');
+    const crossing = crossingOf(
+      isIdeal(curve, temperatureK) ? IDEAL_GAS : rungName(named),
+      false,
+      temperatureK,
+      (t) => curve.at(t),
+      curve.from,
+      curve.to,
+    );
+    const marks = (curve.marksAt?.(temperatureK) ?? []).filter(({ code }) => !SHOWN.includes(code));
     if (crossing !== undefined) found.push({ ...crossing, marks: marks.map(({ text }) => text) });
   }
   return found.sort((a, b) => a.enthalpy - b.enthalpy);

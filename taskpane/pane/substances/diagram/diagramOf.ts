@@ -3,6 +3,7 @@ import type { Curve, Gap, Ladder, Phase, Rung, Substance } from '../../../../cor
 import { phasesOf } from '../facts/phaseFacts';
 import { rungName } from '../facts/stableAt';
 import { belongsTo } from './belongsTo';
+import { IDEAL_GAS, isIdeal } from './idealGas';
 import type { Window } from './temperatureWindow';
 
 /** A point of a curve, K and J/mol. */
@@ -52,11 +53,11 @@ export function diagramOf(
     const curve = curveOf(substance, phase, ladder.pressurePa, form);
     if (curve === undefined) return [];
     const own = ladder.rungs.filter((rung) => belongsTo(rung, phase, form));
-    return beside(curve, own).map((part) =>
-      lineOf({ phase, ...(form === undefined ? {} : { form }) }, false, clipped(part.fromK, part.toK, window), (t) =>
-        curve.at(t),
-      ),
-    );
+    const named = { phase, ...(form === undefined ? {} : { form }) };
+    return beside(curve, own).flatMap((part) => {
+      const line = lineOf(named, false, clipped(part.fromK, part.toK, window), (t) => curve.at(t));
+      return idealApart(line, (t) => isIdeal(curve, t));
+    });
   });
   return {
     pressurePa: ladder.pressurePa,
@@ -98,6 +99,18 @@ function lineOf(
     }
   }
   return { name: rungName(rung), phase: rung.phase, stable, points };
+}
+
+/** Where a vapour is followed as an ideal gas, that part is a line of its own: it need not meet the real one. */
+function idealApart(line: DiagramLine, ideal: (temperatureK: number) => boolean): DiagramLine[] {
+  const parts: { ideal: boolean; points: CurvePoint[] }[] = [];
+  for (const point of line.points) {
+    const here = ideal(point.temperatureK);
+    const last = parts.at(-1);
+    if (last !== undefined && last.ideal === here) last.points.push(point);
+    else parts.push({ ideal: here, points: [point] });
+  }
+  return parts.map((part) => ({ ...line, name: part.ideal ? IDEAL_GAS : line.name, points: part.points }));
 }
 
 /** A phase without an enthalpy at this pressure is not drawn. */

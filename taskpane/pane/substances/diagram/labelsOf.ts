@@ -1,25 +1,17 @@
 import { number } from '../../look/number';
 import type { UnitWriter } from '../facts/unitWriter';
-import { onScale } from '../facts/unitWriter';
 import type { Diagram, DiagramLine } from './diagramOf';
-import { pixelX, pixelY, type Frame } from './frame';
+import { drawnPixels, pixelOf, type Pixel } from './drawnPixels';
+import type { Frame } from './frame';
 import { placeLabels, type LabelArea, type LabelPlace, type PlacedLabel, type WantedLabel } from './placeLabels';
 
 /** Pixels between a label and what it names. */
 const OFF = 9;
 
-interface Pixel {
-  readonly x: number;
-  readonly y: number;
-}
-
 /** The names in the picture: transitions with their latent heats, phases with their mean slopes, dashed continuations. */
 export function labelsOf(diagram: Diagram, frame: Frame, writer: UnitWriter): PlacedLabel[] {
-  const { temperature, heat, heatCapacity, decimal } = writer;
-  const at = (temperatureK: number, enthalpy: number): Pixel => ({
-    x: pixelX(frame, onScale(temperatureK, temperature)),
-    y: pixelY(frame, onScale(enthalpy, heat)),
-  });
+  const { heat, heatCapacity, decimal } = writer;
+  const at = (temperatureK: number, enthalpy: number): Pixel => pixelOf(frame, writer, temperatureK, enthalpy);
   const pixels = (line: DiagramLine) => line.points.map((point) => at(point.temperatureK, point.enthalpy));
   const gaps = diagram.gaps.map(({ change, temperatureK, below, above }): WantedLabel => {
     const middle = at(temperatureK, (below + above) / 2);
@@ -39,17 +31,13 @@ export function labelsOf(diagram: Diagram, frame: Frame, writer: UnitWriter): Pl
       places: alongLine(pixels(line)),
     };
   };
-  const drawn = [
-    ...diagram.lines.flatMap((line) => between(pixels(line))),
-    ...diagram.gaps.flatMap((gap) => between([at(gap.temperatureK, gap.below), at(gap.temperatureK, gap.above)], 12)),
-  ];
   const stable = diagram.lines.filter((line) => line.stable);
   const dashed = diagram.lines.filter((line) => !line.stable);
   const beyond = [...new Set(dashed.map(({ name }) => name))].map((name): WantedLabel => {
-    const own = dashed.filter((line) => line.name === name);
+    const own = dashed.filter((line) => line.name === name).sort((a, b) => spanOf(b) - spanOf(a));
     return { texts: [name], role: 'beyond', places: own.flatMap((line) => alongLine(pixels(line))) };
   });
-  return placeLabels([...gaps, ...stable.map(phase), ...beyond], labelArea(frame), drawn);
+  return placeLabels([...gaps, ...stable.map(phase), ...beyond], labelArea(frame), drawnPixels(diagram, frame, writer));
 }
 
 /** A change without a gap, where only the slope changes, says no number. */
@@ -61,6 +49,10 @@ function gapTexts(change: string, latent: number, decimal: '.' | ','): string[] 
 /** Where names may stand: inside the frame, and a little over its right edge. */
 export function labelArea({ left, width, top, height, bottom }: Frame): LabelArea {
   return { left: left + 2, right: width - 2, top, bottom: height - bottom };
+}
+
+function spanOf({ points }: DiagramLine): number {
+  return (points.at(-1)?.temperatureK ?? 0) - (points[0]?.temperatureK ?? 0);
 }
 
 /** Mean slope over what is shown, J/(mol K). */
@@ -88,17 +80,5 @@ function alongLine(points: readonly Pixel[]): LabelPlace[] {
       { x: point.x - 4, y: point.y + off * OFF, anchor: 'end' as const },
       { x: point.x + 4, y: point.y + off * OFF, anchor: 'start' as const },
     ]);
-  });
-}
-
-/** Points close enough along a polyline that no label slips between two of them. */
-function between(points: readonly Pixel[], steps = 4): Pixel[] {
-  return points.flatMap((point, i) => {
-    const next = points[i + 1];
-    if (next === undefined) return [point];
-    return Array.from({ length: steps }, (_, k) => ({
-      x: point.x + ((next.x - point.x) * k) / steps,
-      y: point.y + ((next.y - point.y) * k) / steps,
-    }));
   });
 }

@@ -1,6 +1,7 @@
 import { number } from '../../look/number';
 import { onScale, type UnitWriter } from '../facts/unitWriter';
 import type { Crossing } from './crossings';
+import type { Pixel } from './drawnPixels';
 import { pixelX, pixelY, type Frame } from './frame';
 import { labelArea } from './labelsOf';
 import { placeLabels, type LabelPlace, type PlacedLabel } from './placeLabels';
@@ -16,6 +17,7 @@ export function probeLabels(
   temperatureK: number,
   { temperature, heat, decimal }: UnitWriter,
   names: readonly PlacedLabel[],
+  drawn: readonly Pixel[],
 ): PlacedLabel[] {
   const x = pixelX(frame, onScale(temperatureK, temperature));
   const wanted = crossings.slice(1).flatMap((upper, i) => {
@@ -25,7 +27,12 @@ export function probeLabels(
     const between = number(Number(((upper.enthalpy - lower.enthalpy) * heat.scale).toPrecision(5)), decimal);
     return [{ texts: [between], role: 'probe' as const, places: beside(x, low, high) }];
   });
-  return placeLabels(wanted, labelArea(frame), [], names);
+  return wanted.reduce<PlacedLabel[]>((placed, one) => {
+    const clear = placeLabels([one], labelArea(frame), drawn, [...names, ...placed]);
+    // A number that has to cross a curve is better than none.
+    const found = clear.length > 0 ? clear : placeLabels([one], labelArea(frame), [], [...names, ...placed]);
+    return [...placed, ...found];
+  }, []);
 }
 
 function beside(x: number, low: number, high: number): LabelPlace[] {

@@ -49,6 +49,7 @@ export function Facts({ substance, temperatureK, pressurePa, settings, writer, i
         {...shared}
       />
       <Quantities caption="With its vapour, and by itself" quantities={withoutEchoes(facts.lines)} {...shared} />
+      <p className={look.quiet}>± is the standard uncertainty (k = 1), where one is known.</p>
     </div>
   );
 }

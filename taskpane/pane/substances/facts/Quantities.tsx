@@ -1,10 +1,10 @@
 import { Button, makeStyles } from '@fluentui/react-components';
-import { plainWords } from '../../../../core/problem';
 import { useLook } from '../../look/useLook';
 import { InsertNotice } from '../insert/InsertNotice';
 import type { Inserting } from '../insert/useInsert';
 import type { Quantity } from './quantity';
 import { writeValue, type UnitWriter } from './unitWriter';
+import { problemWords } from './problemWords';
 
 const useStyles = makeStyles({
   label: { width: '38%' },
@@ -43,7 +43,7 @@ export function Quantities({ caption, quantities, writer, inserting }: Quantitie
                 <ValueCells fact={fact.answer} writer={writer} />
               ) : (
                 <td colSpan={2} className={look.quiet}>
-                  {plainWords(fact.problem, writer.words)}
+                  {problemWords(fact.problem, writer)}
                 </td>
               )}
               {fact.problem === undefined && (
@@ -86,7 +86,7 @@ function ValueCells({
   return (
     <td title={full}>
       <span className={look.strong}>
-        {text} {unit}
+        {text} <span style={{ whiteSpace: 'nowrap' }}>{unit}</span>
       </span>
       {fact.marks.map(({ code, text: words }) => (
         <span key={code + words} className={look.quiet}>

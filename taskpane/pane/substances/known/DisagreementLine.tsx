@@ -1,10 +1,10 @@
 import { useMemo } from 'react';
-import { plainWords } from '../../../../core/problem';
 import type { Substance } from '../../../../core/substance';
 import { useLook } from '../../look/useLook';
 import { writeValue, written, type UnitWriter } from '../facts/unitWriter';
 import { disagreements } from './disagreements';
 import { percent } from './percent';
+import { problemWords } from '../facts/problemWords';
 
 /** How far the data for latent heat and heat capacities disagree between 25 °C and the boiling point. */
 export function DisagreementLine({
@@ -25,7 +25,7 @@ export function DisagreementLine({
         if (fact.answer === undefined) {
           return (
             <p key={change} className={look.text}>
-              {between}: not known. {plainWords(fact.problem, writer.words)}.
+              {between}: not known. {problemWords(fact.problem, writer)}.
             </p>
           );
         }

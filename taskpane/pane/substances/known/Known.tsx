@@ -1,12 +1,12 @@
 import { makeStyles, tokens } from '@fluentui/react-components';
 import { useMemo } from 'react';
-import { plainWords } from '../../../../core/problem';
 import type { Substance } from '../../../../core/substance';
 import { number } from '../../look/number';
 import { useLook } from '../../look/useLook';
 import { onScale, written, type UnitWriter } from '../facts/unitWriter';
 import { knownOf, type KnownCurve } from './knownOf';
 import { percent } from './percent';
+import { problemWords } from '../facts/problemWords';
 
 const useStyles = makeStyles({
   item: { borderBottom: `1px solid ${tokens.colorNeutralStroke2}`, '& dl': { margin: '2px 0 8px 14px' } },
@@ -38,7 +38,7 @@ export function Known({
           <ul className={look.list}>
             {unknown.map(({ item, problem }) => (
               <li key={item}>
-                {item}: {plainWords(problem, writer.words)}
+                {item}: {problemWords(problem, writer)}
               </li>
             ))}
           </ul>

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { plainWords } from '../../../../core/problem';
+import { plainWords, type ProblemData } from '../../../../core/problem';
 import { water } from '../../../../core/water/water';
 import { parseSettingsText } from '../../../../functions/settings/parseSettingsText';
 import { DEFAULT_SETTINGS } from '../../../../functions/settings/settings';
@@ -8,6 +8,7 @@ import { factOf } from '../../../../taskpane/pane/substances/facts/fact';
 import { latentFacts, type FactsAt } from '../../../../taskpane/pane/substances/facts/latentFacts';
 import { lineFacts } from '../../../../taskpane/pane/substances/facts/lineFacts';
 import { heatCapacityFacts } from '../../../../taskpane/pane/substances/facts/phaseFacts';
+import { problemWords } from '../../../../taskpane/pane/substances/facts/problemWords';
 import { stateWords } from '../../../../taskpane/pane/substances/facts/stateWords';
 import { roundTemperature, unitWriter, writeValue } from '../../../../taskpane/pane/substances/facts/unitWriter';
 import { typedQuantity } from '../../../../taskpane/pane/substances/QuantityField';
@@ -169,6 +170,25 @@ describe('typedQuantity', () => {
 
   it('refuses what is none', () => {
     expect(() => typedQuantity('warm', 'temperature', DEFAULT_SETTINGS)).toThrow('temperature: allowed');
+  });
+});
+
+describe('problemWords', () => {
+  it('says where the one value stands that is known', () => {
+    const fusion = latentFacts(wax, at(25)).find(({ change }) => change === 'fusion')?.kinds[0]?.latent.fact.problem;
+    expect(fusion && problemWords(fusion, unitWriter(DEFAULT_SETTINGS, wax.molarMass))).toMatch(
+      /^(known at 80 °C only|temperature 25 °C is outside)/,
+    );
+    const point = {
+      code: 'range',
+      argument: 't',
+      quantity: 'temperature',
+      received: 1,
+      from: 300,
+      to: 300,
+      subject: 's',
+    };
+    expect(problemWords(point as ProblemData, unitWriter(DEFAULT_SETTINGS, 1))).toBe('known at 26.85 °C only');
   });
 });
 
