@@ -7,6 +7,9 @@ const WIDENED = { pressure: 1.2, latent: 1.1, heatCapacity: 1.5 };
 /** Least relative standard uncertainties: what values of different origin differ by. */
 const LEAST = { pressure: 0.0025, latent: 0.0025, heatCapacity: 0.006 };
 
+/** Between the highest cited pressure and the critical point nothing holds the pressure but its form: relative, at the most. */
+const BETWEEN = { normal: 0.001, polar: 0.003, strong: 0.004, nitrile: 0.005, bonded: 0.004, alcohol: 0.007 };
+
 /** Error of the equation of the vapour at 0.9 Tc, as a part of the latent heat. */
 const VAPOUR = { normal: 0.006, polar: 0.01, strong: 0.015, nitrile: 0.02, bonded: 0.012, alcohol: 0.015 };
 
@@ -90,6 +93,7 @@ function atNode(models, fluid, fit, critical, t) {
     pressure: Math.hypot(
       LEAST.pressure,
       WIDENED.pressure * deviation(fit, rows.pressure(t)),
+      BETWEEN[fluid.class] * Math.max(0, (t - 0.7) * near * 44),
       critical.pressure * Math.max(0, (t - 0.7) / 0.3),
       critical.temperature * Math.max(0, (t - 0.7) / 0.3) * 7,
     ),
