@@ -172,7 +172,7 @@ describe('the section ΔCp fit', () => {
 
   it('sets the other kinds beside the slope once the substance is known', async () => {
     await fitData();
-    await page.getByLabel('Substance').selectOption('water');
+    await page.getByLabel('Substance', { exact: true }).selectOption('water');
     await page.getByRole('row', { name: /^coexistence \(yours\)/ }).waitFor();
     for (const kind of ['isobaric', 'standard']) {
       const cells = await page
@@ -346,7 +346,7 @@ describe('the pane for everyone', () => {
     expect(await axeFindings()).toEqual([]);
     await page.getByLabel('Barometer').fill('100 kPa');
     await fitData();
-    await page.getByLabel('Substance').selectOption('water');
+    await page.getByLabel('Substance', { exact: true }).selectOption('water');
     await page.getByRole('img').nth(1).waitFor();
     await page.getByText('The picture as a table').click();
     await page.getByText('All digits').click();

@@ -33,12 +33,7 @@ export function SubstancesSection({ host }: { readonly host: WorkbookHost }) {
       )}
       {chosen !== undefined && settings !== undefined && (
         <CardBoundary key={`${chosen.group} ${chosen.name}`} name={chosen.name}>
-          <SubstanceCard
-            host={host}
-            entry={chosen}
-            settings={settings}
-            withoutUnits={store.state === 'absent'}
-          />
+          <SubstanceCard host={host} entry={chosen} settings={settings} withoutUnits={store.state === 'absent'} />
         </CardBoundary>
       )}
     </div>
