@@ -1,6 +1,6 @@
 import { Field, Input, Select } from '@fluentui/react-components';
 import type { LatentKind } from '../../../core/answer';
-import { catalogue, findSubstance } from '../../../core/catalogue/find';
+import { currentRegistry } from '../../../functions/house/currentRegistry';
 import { number, prettyUnit } from '../look/number';
 import { useLook } from '../look/useLook';
 import { withChange, type FitChoice } from './fitChoice';
@@ -19,7 +19,7 @@ export interface MeaningProps {
 /** What the data are: substance, change and kind, and the temperature that the latent heat is given at. */
 export function Meaning({ choice, onChoice, temperatureSymbol, usualReference, referenceError }: MeaningProps) {
   const look = useLook();
-  const changes = choice.substance === '' ? [] : findSubstance(choice.substance).changes;
+  const changes = choice.substance === '' ? [] : currentRegistry().find(choice.substance).changes;
   const message =
     referenceError === undefined ? {} : { validationState: 'error' as const, validationMessage: referenceError };
   return (
@@ -35,7 +35,7 @@ export function Meaning({ choice, onChoice, temperatureSymbol, usualReference, r
             }}
           >
             <option value="">not named</option>
-            {catalogue.entries.map(({ name }) => (
+            {currentRegistry().entries.map(({ name }) => (
               <option key={name} value={name}>
                 {name}
               </option>

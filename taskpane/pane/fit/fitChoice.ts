@@ -1,5 +1,5 @@
 import type { LatentKind } from '../../../core/answer';
-import { findSubstance } from '../../../core/catalogue/find';
+import { currentRegistry } from '../../../functions/house/currentRegistry';
 import type { FoundColumns } from '../../plan/findColumns';
 
 /** What the person has said about their data; an empty text leaves a thing to the data or the settings. */
@@ -35,7 +35,7 @@ export function choiceFor({ parts }: FoundColumns, before: FitChoice): FitChoice
 /** Another change of phase, with the kind that its latent heats usually are. */
 export function withChange(choice: FitChoice, wanted: string): FitChoice {
   if (choice.substance === '') return { ...choice, change: wanted };
-  const substance = findSubstance(choice.substance);
+  const substance = currentRegistry().find(choice.substance);
   const change = substance.changes.includes(wanted) ? wanted : (substance.changes[0] ?? wanted);
   return { ...choice, change, kind: substance.defaultKind(change) };
 }

@@ -1,4 +1,3 @@
-import { findSubstance } from '../../../core/catalogue/find';
 import { fitDeltaCp } from '../../../core/fit/fitDeltaCp';
 import { convertLine } from '../../../core/fit/convertLine';
 import type { LineFit } from '../../../core/fit/fitTypes';
@@ -8,6 +7,7 @@ import { fromSi } from '../../../core/units/fromSi';
 import { parseQuantity } from '../../../core/units/parseQuantity';
 import type { Unit } from '../../../core/units/unit';
 import { unitOf } from '../../../core/units/unitOf';
+import { currentRegistry } from '../../../functions/house/currentRegistry';
 import { fitUnits, type FitUnits } from '../../../functions/edge/fitUnits';
 import type { Settings } from '../../../functions/settings/settings';
 import type { DataColumn } from '../../plan/findColumns';
@@ -72,7 +72,7 @@ export function fitView(columns: readonly DataColumn[], choice: FitChoice, workb
   const y = columnOf(columns, choice.latent, 'latents');
   refuseHalfTitled(x, y);
   const settings = withChosenUnits(columns, choice, workbook);
-  const substance = choice.substance === '' ? undefined : findSubstance(choice.substance);
+  const substance = choice.substance === '' ? undefined : currentRegistry().find(choice.substance);
   const units = fitUnits(x.header, y.header, settings, substance);
   const rows = readRows(x.values, y.values, x.firstRow);
   const reference = referenceOf(choice.reference, x.header?.unit ?? settings.units.temperature, settings);

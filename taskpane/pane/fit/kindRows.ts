@@ -1,10 +1,10 @@
 import type { LatentKind } from '../../../core/answer';
-import { findSubstance } from '../../../core/catalogue/find';
 import { valueAt } from '../../../core/evaluate';
 import { Problem } from '../../../core/problem';
 import type { Substance } from '../../../core/substance';
 import { perMole } from '../../../core/units/perMole';
 import { toSi } from '../../../core/units/toSi';
+import { currentRegistry } from '../../../functions/house/currentRegistry';
 import type { FitChoice } from './fitChoice';
 import type { FitView } from './fitView';
 
@@ -30,7 +30,7 @@ export interface Kinds {
 /** The three kinds of slope side by side at the mean temperature of the data; undefined without a substance. */
 export function kindRows(view: FitView, choice: FitChoice): Kinds | undefined {
   if (choice.substance === '') return undefined;
-  const substance = findSubstance(choice.substance);
+  const substance = currentRegistry().find(choice.substance);
   const { scale, offset } = toSi(view.units.temperature);
   const meanK = scale * view.fit.centre + offset;
   const fromMolar = 1 / (view.units.heatCapacity.factor * perMole(view.units.heatCapacity, substance.molarMass));

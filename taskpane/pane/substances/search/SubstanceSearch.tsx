@@ -24,6 +24,7 @@ const useStyles = makeStyles({
     padding: '4px 8px',
     cursor: 'pointer',
     borderLeft: '3px solid transparent',
+    '@media (forced-colors: active)': { borderLeftColor: 'Canvas' },
     ':hover': { backgroundColor: tokens.colorNeutralBackground2 },
   },
   active: {
