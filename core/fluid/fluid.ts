@@ -18,6 +18,7 @@ const DEFAULT_KINDS: Readonly<Record<string, LatentKind>> = {
 const UNITS: Readonly<Record<string, string>> = {
   'molar mass': 'kg/mol',
   'critical pressure': 'Pa',
+  'triple pressure': 'Pa',
   'acentric factor': '1',
 };
 

@@ -64,6 +64,9 @@ export function emptyDeparture(): Departure {
 }
 
 const MOST_STEPS = 50;
+
+/** Steps this small against the density are rounding. */
+const CONVERGED = 1e-14;
 const simple = emptyDeparture();
 const reference = emptyDeparture();
 
@@ -113,7 +116,10 @@ function solved(k: Constants, t: number, p: number, polar: number, bonding: numb
   const d = k.d1 + k.d2 * u;
   const e = k.c4 * u3;
   const { beta, gamma } = k;
-  let s = p * u;
+  // density of the virial series where that converges; from below the steps climb to the root without overshooting
+  const ideal = p * u;
+  const second = b * ideal;
+  let s = second > -0.1 ? ideal * (1 - second + 2 * second * second - (c + e * k.beta) * ideal * ideal) : ideal;
   let z = 1;
   let zs = 0;
   let y = 0;
@@ -129,7 +135,7 @@ function solved(k: Constants, t: number, p: number, polar: number, bonding: numb
     if (!(slope > 0) || i === MOST_STEPS) return false;
     const step = (p - t * s * z) / slope;
     s += step;
-    if (Math.abs(step) <= 4e-16 * s || (i > 3 && step < 1e-14 * s)) break;
+    if (Math.abs(step) <= CONVERGED * s) break;
   }
   const bT = u2 * (k.b2 + u * (2 * k.b3 + 3 * u * k.b4)) + (6 * dipoles + 12 * bonds) * u;
   const bTT = -u3 * (2 * k.b2 + u * (6 * k.b3 + 12 * u * k.b4)) - (42 * dipoles + 156 * bonds) * u2;

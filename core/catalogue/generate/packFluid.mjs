@@ -111,7 +111,18 @@ function constantsOf(record, citations) {
     ['critical pressure', pascal],
     ['acentric factor', acentric],
   ];
+  if (carbonDioxide) rows.push(...tripleOf(record));
   return rows.map(([item, from]) => `${item},${cited(from, citations)}`).join(';');
+}
+
+/** The melting temperature of carbon dioxide is that of its triple point, whose pressure is printed. */
+function tripleOf({ Tm, vapour_pressure_points: points }) {
+  const end = points.find(({ T_K, rejected }) => rejected === undefined && Math.abs(T_K - Tm.value) < 0.02);
+  if (end === undefined) throw new Error('no triple pressure of carbon dioxide');
+  return [
+    ['triple temperature', Tm],
+    ['triple pressure', { ...end, value: end.p_kPa * 1000, uncertainty: undefined }],
+  ];
 }
 
 /** Least relative standard uncertainty of an enthalpy of fusion, and that of a value from memory. */
