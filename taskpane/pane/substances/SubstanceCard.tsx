@@ -1,6 +1,6 @@
-import { Badge, Field, Input, Select } from '@fluentui/react-components';
+import { Badge, Field, Input } from '@fluentui/react-components';
 import { useMemo, useState } from 'react';
-import type { CatalogueEntry, Ladder } from '../../../core/substance';
+import type { CatalogueEntry } from '../../../core/substance';
 import type { Settings } from '../../../functions/settings/settings';
 import type { WorkbookHost } from '../../port';
 import { number } from '../look/number';
@@ -13,6 +13,7 @@ import { diagramRows } from './diagram/diagramRows';
 import { DiagramTable } from './diagram/DiagramTable';
 import { IDEAL_GAS } from './diagram/idealGas';
 import { niceStep, onStep } from './diagram/niceStep';
+import { PartOfDiagram } from './diagram/PartOfDiagram';
 import { sidesOf } from './diagram/sidesOf';
 import { sliderWords } from './diagram/sliderWords';
 import { TemperatureSlider } from './diagram/TemperatureSlider';
@@ -110,7 +111,7 @@ export function SubstanceCard({ host, entry, settings, withoutUnits }: Substance
             <PartOfDiagram ladder={ladder} around={card.around} onAround={card.setAround} label={rounded} />
           )}
           <figcaption className={look.quiet}>
-            {captionWords(diagram, writer)}
+            {captionWords(diagram, ladder, writer)}
             {marks.length > 0 && ` Here: ${marks.join('; ')}.`}
           </figcaption>
           <details>
@@ -197,32 +198,4 @@ export function SubstanceCard({ host, entry, settings, withoutUnits }: Substance
 function plain(value: number, decimal: '.' | ','): string {
   const text = Number(value.toPrecision(12)).toString();
   return decimal === ',' ? text.replace('.', ',') : text;
-}
-
-interface PartProps {
-  readonly ladder: Ladder;
-  readonly around: number | undefined;
-  readonly onAround: (place: number | undefined) => void;
-  readonly label: (temperatureK: number) => string;
-}
-
-/** Draws all changes, or goes to one of them and draws what lies around it. */
-function PartOfDiagram({ ladder, around, onAround, label }: PartProps) {
-  const look = useLook();
-  return (
-    <Field label="Part of the diagram">
-      <Select
-        className={look.narrow}
-        value={around === undefined ? '' : String(around)}
-        onChange={(_, { value }) => onAround(value === '' ? undefined : Number(value))}
-      >
-        <option value="">all changes</option>
-        {ladder.gaps.map(({ change, temperatureK }, place) => (
-          <option key={place} value={place}>
-            around {change}, {label(temperatureK)}
-          </option>
-        ))}
-      </Select>
-    </Field>
-  );
 }

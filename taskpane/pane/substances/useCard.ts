@@ -1,6 +1,8 @@
 import { useMemo, useState } from 'react';
+import { evaluate } from '../../../core/evaluate';
 import { Problem, type ProblemData } from '../../../core/problem';
 import type { Ladder, Substance } from '../../../core/substance';
+import { factOf } from './facts/fact';
 import { temperatureWindow, widened, type Window } from './diagram/temperatureWindow';
 
 export const ATMOSPHERE_PA = 101_325;
@@ -33,11 +35,19 @@ function ladderAt(substance: Substance, pressurePa: number): { ladder?: Ladder; 
   }
 }
 
-/** 25 °C where the diagram holds it, else the first transition, else the middle. */
-export function firstTemperature(ladder: Ladder | undefined, window: Window): number {
-  if (ROOM_K >= window.fromK && ROOM_K <= window.toK) return ROOM_K;
-  const first = ladder?.gaps.find(({ temperatureK }) => temperatureK >= window.fromK && temperatureK <= window.toK);
+/** 25 °C where the diagram holds it and a latent heat is known there, else the first transition, else the middle. */
+export function firstTemperature(substance: Substance, ladder: Ladder | undefined, window: Window): number {
+  const inside = (kelvin: number) => kelvin >= window.fromK && kelvin <= window.toK;
+  const first = ladder?.gaps.find(({ temperatureK }) => inside(temperatureK));
+  if (inside(ROOM_K) && (first === undefined || hasLatentAt(substance, ROOM_K))) return ROOM_K;
   return first?.temperatureK ?? (window.fromK + window.toK) / 2;
+}
+
+function hasLatentAt(substance: Substance, temperatureK: number): boolean {
+  return substance.changes.some((change) => {
+    const fact = factOf(() => evaluate(substance.latent(change, substance.defaultKind(change)), temperatureK));
+    return fact.answer !== undefined;
+  });
 }
 
 function onLadder(ladder: Ladder | undefined, temperatureK: number): boolean {
@@ -54,7 +64,7 @@ export function useCard(substance: Substance): CardState {
   const [around, setAround] = useState<number>();
   const { ladder, problem } = useMemo(() => ladderAt(substance, pressurePa), [substance, pressurePa]);
   const base = useMemo(() => (ladder === undefined ? NOWHERE : temperatureWindow(ladder, around)), [ladder, around]);
-  const [temperatureK, setTemperature] = useState(() => firstTemperature(ladder, base));
+  const [temperatureK, setTemperature] = useState(() => firstTemperature(substance, ladder, base));
   const [also, setAlso] = useState<number>();
   const window = useMemo(
     () => (also === undefined || !onLadder(ladder, also) ? base : widened(base, also)),

@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { water } from '../../../../core/water/water';
 import { DEFAULT_SETTINGS } from '../../../../functions/settings/settings';
 import { parseSettingsText } from '../../../../functions/settings/parseSettingsText';
+import { captionWords } from '../../../../taskpane/pane/substances/diagram/captionWords';
 import { crossings } from '../../../../taskpane/pane/substances/diagram/crossings';
 import { diagramOf } from '../../../../taskpane/pane/substances/diagram/diagramOf';
 import { diagramRows } from '../../../../taskpane/pane/substances/diagram/diagramRows';
@@ -219,6 +220,15 @@ describe('the diagram in words and as a table', () => {
         'solid (beta), then fusion at 80 °C over a gap of 100 kJ/kg; liquid. ' +
         'Dashed, where it is not the stable phase: solid (alpha), solid (beta), liquid.',
     );
+  });
+
+  it('explains slopes, gaps and dashes as far as it has them, and what lies beyond', () => {
+    const words = captionWords(diagramOf(wax, ladder, all, undefined), ladder, writer);
+    expect(words).toContain('a gap is a latent heat, in kJ/kg, of the isobaric kind');
+    expect(words).not.toContain('Colder');
+    const whole = captionWords(diagramOf(wax, ladder, { fromK: 200, toK: 500 }, undefined), ladder, writer);
+    expect(whole).toContain('Colder it would take the solid alpha heat capacity of wax two.');
+    expect(whole).toContain('Hotter it would take the liquid heat capacity of wax two.');
   });
 
   it('lists phases with mean slopes and transitions with heats', () => {

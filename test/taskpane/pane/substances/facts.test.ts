@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { plainWords, type ProblemData } from '../../../../core/problem';
+import { catalogue } from '../../../../core/catalogue/find';
 import { water } from '../../../../core/water/water';
 import { parseSettingsText } from '../../../../functions/settings/parseSettingsText';
 import { DEFAULT_SETTINGS } from '../../../../functions/settings/settings';
@@ -12,6 +13,8 @@ import { problemWords } from '../../../../taskpane/pane/substances/facts/problem
 import { stateWords } from '../../../../taskpane/pane/substances/facts/stateWords';
 import { roundTemperature, unitWriter, writeValue } from '../../../../taskpane/pane/substances/facts/unitWriter';
 import { typedQuantity } from '../../../../taskpane/pane/substances/QuantityField';
+import { firstTemperature } from '../../../../taskpane/pane/substances/useCard';
+import { temperatureWindow } from '../../../../taskpane/pane/substances/diagram/temperatureWindow';
 import { madeUp } from './madeUp';
 
 const ATMOSPHERE = 101_325;
@@ -189,6 +192,21 @@ describe('problemWords', () => {
       subject: 's',
     };
     expect(problemWords(point as ProblemData, unitWriter(DEFAULT_SETTINGS, 1))).toBe('known at 26.85 °C only');
+  });
+});
+
+describe('firstTemperature', () => {
+  const first = (substance: typeof wax) => {
+    const ladder = substance.ladder(ATMOSPHERE);
+    return firstTemperature(substance, ladder, temperatureWindow(ladder));
+  };
+
+  it('is 25 °C where a latent heat is known there, else the first transition', () => {
+    expect(first(water)).toBe(298.15);
+    // Between 0 and 60 °C both forms of the made-up wax are known, so that their change is.
+    expect(first(wax)).toBe(298.15);
+    expect(first(catalogue.find('iron'))).toBe(catalogue.find('iron').ladder(ATMOSPHERE).gaps[0]?.temperatureK);
+    expect(firstTemperature(water, undefined, { fromK: 400, toK: 500 })).toBe(450);
   });
 });
 
