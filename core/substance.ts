@@ -17,8 +17,8 @@ export interface Curve {
   readonly to: number;
   /** What the curve describes, as in "vaporization of water". */
   readonly subject: string;
-  /** SI unit of the value: `J/mol`, `J/(mol K)`, `Pa`, `K`. */
-  readonly unit: 'J/mol' | 'J/(mol K)' | 'Pa' | 'K';
+  /** SI unit of the value: `J/mol`, `J/(mol K)`, `Pa`, `K`; per kilogram where a material has no molar mass. */
+  readonly unit: 'J/mol' | 'J/(mol K)' | 'Pa' | 'K' | 'J/kg' | 'J/(kg K)';
   readonly kind?: LatentKind;
   readonly method: string;
   readonly sources: readonly string[];

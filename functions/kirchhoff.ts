@@ -1,6 +1,7 @@
 import { readForm } from '../core/kirchhoff/form';
 import { kirchhoff as carry, type KirchhoffInput } from '../core/kirchhoff/kirchhoff';
 import { Problem } from '../core/problem';
+import { checkedMolarMass } from '../core/units/perMole';
 import type { Quantity } from '../core/units/parseQuantity';
 import type { Basis, Unit } from '../core/units/unit';
 import { answer } from './edge/answer';
@@ -181,7 +182,7 @@ class Carrier {
         received: `${words(from)} against a latent heat ${words(to)}`,
       });
     }
-    const { molarMass } = substanceKey(name);
+    const molarMass = checkedMolarMass(substanceKey(name).molarMass, 'to go between mass and moles');
     return from === 'mass' ? molarMass : 1 / molarMass;
   }
 

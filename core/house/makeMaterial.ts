@@ -12,6 +12,17 @@ import { materialEnthalpy, materialHeatCapacity } from './phaseCurves';
 import { materialBoiling, materialPressure } from './saturationCurves';
 import { formsOf } from './stations';
 
+const PER_KILOGRAM: Readonly<Partial<Record<Curve['unit'], Curve['unit']>>> = {
+  'J/mol': 'J/kg',
+  'J/(mol K)': 'J/(kg K)',
+};
+
+/** A material without a molar mass is counted in kilograms, and its curves say so. */
+function inOwnUnit(curve: Curve, molarMass: number): Curve {
+  const unit = Number.isNaN(molarMass) ? PER_KILOGRAM[curve.unit] : undefined;
+  return unit === undefined ? curve : { ...curve, unit };
+}
+
 /**
  * A substance from what is known of a material: everything that its data support, and a `missing` problem that names
  * the piece for everything else.
@@ -29,7 +40,7 @@ export function makeMaterial(data: MaterialData): Substance {
   const kept = (key: string, make: () => Curve): Curve => {
     let curve = curves.get(key);
     if (curve === undefined) {
-      curve = make();
+      curve = inOwnUnit(make(), data.molarMass);
       if (curves.size >= MOST_CURVES) curves.clear();
       curves.set(key, curve);
     }

@@ -2,6 +2,7 @@ import { FIT_ROWS } from '../../core/fit/fitTable';
 import { Problem } from '../../core/problem';
 import type { Substance } from '../../core/substance';
 import { between } from '../../core/units/linear';
+import { checkedMolarMass } from '../../core/units/perMole';
 import { unitOf } from '../../core/units/unitOf';
 import type { Header } from '../../core/units/readHeader';
 import type { Unit, UnitKind } from '../../core/units/unit';
@@ -74,7 +75,7 @@ export function heatFactor(from: Unit, to: Unit, substance: Substance | undefine
       received: 'none',
     });
   }
-  const molar = substance.molarMass;
+  const molar = checkedMolarMass(substance.molarMass, 'to go between mass and moles');
   return (from.factor / to.factor) * (from.basis === 'mass' ? molar : 1 / molar);
 }
 

@@ -1,10 +1,4 @@
-import {
-  findChange,
-  findPhaseOf,
-  refused,
-  type FoundChange,
-  type FoundPhase,
-} from '../../core/catalogue/find';
+import { findChange, findPhaseOf, refused, type FoundChange, type FoundPhase } from '../../core/catalogue/find';
 import type { LatentKind } from '../../core/answer';
 import { Problem } from '../../core/problem';
 import { parseQuantity } from '../../core/units/parseQuantity';

@@ -19,7 +19,9 @@ export interface MeaningProps {
 /** What the data are: substance, change and kind, and the temperature that the latent heat is given at. */
 export function Meaning({ choice, onChoice, temperatureSymbol, usualReference, referenceError }: MeaningProps) {
   const look = useLook();
-  const changes = choice.substance === '' ? [] : currentRegistry().find(choice.substance).changes;
+  const registry = currentRegistry();
+  // one of the team's own may be gone from its sheet
+  const changes = registry.entry(choice.substance)?.make().changes ?? [];
   const message =
     referenceError === undefined ? {} : { validationState: 'error' as const, validationMessage: referenceError };
   return (
@@ -35,7 +37,7 @@ export function Meaning({ choice, onChoice, temperatureSymbol, usualReference, r
             }}
           >
             <option value="">not named</option>
-            {currentRegistry().entries.map(({ name }) => (
+            {registry.entries.map(({ name }) => (
               <option key={name} value={name}>
                 {name}
               </option>

@@ -34,8 +34,8 @@ export function choiceFor({ parts }: FoundColumns, before: FitChoice): FitChoice
 
 /** Another change of phase, with the kind that its latent heats usually are. */
 export function withChange(choice: FitChoice, wanted: string): FitChoice {
-  if (choice.substance === '') return { ...choice, change: wanted };
-  const substance = currentRegistry().find(choice.substance);
+  const substance = currentRegistry().entry(choice.substance)?.make();
+  if (substance === undefined || substance.changes.length === 0) return { ...choice, change: wanted };
   const change = substance.changes.includes(wanted) ? wanted : (substance.changes[0] ?? wanted);
   return { ...choice, change, kind: substance.defaultKind(change) };
 }
