@@ -1,4 +1,5 @@
-import { fitFluid, vapourWith } from './fitFluid.mjs';
+import { vapourWith } from './fit/vapourOnLine.mjs';
+import { fitFluid } from './fitFluid.mjs';
 import { leastSquares } from './leastSquares.mjs';
 import { deviation } from './spreadOf.mjs';
 

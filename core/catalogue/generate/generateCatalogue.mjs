@@ -14,6 +14,7 @@ import { loadForHoldOut } from './holdOut.mjs';
 import { loadModels } from './loadModels.mjs';
 import { packFluid } from './packFluid.mjs';
 import { report } from './report.mjs';
+import { sameNumbers } from './sameNumbers.mjs';
 
 const here = path.dirname(fileURLToPath(import.meta.url));
 const target = path.resolve(here, '../fluids/fluids.generated.ts');
@@ -40,7 +41,7 @@ if (reporting) {
 } else {
   const text = await generated(fitted, sources, models);
   if (process.argv.includes('--check')) {
-    if ((await readFile(target, 'utf8')) !== text) {
+    if (!sameNumbers(await readFile(target, 'utf8'), text)) {
       throw new Error(`${path.basename(target)} is not what its generator writes: run npm run catalogue`);
     }
     process.stdout.write(`${path.basename(target)} is up to date\n`);
