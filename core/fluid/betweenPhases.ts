@@ -15,6 +15,9 @@ const ENDS: Readonly<Record<string, readonly [cold: Phase, hot: Phase]>> = {
   sublimation: ['solid', 'gas'],
 };
 
+/** Relative standard uncertainty of the enthalpy of single molecules where the real vapour is mostly pairs. */
+const PAIRING_SPREAD = 0.03;
+
 /** Latent heat or its slope between two phases at one pressure: `isobaric` of the real phases, `standard` at 1 bar with ideal gas. */
 export function betweenPhases(
   parts: FluidParts,
@@ -39,7 +42,15 @@ export function betweenPhases(
   const to = Math.min(cold.toK, hot.toK);
   if (!(from <= to)) throw apart(subject, cold, hot);
   const { nodes, latent } = numbers.spread;
-  const relative = (k: number): number => spreadAt(nodes, latent, k / numbers.criticalK);
+  const paired = ideal && numbers.dimer !== undefined ? PAIRING_SPREAD : 0;
+  const value =
+    answered === 'latent'
+      ? (k: number) => hot.enthalpy(k) - cold.enthalpy(k)
+      : (k: number) => hot.heatCapacity(k) - cold.heatCapacity(k);
+  const uncertaintyAt = (k: number): number | undefined =>
+    k < numbers.criticalK
+      ? Math.hypot(spreadAt(nodes, latent, k / numbers.criticalK) * line.latent(k), paired * value(k))
+      : undefined;
   return fluidCurve({
     from,
     to,
@@ -48,13 +59,8 @@ export function betweenPhases(
     kind,
     method: `${hot.method}, less ${cold.method}`,
     sources: [...new Set([...numbers.sources.latent, ...numbers.sources.heatCapacity, ...numbers.sources.gas])],
-    value:
-      answered === 'latent'
-        ? (k) => hot.enthalpy(k) - cold.enthalpy(k)
-        : (k) => hot.heatCapacity(k) - cold.heatCapacity(k),
-    ...(answered === 'latent' && change === 'vaporization'
-      ? { uncertaintyAt: (k: number) => (k < numbers.criticalK ? relative(k) * line.latent(k) : undefined) }
-      : {}),
+    value,
+    ...(answered === 'latent' && change === 'vaporization' ? { uncertaintyAt } : {}),
     marksAt: (k): readonly Mark[] => [...cold.marks(k), ...(ideal ? [] : hot.marks(k))],
   });
 }
