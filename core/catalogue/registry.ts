@@ -76,16 +76,25 @@ function unknown(text: string, entries: readonly CatalogueEntry[], words: readon
   const names = entries.map(({ name }) => name);
   const more = names.length > LISTED ? ` and ${names.length - LISTED} more (the pane lists them)` : '';
   const close = nearest(plainName(text), words);
-  const meant = close === undefined ? undefined : entries.find((entry) => wordsOf(entry).includes(close));
+  const meant = close === undefined ? undefined : nameOfWord(close, entries);
   return refused(
     'substance',
     text,
     [`${names.slice(0, LISTED).join(', ')}${more}`],
-    meant === undefined ? [] : [meant.name],
-    meant?.name,
+    meant === undefined ? [] : [meant],
+    meant,
   );
 }
 
+/** A name, with the synonym that was met in front of it: `kalium (potassium)`. */
+function nameOfWord(word: string, entries: readonly CatalogueEntry[]): string | undefined {
+  for (const entry of entries) {
+    const met = wordsOf(entry).find((one) => plainName(one) === word);
+    if (met !== undefined) return plainName(entry.name) === word ? entry.name : `${met} (${entry.name})`;
+  }
+  return undefined;
+}
+
 function wordsOf({ name, formula, cas, synonyms }: CatalogueEntry): string[] {
-  return [name, formula, cas, ...synonyms].map(plainName);
+  return [name, formula, cas, ...synonyms];
 }
