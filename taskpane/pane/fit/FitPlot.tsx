@@ -1,5 +1,6 @@
 import { useEffect, useRef, useState } from 'react';
 import { useLook } from '../look/useLook';
+import { useWidth } from '../look/useWidth';
 import type { FitPicture } from './drawFit';
 
 /** The picture of a fit; the drawing code is fetched when the first fit is shown. */
@@ -29,17 +30,4 @@ export function FitPlot({ picture }: { readonly picture: Omit<FitPicture, 'width
       {failed && <p className={look.quiet}>The picture could not be loaded. The table below holds the same numbers.</p>}
     </>
   );
-}
-
-/** Width of an element in whole pixels, followed while it is on the page. */
-function useWidth(frame: React.RefObject<HTMLDivElement | null>): number {
-  const [width, setWidth] = useState(0);
-  useEffect(() => {
-    const element = frame.current;
-    if (element === null) return undefined;
-    const observer = new ResizeObserver(() => setWidth(Math.floor(element.clientWidth)));
-    observer.observe(element);
-    return () => observer.disconnect();
-  }, [frame]);
-  return width;
 }

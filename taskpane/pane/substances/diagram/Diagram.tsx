@@ -12,7 +12,7 @@ import { labelsOf } from './labelsOf';
 import { onStep } from './niceStep';
 import { Probe } from './Probe';
 import { probeLabels } from './probeLabels';
-import { useWidth } from './useWidth';
+import { useWidth } from '../../look/useWidth';
 
 export interface DiagramProps {
   readonly name: string;
