@@ -5,7 +5,7 @@ import { noSuchChange } from './coexistence';
 import { ATMOSPHERE_PA, STANDARD_PRESSURE_PA } from './constants';
 import { fluidBranch, idealBranch, type FluidBranch } from './fluidBranch';
 import { fluidCurve } from './fluidCurve';
-import { unconfirmedMark } from './fluidMarks';
+import { NO_MARKS, solidMarks, unconfirmedMark } from './fluidMarks';
 import { lacking, type FluidParts } from './fluidParts';
 import { spreadAt } from './spreadAt';
 
@@ -24,16 +24,16 @@ export function betweenPhases(
   change: Change,
   kind: 'isobaric' | 'standard',
   answered: 'latent' | 'slope',
-  pressurePa = ATMOSPHERE_PA,
+  pressurePa?: number,
 ): Curve {
   const { numbers, line } = parts;
   const ends = ENDS[change];
   if (ends === undefined) throw noSuchChange(parts, change);
-  const pressure = kind === 'standard' ? STANDARD_PRESSURE_PA : pressurePa;
+  const pressure = kind === 'standard' ? STANDARD_PRESSURE_PA : (pressurePa ?? usualPressure(parts, change));
   const where = kind === 'standard' ? 'in its standard states (1 bar)' : `at ${shortNumber(pressure)} Pa`;
   const subject = `${change} ${answered === 'latent' ? '' : 'slope '}of ${numbers.name} ${where}`;
   if (change === 'fusion' && (answered === 'latent' || parts.solid === undefined)) {
-    return fusionAtPoint(parts, kind, answered, subject);
+    return fusionAtPoint(parts, kind, answered, subject, pressure);
   }
   const cold = fluidBranch(parts, ends[0], pressure);
   const ideal = kind === 'standard' && ends[1] === 'gas';
@@ -58,25 +58,41 @@ export function betweenPhases(
     unit: answered === 'latent' ? 'J/mol' : 'J/(mol K)',
     kind,
     method: `${hot.method}, less ${cold.method}`,
-    sources: [...new Set([...numbers.sources.latent, ...numbers.sources.heatCapacity, ...numbers.sources.gas])],
+    sources: [
+      ...new Set([
+        ...numbers.sources.latent,
+        ...numbers.sources.heatCapacity,
+        ...numbers.sources.gas,
+        ...(ends[0] === 'solid' && numbers.solid !== undefined ? [numbers.solid.source] : []),
+      ]),
+    ],
     value,
     ...(answered === 'latent' && change === 'vaporization' ? { uncertaintyAt } : {}),
     marksAt: (k): readonly Mark[] => [...cold.marks(k), ...(ideal ? [] : hot.marks(k))],
   });
 }
 
+/** One atmosphere; for melting at least the pressure of the triple point, below which there is no liquid. */
+function usualPressure({ numbers, line }: FluidParts, change: Change): number {
+  return change === 'fusion' ? Math.max(ATMOSPHERE_PA, line.pressure(numbers.meltingK)) : ATMOSPHERE_PA;
+}
+
 /** Melting at its own temperature: what the cited enthalpy of fusion says. */
 function fusionAtPoint(
-  { numbers, solid, liquid }: FluidParts,
+  parts: FluidParts,
   kind: 'isobaric' | 'standard',
   answered: 'latent' | 'slope',
   subject: string,
+  pressurePa: number,
 ): Curve {
+  const { numbers, solid, liquid } = parts;
   const { fusion, meltingK, name } = numbers;
   if (fusion === undefined) throw lacking(`enthalpy of fusion of ${name}`);
   if (answered === 'slope') throw lacking(`heat capacity of solid ${name}`);
   const { value, uncertainty, source, confirmed } = fusion;
-  const at = solid === undefined ? () => value : (k: number) => liquid.enthalpy(k, ATMOSPHERE_PA) - solid.enthalpy(k);
+  const at = solid === undefined ? () => value : (k: number) => liquid.enthalpy(k, pressurePa) - solid.enthalpy(k);
+  const atMelting = confirmed ? NO_MARKS : unconfirmedMark('enthalpy of fusion');
+  const below = [...atMelting, ...solidMarks(numbers)];
   return fluidCurve({
     from: solid === undefined ? meltingK : Math.max(numbers.lineFromK, solid.fromK),
     to: meltingK,
@@ -85,10 +101,10 @@ function fusionAtPoint(
     kind,
     method:
       solid === undefined ? 'cited enthalpy of fusion' : 'cited enthalpy of fusion and heat capacities of both phases',
-    sources: [source],
+    sources: [...new Set([source, ...(numbers.solid === undefined ? [] : [numbers.solid.source])])],
     value: at,
     ...(uncertainty === undefined ? {} : { uncertaintyAt: () => uncertainty }),
-    ...(confirmed ? {} : { marksAt: () => unconfirmedMark('enthalpy of fusion') }),
+    ...(below.length === 0 ? {} : { marksAt: (k: number) => (k < meltingK ? below : atMelting) }),
   });
 }
 

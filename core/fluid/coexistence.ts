@@ -1,7 +1,7 @@
 import { Problem } from '../problem';
 import type { Change, Curve } from '../substance';
 import { fluidCurve } from './fluidCurve';
-import { lineMarks } from './fluidMarks';
+import { lineMarks, NO_MARKS, solidMarks, sublimationMarks } from './fluidMarks';
 import { lacking, requireGas, type FluidParts } from './fluidParts';
 import { spreadAt } from './spreadAt';
 
@@ -62,6 +62,7 @@ function sublimation(parts: FluidParts, answered: Answered): Curve {
     return ((gas.enthalpy(k, p * (1 + h)) - gas.enthalpy(k, p * (1 - h))) / (2 * h)) * line.lnSlope(k);
   };
   const slope = (k: number): number => gas.heatCapacity(k, line.pressure(k)) - solid.heatCapacity(k) + term(k);
+  const marks = answered === 'slope' ? solidMarks(numbers) : sublimationMarks(numbers);
   const uncertainty = (k: number): number => {
     const vaporizing = spreadAt(spread.nodes, spread.latent, k / criticalK) * latent(k);
     const below = 0.1 * solid.heatCapacity(k) * (numbers.meltingK - k);
@@ -73,9 +74,18 @@ function sublimation(parts: FluidParts, answered: Answered): Curve {
     subject: `${WORDS[answered]}sublimation of ${name} along its coexistence line`,
     unit: answered === 'latent' ? 'J/mol' : 'J/(mol K)',
     kind: 'coexistence',
-    method: 'enthalpy of the real vapour less that of the solid, which lies the enthalpy of fusion below the liquid',
-    sources: [...new Set([...numbers.sources.latent, ...(fusion === undefined ? [] : [fusion.source])])],
+    method:
+      'enthalpy of the real vapour less that of the solid: enthalpy of fusion at the melting point, heat capacity of the solid below',
+    sources: [
+      ...new Set([
+        ...numbers.sources.latent,
+        ...(fusion === undefined ? [] : [fusion.source]),
+        ...(numbers.solid === undefined ? [] : [numbers.solid.source]),
+      ]),
+    ],
     value: { latent, slope, term }[answered],
+    // at the melting point the heat capacity plays no part in the latent heat
+    marksAt: (k) => (answered === 'latent' && k === numbers.meltingK ? NO_MARKS : marks),
     ...(answered === 'latent' ? { uncertaintyAt: uncertainty } : {}),
   });
 }

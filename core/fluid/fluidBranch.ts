@@ -1,6 +1,7 @@
 import type { Mark } from '../answer';
 import { Problem } from '../problem';
 import type { Phase } from '../substance';
+import { NO_MARKS, solidMarks } from './fluidMarks';
 import { lacking, requireGas, type FluidParts } from './fluidParts';
 
 /** One phase at one pressure: where it is described, and its two curves. */
@@ -15,11 +16,11 @@ export interface FluidBranch {
   readonly marks: (temperatureK: number) => readonly Mark[];
 }
 
-const NO_MARKS: readonly Mark[] = [];
 const metastable = (text: string): readonly Mark[] => [{ code: 'metastable', text }];
 const SUPERCOOLED = metastable('supercooled liquid: the solid is the stable phase here');
 const SUPERHEATED = metastable('superheated liquid: vapour is the stable phase here');
 const SUPERSATURATED = metastable('supersaturated vapour: liquid is the stable phase here');
+const SUBCOOLED = metastable('supersaturated vapour: the solid is the stable phase here');
 const IDEAL: readonly Mark[] = [{ code: 'ideal-gas', text: 'ideal gas' }];
 
 /** A metastable branch is followed until its heat capacity has grown by half since the saturated phase. */
@@ -69,13 +70,14 @@ export function fluidBranch(parts: FluidParts, phase: Phase, pressurePa: number)
 
 function solidBranch({ solid, numbers }: FluidParts): FluidBranch {
   if (solid === undefined) throw lacking(`heat capacity of solid ${numbers.name}`);
+  const marks = solidMarks(numbers);
   return {
     fromK: solid.fromK,
     toK: numbers.meltingK,
     method: 'enthalpy of fusion and heat capacity of the solid',
     enthalpy: solid.enthalpy,
     heatCapacity: solid.heatCapacity,
-    marks: () => NO_MARKS,
+    marks: () => marks,
   };
 }
 
@@ -98,12 +100,12 @@ function liquidBranch({ liquid, line, numbers, highestLiquidPa }: FluidParts, pr
 }
 
 function gasBranch(parts: FluidParts, pressurePa: number): FluidBranch {
-  const { line, numbers, highestVapourPa } = parts;
+  const { numbers, highestVapourPa } = parts;
   const gas = requireGas(parts);
   requirePressure(pressurePa, highestVapourPa, `${numbers.name} vapour`);
   const coldest = coldestVapour(parts);
-  const dew = Math.max(coldest, line.temperature(Math.max(pressurePa, line.pressure(numbers.lineFromK))));
-  const stableFrom = Math.max(dew, coldest);
+  const stableFrom = Math.max(condensesAt(parts, pressurePa), coldest);
+  const metastableMarks = stableFrom < numbers.meltingK && parts.sublimation !== undefined ? SUBCOOLED : SUPERSATURATED;
   const most = HIGHEST_GROWTH * gas.heatCapacity(stableFrom, pressurePa);
   const sound = (k: number): boolean => {
     const cp = gas.heatCapacity(k, pressurePa);
@@ -115,7 +117,7 @@ function gasBranch(parts: FluidParts, pressurePa: number): FluidBranch {
     method: 'ideal gas and departure of the real vapour from it',
     enthalpy: (k) => gas.enthalpy(k, pressurePa),
     heatCapacity: (k) => gas.heatCapacity(k, pressurePa),
-    marks: (k) => (k < stableFrom ? SUPERSATURATED : NO_MARKS),
+    marks: (k) => (k < stableFrom ? metastableMarks : NO_MARKS),
   };
 }
 
@@ -132,9 +134,17 @@ export function idealBranch(parts: FluidParts): FluidBranch {
   };
 }
 
-/** Vapour begins where the line does, or at the temperature of sublimation at one atmosphere. */
-function coldestVapour({ numbers }: FluidParts): number {
-  return Math.min(numbers.lineFromK, numbers.sublimesAtK ?? Infinity);
+/** Vapour begins where its line with liquid or solid does. */
+function coldestVapour({ numbers, sublimation }: FluidParts): number {
+  return Math.min(numbers.lineFromK, sublimation?.fromK ?? Infinity);
+}
+
+/** Where vapour of a pressure condenses, or frost forms. */
+function condensesAt({ line, numbers, sublimation }: FluidParts, pressurePa: number): number {
+  if (sublimation === undefined || pressurePa >= line.pressure(numbers.meltingK)) {
+    return line.temperature(Math.max(pressurePa, line.pressure(numbers.lineFromK)));
+  }
+  return sublimation.temperature(Math.max(pressurePa, sublimation.pressure(sublimation.fromK)));
 }
 
 /** Walks from a stable temperature towards an end in growing steps, and returns the last sound one. */

@@ -48,8 +48,8 @@ function belowTriple(parts: FluidParts, pressurePa: number): Ladder {
   const { numbers, sublimation, solid } = parts;
   const missing = missingOf(parts);
   if (sublimation === undefined || solid === undefined || pressurePa < sublimation.pressure(sublimation.fromK)) {
-    const { sublimesAtK, meltingK, name } = numbers;
-    const from = sublimesAtK ?? (sublimation === undefined ? meltingK : sublimation.fromK);
+    const { meltingK, name } = numbers;
+    const from = sublimation === undefined ? meltingK : sublimation.fromK;
     const gas = gasRung(parts, pressurePa, from);
     return { pressurePa, rungs: [gas], gaps: [], ...missing, missingBelow: `heat capacity of solid ${name}` };
   }

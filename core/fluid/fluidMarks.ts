@@ -23,6 +23,20 @@ export function lineMarks(numbers: FluidNumbers, property: string): (temperature
   return (k) => (k < meltingK ? cold : k > NEAR_CRITICAL * criticalK ? hot : always);
 }
 
+/** Marks of a solid's heat capacity and of what rests on it. */
+export function solidMarks({ solid }: FluidNumbers): readonly Mark[] {
+  return solid === undefined || solid.confirmed ? NO_MARKS : unconfirmedMark(SOLID_HEAT_CAPACITY);
+}
+
+/** Marks of the sublimation line, which follows from the solid's heat capacity. */
+export function sublimationMarks({ solid }: FluidNumbers): readonly Mark[] {
+  return solid === undefined || solid.confirmed || solid.lineConfirmed
+    ? NO_MARKS
+    : unconfirmedMark(SOLID_HEAT_CAPACITY);
+}
+
+const SOLID_HEAT_CAPACITY = 'solid heat capacity';
+
 export function unconfirmedMark(property: string): readonly Mark[] {
   return [{ code: 'unconfirmed', text: `rests on values for ${property} that no second source confirms` }];
 }

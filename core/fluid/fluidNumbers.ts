@@ -23,9 +23,22 @@ export interface Spread {
 export interface SolidNumbers {
   /** Down to where the heat capacity is taken as known, K. */
   readonly fromK: number;
-  /** Crystal of the nine-coefficient data, or a constant heat capacity in J/(mol K). */
-  readonly heatCapacity: Nasa9Species | number;
+  /** Crystal of the nine-coefficient data, or a straight line. */
+  readonly heatCapacity: Nasa9Species | StraightHeatCapacity;
   readonly source: string;
+  /** Whether a second source stands behind the heat capacity. */
+  readonly confirmed: boolean;
+  /** Whether a cited point of the sublimation line agrees with what follows from the heat capacity. */
+  readonly lineConfirmed: boolean;
+  /** m³/mol; 0 where it is left out against the vapour's. */
+  readonly molarVolume: number;
+}
+
+/** value + slope·(T − atK), J/(mol K) */
+export interface StraightHeatCapacity {
+  readonly value: number;
+  readonly slope: number;
+  readonly atK: number;
 }
 
 /** Difference of separately fitted latent heat and heat capacities: a cubic in the reduced temperature, J/mol. */
@@ -52,7 +65,7 @@ export interface FluidNumbers {
   readonly polar: number;
   readonly bonding: number;
   readonly meltingK: number;
-  /** At one atmosphere the solid turns into vapour, not into liquid. */
+  /** Printed temperature at which the solid turns into vapour at one atmosphere, where it does not melt there. */
   readonly sublimesAtK?: number;
   /** Colder end of the saturation line, and the end up to which the vapour on it is described. */
   readonly lineFromK: number;

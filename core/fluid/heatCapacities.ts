@@ -3,7 +3,7 @@ import type { Curve, Phase } from '../substance';
 import { STANDARD_PRESSURE_PA } from './constants';
 import { fluidBranch, idealBranch, type FluidBranch } from './fluidBranch';
 import { fluidCurve } from './fluidCurve';
-import { lineMarks, NO_MARKS, unconfirmedMark } from './fluidMarks';
+import { lineMarks, NO_MARKS, solidMarks, unconfirmedMark } from './fluidMarks';
 import { lacking, requireGas, type FluidParts } from './fluidParts';
 import { spreadAt } from './spreadAt';
 
@@ -68,6 +68,7 @@ function saturated(parts: FluidParts, phase: Phase): Curve {
     to: meltingK,
     value: solid.heatCapacity,
     uncertaintyAt: (k) => SOLID_SPREAD * solid.heatCapacity(k),
+    marksAt: () => solidMarks(numbers),
   });
 }
 

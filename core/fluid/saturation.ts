@@ -1,10 +1,14 @@
 import type { Curve, Surface } from '../substance';
 import { fluidCurve } from './fluidCurve';
-import { lineMarks } from './fluidMarks';
+import { lineMarks, sublimationMarks } from './fluidMarks';
 import { lacking, requireGas, type FluidParts } from './fluidParts';
 import { spreadAt } from './spreadAt';
 
 const METHOD = 'fitted together with latent heat and liquid heat capacity to cited pressures (Wagner form)';
+/** Relative standard uncertainty over the solid where a printed temperature of sublimation agrees, and its growth away from there, 1/K. */
+const CITED_SPREAD = 0.0025;
+const CITED_GROWTH = 0.00015;
+
 const SOLID_METHOD = 'Clapeyron from the triple point down, with the enthalpies of vapour and solid';
 
 /** Pressure of the two-phase line with vapour: over the stable phase, or over solid or liquid by force. */
@@ -27,6 +31,13 @@ export function saturationPressure(parts: FluidParts, surface: Surface): Curve {
   }
   if (sublimation === undefined) throw noIce(parts);
   const overSolid = surface === 'ice';
+  const frostMarks = sublimationMarks(numbers);
+  const boilingMarks = lineMarks(numbers, 'vapour pressure');
+  const { sublimesAtK } = numbers;
+  const overSolidSpread = (k: number): number =>
+    sublimesAtK !== undefined && numbers.solid?.lineConfirmed === true
+      ? CITED_SPREAD + CITED_GROWTH * Math.abs(k - sublimesAtK)
+      : Math.hypot(relative(k), 0.01 + 0.001 * (meltingK - k));
   const value = (k: number): number => (k < meltingK ? sublimation.pressure(k) : line.pressure(k));
   return fluidCurve({
     ...shared,
@@ -35,7 +46,8 @@ export function saturationPressure(parts: FluidParts, surface: Surface): Curve {
     subject: `saturation pressure of ${overSolid ? 'solid ' : ''}${name}`,
     method: overSolid ? SOLID_METHOD : `${METHOD}; below the melting point: ${SOLID_METHOD}`,
     value,
-    uncertaintyAt: (k) => value(k) * Math.hypot(relative(k), k < meltingK ? 0.01 + 0.001 * (meltingK - k) : 0),
+    uncertaintyAt: (k) => value(k) * (k < meltingK ? overSolidSpread(k) : relative(k)),
+    marksAt: (k) => (k < meltingK ? frostMarks : boilingMarks(k)),
   });
 }
 
@@ -61,7 +73,7 @@ export function saturationTemperature(parts: FluidParts, surface: Surface): Curv
       const k = value(p);
       return (pressure.uncertaintyAt?.(k) ?? NaN) / (p * slope(k));
     },
-    ...(unconfirmed.has('vapour pressure') || surface === 'liquid'
+    ...(unconfirmed.has('vapour pressure') || surface === 'liquid' || solid
       ? { marksAt: (p: number) => pressure.marksAt?.(value(p)) ?? [] }
       : {}),
   });

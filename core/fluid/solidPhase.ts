@@ -16,11 +16,12 @@ export function solidPhase(numbers: FluidNumbers, line: FluidLine): SolidPhase |
   if (solid === undefined || fusion === undefined) return undefined;
   const top = line.liquid(meltingK) - fusion.value;
   const { heatCapacity } = solid;
-  if (typeof heatCapacity === 'number') {
+  if (!('intervals' in heatCapacity)) {
+    const { value, slope, atK } = heatCapacity;
     return {
       fromK: solid.fromK,
-      enthalpy: (k) => top + heatCapacity * (k - meltingK),
-      heatCapacity: () => heatCapacity,
+      enthalpy: (k) => top + (k - meltingK) * (value + slope * (0.5 * (k + meltingK) - atK)),
+      heatCapacity: (k) => value + slope * (k - atK),
     };
   }
   const atTop = nasa9Enthalpy(heatCapacity, meltingK);

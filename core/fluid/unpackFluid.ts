@@ -148,14 +148,18 @@ function referenceOf(gas: string): string {
     : 'elements in their reference states at 298.15 K and 1 bar are zero: the ideal gas has its enthalpy of formation there';
 }
 
-/** `fromK,heat capacity or crystal,source` */
+/** `fromK,heat capacity or crystal,source,confirmed,line confirmed`, and for a straight line `slope,atK,m³/mol` */
 function solidOf(text: string, sources: readonly string[]): SolidNumbers | undefined {
   if (text === '') return undefined;
-  const [fromK = '', what = '', source = ''] = text.split(',');
-  const constant = Number(what);
+  const [fromK = '', what = '', source = '', confirmed, lineConfirmed, ...straight] = text.split(',');
+  const value = Number(what);
+  const [slope = 0, atK = 0, molarVolume = 0] = straight.map(Number);
   return {
     fromK: Number(fromK),
-    heatCapacity: Number.isNaN(constant) ? nasa9Species(what) : constant,
+    heatCapacity: Number.isNaN(value) ? nasa9Species(what) : { value, slope, atK },
     source: sources[Number(source)] ?? '',
+    confirmed: confirmed === '1',
+    lineConfirmed: lineConfirmed === '1',
+    molarVolume,
   };
 }

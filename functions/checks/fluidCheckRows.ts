@@ -25,7 +25,7 @@ export const FLUID_CHECK_SOURCES: readonly string[] = [
 export type Printed = readonly [value: number, within: number, source: number] | 0;
 
 /**
- * By fluid: boiling temperature (K), then enthalpies of vaporization there and at 298.15 K and of fusion (kJ/mol).
+ * By fluid: boiling temperature (K; of carbon dioxide that of sublimation), then enthalpies of vaporization there and at 298.15 K and of fusion (kJ/mol).
  */
 export const FLUID_CHECK_ROWS: readonly (readonly [
   name: string,
@@ -35,7 +35,7 @@ export const FLUID_CHECK_ROWS: readonly (readonly [
   fusion: Printed,
 ])[] = [
   ['ammonia', [239.72, 0.16, 0], [23.347, 0.3, 1], [19.86, 0.48, 2], [5.657, 0.08, 3]],
-  ['carbon dioxide', 0, 0, 0, [9.018, 0.13, 3]],
+  ['carbon dioxide', [194.67, 0.065, 4], 0, 0, [9.018, 0.13, 3]],
   ['sulfur dioxide', [263.13, 0.17, 0], [24.926, 0.32, 3], [22.92, 0.51, 2], [7.399, 0.1, 3]],
   ['methanol', [337.85, 0.23, 4], [35.254, 0.47, 1], [37.83, 0.51, 5], [3.18, 0.056, 6]],
   ['ethanol', [351.44, 0.36, 4], [38.744, 0.53, 1], [42.3, 0.54, 7], [5.01, 0.1, 6]],

@@ -144,13 +144,20 @@ export function fusionOf({ check_values }) {
   };
 }
 
-function solidOf(models, { name, Cp_solid: solids }, citations) {
+function solidOf(models, { name, Cp_solid: solids, solid_density: density, molar_mass: molarMass }, citations) {
   const crystal = CRYSTALS[name];
   if (crystal !== undefined) {
-    return `${models.nasa9Species(crystal).fromK},${crystal},${citations.place('nasa9')}`;
+    return `${models.nasa9Species(crystal).fromK},${crystal},${citations.place('nasa9')},1,1`;
   }
-  const [first] = solids;
-  return first === undefined ? '' : `${SOLID_FROM_K},${first.value},${citations.place(first.source, first.detail)}`;
+  const [first, colder] = solids;
+  if (first === undefined) return '';
+  const confirmed = solids.every((one) => one.confirmed) ? 1 : 0;
+  const head = [first.value, citations.place(first.source, first.detail), confirmed];
+  if (colder === undefined) return [SOLID_FROM_K, ...head, 0].join(',');
+  const slope = (first.value - colder.value) / (first.T_K - colder.T_K);
+  const volume = molarMass.value / 1000 / density.value;
+  // the cited temperature of sublimation at one atmosphere agrees, as a test says
+  return [colder.T_K, ...head, 1, short(slope, 4), first.T_K, short(volume, 4)].join(',');
 }
 
 function sourcesOf(points, kinds, citations) {
@@ -194,6 +201,7 @@ function notesOf(record, fluid, points) {
     notes.push('The vapour is a mixture of single molecules and pairs in equilibrium, per mole of single molecules');
   }
   const doubtful = unconfirmedOf(points);
+  if (record.Cp_solid?.some(({ confirmed }) => !confirmed)) doubtful.push('solid heat capacity');
   if (doubtful.length > 0) notes.push(`Unconfirmed: ${doubtful.join(', ')}`);
   return notes;
 }
