@@ -15,8 +15,9 @@ const ENDS: Readonly<Record<string, readonly [cold: Phase, hot: Phase]>> = {
   sublimation: ['solid', 'gas'],
 };
 
-/** Relative standard uncertainty of the enthalpy of single molecules where the real vapour is mostly pairs. */
-const PAIRING_SPREAD = 0.03;
+/** Where the heat to single molecules of a vapour in pairs is printed, K, and what each kelvin from there adds, J/(mol K). */
+const SINGLE_MOLECULES_K = 298.15;
+const HEAT_CAPACITY_DOUBT = 2.5;
 
 /** Latent heat or its slope between two phases at one pressure: `isobaric` of the real phases, `standard` at 1 bar with ideal gas. */
 export function betweenPhases(
@@ -42,15 +43,17 @@ export function betweenPhases(
   const to = Math.min(cold.toK, hot.toK);
   if (!(from <= to)) throw apart(subject, cold, hot);
   const { nodes, latent } = numbers.spread;
-  const paired = ideal && numbers.dimer !== undefined ? PAIRING_SPREAD : 0;
   const value =
     answered === 'latent'
       ? (k: number) => hot.enthalpy(k) - cold.enthalpy(k)
       : (k: number) => hot.heatCapacity(k) - cold.heatCapacity(k);
-  const uncertaintyAt = (k: number): number | undefined =>
-    k < numbers.criticalK
-      ? Math.hypot(spreadAt(nodes, latent, k / numbers.criticalK) * line.latent(k), paired * value(k))
-      : undefined;
+  const toSingle = ideal ? numbers.singleMoleculesSpread : undefined;
+  const uncertaintyAt = (k: number): number | undefined => {
+    if (k >= numbers.criticalK) return undefined;
+    return toSingle === undefined
+      ? spreadAt(nodes, latent, k / numbers.criticalK) * line.latent(k)
+      : Math.hypot(toSingle * value(k), HEAT_CAPACITY_DOUBT * (k - SINGLE_MOLECULES_K));
+  };
   return fluidCurve({
     from,
     to,

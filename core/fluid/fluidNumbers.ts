@@ -72,6 +72,8 @@ export interface FluidNumbers {
   readonly vapourToK: number;
   readonly ideal?: Nasa9Species;
   readonly dimer?: Nasa9Species;
+  /** With a dimer: relative standard uncertainty of the printed heat of vaporization to single molecules at 298.15 K. */
+  readonly singleMoleculesSpread?: number;
   readonly pressure: WagnerTerms;
   readonly latent: LatentTerms;
   readonly liquid: LiquidTerms;

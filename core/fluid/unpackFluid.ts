@@ -76,7 +76,7 @@ export function unpackFluid(packed: string, sources: readonly string[]): FluidNu
     vapourToK,
     ...(sublimesAtK === undefined ? {} : { sublimesAtK }),
     ...(ideal === undefined ? {} : { ideal }),
-    ...(fields.dimer === '' ? {} : { dimer: nasa9Species(fields.dimer) }),
+    ...dimerOf(fields),
     pressure: numbersOf(fields.pressure) as unknown as FluidNumbers['pressure'],
     latent: numbersOf(fields.latent) as unknown as FluidNumbers['latent'],
     liquid: numbersOf(fields.liquid),
@@ -130,6 +130,13 @@ function cited(
     source: sources[Number(source)] ?? '',
     confirmed: confirmed === '1',
   };
+}
+
+/** The species of the pairs, then `~` and the uncertainty of the heat to single molecules. */
+function dimerOf({ dimer: text }: Fields): Pick<FluidNumbers, 'dimer' | 'singleMoleculesSpread'> {
+  if (text === '') return {};
+  const [name = '', spread] = text.split('~');
+  return { dimer: nasa9Species(name), singleMoleculesSpread: Number(spread) };
 }
 
 /** A species of the nine-coefficient data, or `=` and a cubic with its range; then `~` and the floor below its data. */

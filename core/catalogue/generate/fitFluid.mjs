@@ -29,7 +29,7 @@ export function fitFluid(models, fluid, points, joint = true) {
   const expected = priorRows(models, fluid, kind, points);
   let state = { pressure: ambroseWalton(fluid.acentric), polar: kind.polar[0], bonding: kind.bonding[0] };
   for (let round = 0; round < ROUNDS; round++) {
-    const cited = points.flatMap((point) => dataRows(models, fluid, state, point));
+    const cited = points.flatMap((point) => dataRows(models, fluid, state, point, joint));
     const agreement = joint
       ? [...clapeyronRows(models, fluid, kind, state), ...closureRows(models, fluid, kind, state)]
       : [{ row: rowOf(LIQUID + 2), value: 0, sigma: 1 }];

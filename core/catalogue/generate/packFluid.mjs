@@ -25,7 +25,7 @@ export function packFluid(models, { record, fluid, points, fit, disagreement }, 
     cas: record.cas,
     synonyms: record.synonyms.join(';'),
     gas: gasOf(fluid, record),
-    dimer: fluid.vapour?.dimer?.name ?? '',
+    dimer: dimerOf(fluid, points),
     limits: [lineFromK, vapourEnd(models, fluid, fit), ...(sublimes === undefined ? [] : [sublimes])]
       .map((k) => short(k))
       .join(','),
@@ -79,6 +79,12 @@ function vapourEnd(models, fluid, fit) {
 function gasOf(fluid, record) {
   const gas = gasWithoutFloor(fluid, record);
   return gas === '' || fluid.floor === undefined ? gas : `${gas}~${fluid.floor}`;
+}
+
+function dimerOf({ vapour }, points) {
+  if (vapour?.dimer === undefined) return '';
+  const { sigma } = points.find(({ kind }) => kind === 'standard');
+  return `${vapour.dimer.name}~${short(sigma, 2)}`;
 }
 
 function gasWithoutFloor({ vapour }, { nasa9, Cp_gas_points: gasPoints }) {

@@ -7,8 +7,9 @@ const GRID_TO = 0.955;
 const GRID_FROM = 0.2;
 const GRID_STEP = 0.03;
 
-/** Grid values lean on one another: each counts as less than one of its own. */
-const CORRELATED = { clapeyron: 1.4, closure: 1.6 };
+/** Grid values lean on one another: each counts as less than one of its own; an error of pairing is
+ * one and the same all along. */
+const CORRELATED = { clapeyron: 1.4, closure: 1.6, pairs: 3 };
 
 /** Reduced temperatures from the melting point to near the critical one. */
 function grid({ meltingK, criticalK }) {
@@ -54,8 +55,8 @@ export function closureRows(models, fluid, kind, state) {
     v.by.forEach((by, i) => (row[ATTRACTION + i] -= by.enthalpy / rc));
     const value = (v.enthalpy - v.by[0].enthalpy * state.polar - v.by[1].enthalpy * state.bonding) / rc;
     const cold = Math.max(0, fluid.idealFromK - temperatureK);
-    const pairs = fluid.vapour.dimer === undefined ? 0 : 100;
-    const sigma = (Math.hypot(4, pairs, 3.6 * kind.vapour * departure, 0.15 * cold) * CORRELATED.closure) / rc;
+    const leaning = fluid.vapour.dimer === undefined ? CORRELATED.closure : CORRELATED.pairs;
+    const sigma = (Math.hypot(4, 3.6 * kind.vapour * departure, 0.15 * cold) * leaning) / rc;
     rows.push({ row, value, sigma });
   }
   return rows;

@@ -1,4 +1,4 @@
-import { latentBasis, liquidSlopeBasis, pressureBasis } from './bases.mjs';
+import { latentBasis, liquidBasis, liquidSlopeBasis, pressureBasis } from './bases.mjs';
 import { ATTRACTION, LATENT, LIQUID, PRESSURE, withTerms } from './unknowns.mjs';
 import { reducedPressure, vapourOnLine } from './vapourOnLine.mjs';
 
@@ -9,8 +9,11 @@ function liquidTerm(models, fluid, state, t) {
   return (v.volume - t * v.first) * p * models.lnPressureSlope(state.pressure, t);
 }
 
+/** The level of the liquid of an acid below its single molecules is held this much tighter than the print is certain. */
+const LEVEL_SHARE = 0.3;
+
 /** The rows of one cited value: none where it needs the vapour of a fluid that has none. */
-export function dataRows(models, fluid, state, { kind, temperatureK, value, sigma }) {
+export function dataRows(models, fluid, state, { kind, temperatureK, value, sigma }, joint) {
   const t = temperatureK / fluid.criticalK;
   const { MOLAR_GAS_CONSTANT: r } = models;
   if (kind === 'p') {
@@ -36,5 +39,9 @@ export function dataRows(models, fluid, state, { kind, temperatureK, value, sigm
   const terms = [state.polar, state.bonding];
   const fixed = vapour.by.reduce((sum, by, i) => sum - by.enthalpy * terms[i], vapour.enthalpy - ideal);
   vapour.by.forEach((by, i) => (row[ATTRACTION + i] -= by.enthalpy / rc));
-  return [{ row, value: reduced + fixed / rc, sigma: sigma * reduced }];
+  const toReal = { row, value: reduced + fixed / rc, sigma: sigma * reduced };
+  if (fluid.vapour.dimer === undefined || !joint) return [toReal];
+  // where the vapour is mostly pairs, the liquid lies the printed enthalpy below the single molecules, whatever the pairs do
+  const level = withTerms(LIQUID, liquidBasis(models, t));
+  return [toReal, { row: level, value: ideal / rc - reduced, sigma: LEVEL_SHARE * sigma * reduced }];
 }

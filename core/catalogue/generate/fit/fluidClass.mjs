@@ -1,5 +1,5 @@
 /** For a vapour in pairs: shifts of the enthalpy of pairing, kJ/mol, and of ln K, in the place of the two terms. */
-const PAIRS = { polar: [0, 4], bonding: [0, 0.4] };
+const PAIRS = { polar: [0, 1.5], bonding: [0, 0.4] };
 
 /**
  * How far a class of fluids may leave corresponding states: mean and standard deviation of the polar and the bonding term,
