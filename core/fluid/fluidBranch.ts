@@ -6,8 +6,12 @@ import { lacking, requireGas, type FluidParts } from './fluidParts';
 
 /** One phase at one pressure: where it is described, and its two curves. */
 export interface FluidBranch {
+  /** Ends with the metastable parts, searched for when first read. */
   readonly fromK: number;
   readonly toK: number;
+  /** Inside these no search is needed. */
+  readonly stableFromK: number;
+  readonly stableToK: number;
   readonly method: string;
   /** J/mol; NaN where there is no such state. */
   readonly enthalpy: (temperatureK: number) => number;
@@ -74,6 +78,8 @@ function solidBranch({ solid, numbers }: FluidParts): FluidBranch {
   return {
     fromK: solid.fromK,
     toK: numbers.meltingK,
+    stableFromK: solid.fromK,
+    stableToK: numbers.meltingK,
     method: 'enthalpy of fusion and heat capacity of the solid',
     enthalpy: solid.enthalpy,
     heatCapacity: solid.heatCapacity,
@@ -88,10 +94,15 @@ function liquidBranch({ liquid, line, numbers, highestLiquidPa }: FluidParts, pr
   const end = HOTTEST_LIQUID * criticalK;
   const sound = (k: number): boolean =>
     liquid.heatCapacity(k, pressurePa) <= HIGHEST_GROWTH * liquid.saturatedHeatCapacity(k);
-  const toK = boils === Infinity ? end : edge(sound, Math.max(boils, lineFromK), Math.max(boils, end));
+  const stableToK = boils === Infinity ? end : Math.max(boils, lineFromK);
+  let toK: number | undefined = boils === Infinity ? end : undefined;
   return {
     fromK: lineFromK,
-    toK,
+    get toK() {
+      return (toK ??= edge(sound, stableToK, Math.max(boils, end)));
+    },
+    stableFromK: lineFromK,
+    stableToK,
     method: 'enthalpy of the saturated liquid and its change with pressure',
     enthalpy: (k) => (k < criticalK ? liquid.enthalpy(k, pressurePa) : NaN),
     heatCapacity: (k) => (k < criticalK ? liquid.heatCapacity(k, pressurePa) : NaN),
@@ -106,14 +117,21 @@ function gasBranch(parts: FluidParts, pressurePa: number): FluidBranch {
   const coldest = coldestVapour(parts);
   const stableFrom = Math.max(condensesAt(parts, pressurePa), coldest);
   const metastableMarks = stableFrom < numbers.meltingK && parts.sublimation !== undefined ? SUBCOOLED : SUPERSATURATED;
-  const most = HIGHEST_GROWTH * gas.heatCapacity(stableFrom, pressurePa);
+  let most: number | undefined;
+  let fromK: number | undefined;
+  const toK = Math.min(gas.ideal.toK, HOTTEST_GAS_K);
   const sound = (k: number): boolean => {
     const cp = gas.heatCapacity(k, pressurePa);
+    most ??= HIGHEST_GROWTH * gas.heatCapacity(stableFrom, pressurePa);
     return cp <= most && cp >= LEAST_OF_IDEAL * gas.idealHeatCapacity(k);
   };
   return {
-    fromK: edge(sound, stableFrom, coldest),
-    toK: Math.min(gas.ideal.toK, HOTTEST_GAS_K),
+    get fromK() {
+      return (fromK ??= edge(sound, stableFrom, coldest));
+    },
+    toK,
+    stableFromK: stableFrom,
+    stableToK: toK,
     method: 'ideal gas and departure of the real vapour from it',
     enthalpy: (k) => gas.enthalpy(k, pressurePa),
     heatCapacity: (k) => gas.heatCapacity(k, pressurePa),
@@ -124,9 +142,13 @@ function gasBranch(parts: FluidParts, pressurePa: number): FluidBranch {
 /** Vapour as an ideal gas. */
 export function idealBranch(parts: FluidParts): FluidBranch {
   const gas = requireGas(parts);
+  const fromK = coldestVapour(parts);
+  const toK = Math.min(gas.ideal.toK, HOTTEST_GAS_K);
   return {
-    fromK: coldestVapour(parts),
-    toK: Math.min(gas.ideal.toK, HOTTEST_GAS_K),
+    fromK,
+    toK,
+    stableFromK: fromK,
+    stableToK: toK,
     method: 'ideal gas',
     enthalpy: gas.idealEnthalpy,
     heatCapacity: gas.idealHeatCapacity,

@@ -1,6 +1,7 @@
 import { shortNumber } from '../problem';
 import type { Curve, Phase } from '../substance';
 import { STANDARD_PRESSURE_PA } from './constants';
+import { branchCurve } from './branchCurve';
 import { fluidBranch, idealBranch, type FluidBranch } from './fluidBranch';
 import { fluidCurve } from './fluidCurve';
 import { lineMarks, NO_MARKS, solidMarks, unconfirmedMark } from './fluidMarks';
@@ -82,9 +83,7 @@ function along(parts: FluidParts, phase: Phase, branch: FluidBranch, subject: st
   }[phase];
   const doubtful = phase === 'liquid' && numbers.unconfirmed.has('liquid heat capacity');
   const extra = doubtful ? unconfirmedMark('liquid heat capacity') : NO_MARKS;
-  return fluidCurve({
-    from: branch.fromK,
-    to: branch.toK,
+  return branchCurve(branch, {
     subject,
     unit: 'J/(mol K)',
     method: branch.method,
@@ -113,19 +112,19 @@ export function enthalpies(parts: FluidParts, phase: Phase, pressurePa: number):
   const branch = fluidBranch(parts, phase, pressurePa);
   const subject = `enthalpy of ${phase} ${parts.numbers.name} at ${shortNumber(pressurePa)} Pa`;
   const shared = {
-    to: branch.toK,
     subject,
     unit: 'J/mol',
     method: branch.method,
     sources: [...new Set([...sourcesOf(parts, phase), ...parts.numbers.sources.latent])],
   } as const;
-  if (phase !== 'gas')
-    return fluidCurve({ ...shared, from: branch.fromK, value: branch.enthalpy, marksAt: branch.marks });
+  if (phase !== 'gas') return branchCurve(branch, { ...shared, value: branch.enthalpy, marksAt: branch.marks });
   const ideal = idealBranch(parts);
+  const isIdeal = (k: number): boolean => k < branch.stableFromK && k < branch.fromK;
   return fluidCurve({
     ...shared,
     from: ideal.fromK,
-    value: (k) => (k < branch.fromK ? ideal.enthalpy(k) : branch.enthalpy(k)),
-    marksAt: (k) => (k < branch.fromK ? ideal.marks(k) : branch.marks(k)),
+    to: branch.toK,
+    value: (k) => (isIdeal(k) ? ideal.enthalpy(k) : branch.enthalpy(k)),
+    marksAt: (k) => (isIdeal(k) ? ideal.marks(k) : branch.marks(k)),
   });
 }
