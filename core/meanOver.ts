@@ -1,4 +1,5 @@
 import { valueAt, type OutOfRange } from './evaluate';
+import { Problem } from './problem';
 import type { Curve } from './substance';
 
 /** Abscissae and weights of the 10-point Gauss–Legendre rule on [−1, 1], positive half (Abramowitz & Stegun, Table 25.4). */
@@ -34,5 +35,9 @@ export function meanOver(curve: Curve, a: number, b: number, policy: OutOfRange 
       sum += (WEIGHTS[i] as number) * (curve.at(middle - reach) + curve.at(middle + reach));
     }
   }
-  return sum / (2 * panels);
+  const mean = sum / (2 * panels);
+  if (Number.isFinite(mean)) return mean;
+  const received = b > curve.to || b < curve.from ? b : a;
+  const { axis, from, to, subject } = curve;
+  throw new Problem({ code: 'range', argument: 'mean_to', quantity: axis, received, from, to, subject });
 }

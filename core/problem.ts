@@ -24,7 +24,13 @@ export type ProblemData =
       readonly subject: string;
     }
   /** No data, or no such transition. A cell shows `#N/A`. */
-  | { readonly code: 'missing'; readonly subject: string; readonly reason: string };
+  | {
+      readonly code: 'missing';
+      readonly subject: string;
+      readonly reason: string;
+      /** Where, in SI: ends the sentence in the reader's unit. */
+      readonly place?: { readonly quantity: 'temperature' | 'pressure'; readonly value: number };
+    };
 
 /** The one exception class of the core. Anything else that is thrown is a defect. */
 export class Problem extends Error {
@@ -62,9 +68,14 @@ export function plainWords(data: ProblemData, write: QuantityWriter = siWriter):
     }
     case 'range': {
       const w = write[data.quantity];
+      if (data.from === data.to) {
+        return `${data.argument} ${w(data.received)}: ${data.subject} is known at ${w(data.from)} only`;
+      }
       return `${data.argument} ${w(data.received)} is outside [${w(data.from)}, ${w(data.to)}] for ${data.subject}`;
     }
-    case 'missing':
-      return `${data.subject}: ${data.reason}`;
+    case 'missing': {
+      const { place } = data;
+      return `${data.subject}: ${data.reason}${place === undefined ? '' : ` ${write[place.quantity](place.value)}`}`;
+    }
   }
 }

@@ -26,7 +26,7 @@ export function disagreementOf(around: Around, change: Change, fromK: number, to
     );
   }
   const found = need(data, data.heats.get(heatKey(change, kind)), `heat of ${change}`);
-  if (found.single) throw missing(data, `second value of the heat of ${change}, at another temperature,`);
+  if (found.single) throw missing(data, `heat of ${change} at a second temperature`);
   const curve = latentCurve(around, change, kind, 'latent');
   const hotPhase =
     change === 'vaporization' || change === 'sublimation' ? 'gas' : change === 'fusion' ? 'liquid' : 'solid';

@@ -1,3 +1,4 @@
+import { shortNumber } from '../problem';
 import type { Curve, Phase } from '../substance';
 import { missing, need } from './given';
 import { IDEAL_GAS, joined, NO_MARKS } from './marks';
@@ -50,7 +51,7 @@ export function materialEnthalpy(data: MaterialData, ladder: MaterialLadder, pha
     axis: 'temperature',
     from: cp?.fromK ?? fromK,
     to: cp?.toK ?? toK,
-    subject: `enthalpy of ${phaseName(data, phase, form)} at that pressure`,
+    subject: `enthalpy of ${phaseName(data, phase, form)} at ${shortNumber(ladder.pressurePa)} Pa`,
     unit: 'J/mol',
     method: 'heat capacity added up from where enthalpy is zero, with the heats of transition between',
     sources: ladder.sources,

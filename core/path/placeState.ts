@@ -58,6 +58,9 @@ function bareTemperature(substance: Substance, ladder: Ladder, temperatureK: num
   const { index, rung } = rungAt(substance, ladder, temperatureK, policy);
   const near = ladder.gaps.find((gap) => Math.abs(gap.temperatureK - temperatureK) <= NEAR_K);
   const marks: Mark[] = [];
+  if (temperatureK > rung.toK + SAME_K) {
+    marks.push({ code: 'extended', text: `outside the published range of ${rung.phase} ${substance.name}` });
+  }
   if (near !== undefined) {
     const away = `${shortNumber(Math.abs(near.temperatureK - temperatureK))} K from ${near.change}`;
     marks.push({ code: 'near-transition', text: `${away}: taken as ${rung.phase}; name the phase to be sure` });
@@ -131,9 +134,14 @@ function rungAt(
   if (policy === 'extend' && known && temperatureK > last.toK) return { index: ladder.rungs.length - 1, rung: last };
   const lacking = temperatureK < first.fromK ? ladder.missingBelow : ladder.missingAbove;
   if (lacking !== undefined) {
-    const side =
-      temperatureK < first.fromK ? `below ${shortNumber(first.fromK)} K` : `above ${shortNumber(last.toK)} K`;
-    throw new Problem({ code: 'missing', subject: lacking, reason: `not in the catalogue, so no path leads ${side}` });
+    const below = temperatureK < first.fromK;
+    const where = substance.group === 'house' ? 'on the Substances sheet' : 'in the catalogue';
+    throw new Problem({
+      code: 'missing',
+      subject: lacking,
+      reason: `not ${where}, so no path leads ${below ? 'below' : 'above'}`,
+      place: { quantity: 'temperature', value: below ? first.fromK : last.toK },
+    });
   }
   throw new Problem({
     code: 'range',
@@ -158,8 +166,9 @@ function gapOf(substance: Substance, ladder: Ladder, changes: readonly string[])
   const there = ladder.gaps.map((g) => g.change).join(', ');
   throw new Problem({
     code: 'missing',
-    subject: `${changes.join(' or ')} of ${substance.name} at ${shortNumber(ladder.pressurePa)} Pa`,
-    reason: there === '' ? 'no transition at this pressure' : `only ${there} at this pressure`,
+    subject: `${changes.join(' or ')} of ${substance.name}`,
+    reason: there === '' ? 'no transition is known at' : `only ${there} at`,
+    place: { quantity: 'pressure', value: ladder.pressurePa },
   });
 }
 

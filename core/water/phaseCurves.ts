@@ -1,4 +1,4 @@
-import { Problem } from '../problem';
+import { Problem, shortNumber } from '../problem';
 import type { Curve, Phase } from '../substance';
 import { NEAR_CRITICAL } from './coexistenceCurves';
 import { sublimationAt } from './iceEquilibriumLines';
@@ -83,7 +83,7 @@ export function heatCapacityCurve(phase: Phase, at: number | 'saturated' | 'stan
 function atPressure(phase: Phase, pressurePa: number): Curve {
   return branchCurve(
     phaseBranch(phase, pressurePa),
-    `heat capacity of ${NAMES[phase]} at that pressure`,
+    `heat capacity of ${NAMES[phase]} at ${shortNumber(pressurePa)} Pa`,
     'heatCapacity',
   );
 }
@@ -128,7 +128,7 @@ function requireNumber(pressurePa: number): void {
 export function enthalpyCurve(phase: Phase, pressurePa: number): Curve {
   requireNumber(pressurePa);
   const branch = phaseBranch(phase, pressurePa);
-  const curve = branchCurve(branch, `enthalpy of ${NAMES[phase]} at that pressure`, 'enthalpy');
+  const curve = branchCurve(branch, `enthalpy of ${NAMES[phase]} at ${shortNumber(pressurePa)} Pa`, 'enthalpy');
   if (phase !== 'gas' || pressurePa >= CRITICAL_PRESSURE_PA) return curve;
   const condensesAt = dewOrFrostTemperature(pressurePa);
   const ideal = branchCurve(idealGasBranch, curve.subject, 'enthalpy');

@@ -1,4 +1,4 @@
-import { Problem } from '../problem';
+import { Problem, shortNumber } from '../problem';
 import type { Gap, Ladder, Rung } from '../substance';
 import { boilingTemperature, meltingTemperature } from './boundaries';
 import { fluidStateAt, type FluidPhase } from './fluidDensity';
@@ -47,7 +47,7 @@ function fluidRung(pressurePa: number, phase: FluidPhase | 'supercritical', from
         received: t,
         from: fromK,
         to: toK,
-        subject: `${phase} water at that pressure`,
+        subject: `${phase} water at ${shortNumber(pressurePa)} Pa`,
       });
     },
   };

@@ -51,7 +51,7 @@ export function storageMaterial(record: StorageRecord): Substance {
     transitions: new Map([['fusion', { temperatureK: melts, pressurePa: 101325 }]]),
     heatCapacities,
     pressures: new Map(),
-    lack: (piece) => `the catalogue has no ${piece} for this storage material`,
+    lack: () => 'not in the catalogue',
   });
 }
 

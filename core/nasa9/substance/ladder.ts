@@ -2,7 +2,7 @@ import { Problem } from '../../problem';
 import type { Gap, Ladder, Rung } from '../../substance';
 import { nasa9Enthalpy } from '../nasa9Enthalpy';
 import type { CondensedForm } from './forms';
-import { checkPressure, HIGHEST_PRESSURE_PA, vapourWords, type CondensedModel } from './model';
+import { checkPressure, HIGHEST_PRESSURE_PA, type CondensedModel } from './model';
 import { vapourBoundary } from './vapourBoundary';
 
 /** Every phase, form and transition met at one pressure, from cold to hot. */
@@ -45,7 +45,10 @@ function aboveWords(model: CondensedModel, pressurePa: number): string {
   const { record, overLiquid, overSolid } = model;
   const line = overLiquid ?? overSolid;
   if (line !== undefined && pressurePa > line.toPa) return `vapour of ${record.name} above ${Math.round(line.toPa)} Pa`;
-  return `vapour of ${record.name}: ${vapourWords(record)}`;
+  const why = record.vapour?.lacking ?? record.end?.why;
+  // what is lacking stands in front of a colon, so that a remark from memory is one in brackets
+  const remark = why === undefined ? '' : ` (${why.replace(' (from memory)', ', from memory')})`;
+  return `vapour of ${record.name}${remark}`;
 }
 
 function condensedRung({ phase, form, species, fromK }: CondensedForm, toK: number): Rung {
