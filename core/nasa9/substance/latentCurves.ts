@@ -1,10 +1,12 @@
 import type { LatentKind, Mark } from '../../answer';
+import { shortNumber } from '../../problem';
 import type { Change, Curve } from '../../substance';
 import { nasa9Cp } from '../nasa9Cp';
 import { nasa9Enthalpy } from '../nasa9Enthalpy';
 import { nasa9Gibbs } from '../nasa9Gibbs';
 import { NASA9_R } from '../nasa9Source';
 import { emptyNasa9State, nasa9State } from '../nasa9State';
+import { speciesLabel } from '../speciesWords';
 import type { CondensedForm } from './forms';
 import { IDEAL_GAS, METASTABLE } from './marks';
 import { checkPressure, missing, noLine, noSuchChange, noVapour, solidAt, type CondensedModel } from './model';
@@ -124,7 +126,7 @@ function standardCurve(model: CondensedModel, change: Change, asked: Asked): Cur
     subject: `${change} of ${record.name} to ideal gas`,
     unit: asked === 'latent' ? 'J/mol' : 'J/(mol K)',
     kind: 'standard',
-    method: `${DIFFERENCE}; gas: ideal ${gas.name} at 1 bar${part === undefined ? '' : `; ${BOILING_WORDS}`}`,
+    method: `${DIFFERENCE}; gas: ideal gas of ${speciesLabel(gas)} at 1 bar${part === undefined ? '' : `; ${BOILING_WORDS}`}`,
     sources: model.sources,
     at,
     ...(part === undefined ? {} : { uncertaintyAt: (t: number) => part * at(t) }),
@@ -183,7 +185,7 @@ function atPressure(model: CondensedModel, change: Change, asked: Asked, pressur
     axis: 'temperature',
     from: line.fromK,
     to: line.toK,
-    subject: `${change} of ${record.name} at that pressure`,
+    subject: `${change} of ${record.name} at ${shortNumber(pressurePa)} Pa`,
     unit: asked === 'latent' ? 'J/mol' : 'J/(mol K)',
     kind: 'isobaric',
     method: 'enthalpy of the ideal-gas vapour, its species in equilibrium, less that of the condensed phase',

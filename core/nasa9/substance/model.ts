@@ -1,6 +1,7 @@
 import { Problem } from '../../problem';
 import type { Change } from '../../substance';
 import { NASA9_SOURCE } from '../nasa9Source';
+import { speciesSource } from '../speciesWords';
 import type { Nasa9Species } from '../nasa9Types';
 import { formsOf, METASTABLE_PART, type CondensedForm } from './forms';
 import type { CondensedRecord } from './record';
@@ -38,7 +39,7 @@ export function makeModel(record: CondensedRecord): CondensedModel {
     ...(liquid === undefined ? {} : { liquid }),
     ...(liquid === undefined || solids.length === 0 ? {} : { meltingK: liquid.fromK }),
     ...(vapour === undefined ? {} : { vapour }),
-    sources: [NASA9_SOURCE, ...species.map(({ name, comment }) => `${name}: ${comment}`)],
+    sources: [NASA9_SOURCE, ...species.map(speciesSource)],
   };
   if (vapour === undefined || record.vapour === undefined || record.vapour.lacking !== undefined) return model;
   const highestPa = record.vapour.highestPa;

@@ -1,10 +1,12 @@
 import type { Mark } from '../../answer';
 import { refused } from '../../catalogue/refused';
+import { shortNumber } from '../../problem';
 import type { Curve, Phase } from '../../substance';
 import { nasa9Cp } from '../nasa9Cp';
 import { nasa9Enthalpy } from '../nasa9Enthalpy';
 import { nasa9Gibbs } from '../nasa9Gibbs';
 import type { Nasa9Species } from '../nasa9Types';
+import { speciesLabel } from '../speciesWords';
 import type { CondensedForm } from './forms';
 import { IDEAL_GAS, METASTABLE } from './marks';
 import { checkPressure, missing, noVapour, solidAt, stableSpecies, type CondensedModel } from './model';
@@ -91,7 +93,7 @@ function gasHeatCapacity(model: CondensedModel, at: number | 'saturated' | 'stan
     subject: `heat capacity of ${record.name} as ideal gas`,
     unit: 'J/(mol K)',
     kind: 'standard',
-    method: `ideal ${gas.name} at 1 bar, nine-coefficient polynomials${units === 1 ? '' : `, per mole of ${record.formula}`}`,
+    method: `ideal gas of ${speciesLabel(gas)} at 1 bar, nine-coefficient polynomials${units === 1 ? '' : `, per mole of ${record.formula}`}`,
     sources: model.sources,
     at: (t) => nasa9Cp(gas, t) / units,
   };
@@ -109,7 +111,7 @@ function gasAt(model: CondensedModel, asked: Asked, pressurePa: number): Curve {
     axis: 'temperature',
     from: vapour.fromK,
     to: vapour.toK,
-    subject: `${WORDS[asked]} of vapour of ${record.name} at that pressure`,
+    subject: `${WORDS[asked]} of vapour of ${record.name} at ${shortNumber(pressurePa)} Pa`,
     unit: asked === 'enthalpy' ? 'J/mol' : 'J/(mol K)',
     method: gasMethod(model),
     sources: model.sources,
@@ -138,7 +140,7 @@ function saturatedGas(model: CondensedModel): Curve {
 }
 
 function gasMethod({ vapour }: CondensedModel): string {
-  const names = vapour?.species.map(({ name }) => name) ?? [];
+  const names = vapour?.species.map(speciesLabel) ?? [];
   return names.length === 1
     ? `ideal gas of ${names.join()}`
     : `ideal gas of ${names.join(', ')} in equilibrium, what their reactions take up included`;
