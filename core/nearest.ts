@@ -4,16 +4,17 @@
  *
  * @param word what was written
  * @param candidates what would have been accepted
- * @returns the first candidate with the smallest distance, or `undefined` where more than a third of the word
- * (at least one letter) would have to change
+ * @param part the part of the word that may change
+ * @returns the first candidate with the smallest distance, or `undefined` where more than this part of the
+ * word (at least one letter) would have to change
  * @source optimal string alignment distance: F. J. Damerau, Communications of the ACM 7 (1964) 171
  * @example
  * nearest('tempreature', ['temperature', 'pressure']) // => 'temperature'
  */
-export function nearest(word: string, candidates: readonly string[]): string | undefined {
+export function nearest(word: string, candidates: readonly string[], part = 1 / 3): string | undefined {
   const written = word.trim().toLowerCase();
   let best: string | undefined;
-  let least = Math.max(1, Math.floor(written.length / 3)) + 1;
+  let least = Math.max(1, Math.floor(written.length * part)) + 1;
   for (const candidate of candidates) {
     if (Math.abs(candidate.length - written.length) >= least) continue;
     const slips = slipsBetween(written, candidate.toLowerCase());

@@ -25,9 +25,12 @@ export interface FoundChange {
 const CHANGE_WORDS: Readonly<Record<string, readonly [string, 1 | -1]>> = {
   vaporization: ['vaporization', 1],
   vaporisation: ['vaporization', 1],
+  vapourization: ['vaporization', 1],
+  vapourisation: ['vaporization', 1],
   evaporation: ['vaporization', 1],
   boiling: ['vaporization', 1],
   condensation: ['vaporization', -1],
+  condensing: ['vaporization', -1],
   fusion: ['fusion', 1],
   melting: ['fusion', 1],
   freezing: ['fusion', -1],
@@ -57,13 +60,14 @@ export const changeWords: readonly string[] = [
  * unknown word
  */
 export function findChange(substance: Substance, text: string): FoundChange {
-  const plain = plainName(text);
+  const asked = hyphened(text);
+  const plain = plainName(asked);
   const word = CHANGE_WORDS[plain];
   const { changes } = substance;
   // with its hyphen first: II-I and I-II differ by nothing else
-  const exact = changes.find((change) => plainParts(change) === plainParts(text));
+  const exact = changes.find((change) => plainParts(change) === plainParts(asked));
   if (exact !== undefined) return { change: exact, sign: 1 };
-  const turned = changes.find((change) => plainParts(reversed(change)) === plainParts(text));
+  const turned = changes.find((change) => plainParts(reversed(change)) === plainParts(asked));
   if (turned !== undefined) return { change: turned, sign: -1 };
   const named = changes.find((change) => plainName(change) === (word?.[0] ?? plain) && !eitherWay(change));
   if (named !== undefined) return { change: named, sign: word?.[1] ?? 1 };
@@ -87,6 +91,13 @@ export function findChange(substance: Substance, text: string): FoundChange {
     });
   }
   throw refused('change', text, substance.changes, [...substance.changes, ...Object.keys(CHANGE_WORDS)]);
+}
+
+const GREEK: Readonly<Record<string, string>> = { α: 'alpha', β: 'beta', γ: 'gamma', δ: 'delta' };
+
+/** A solid-solid change with Greek letters, an arrow or "to" between its forms, as its name has them: `alpha-gamma`. */
+function hyphened(text: string): string {
+  return text.replace(/[α-δ]/g, (letter) => GREEK[letter] ?? letter).replace(/\s*(?:→|->|[–—−]|\sto\s)\s*/g, '-');
 }
 
 function reversed(change: Change): string {

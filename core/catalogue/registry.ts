@@ -69,13 +69,20 @@ function index(entries: readonly CatalogueEntry[]): Map<string, CatalogueEntry[]
   return byWord;
 }
 
+/** Substances are often a few letters apart: helium is not kalium, nor propylene a xylene. */
+const SLIP_PART = 1 / 4;
+
+/** Between two letters a slip is as likely as another element. */
+const SHORTEST = 3;
+
 /** How many names a message lists before it says how many more there are. */
 const LISTED = 6;
 
 function unknown(text: string, entries: readonly CatalogueEntry[], words: readonly string[]): Problem {
   const names = entries.map(({ name }) => name);
   const more = names.length > LISTED ? ` and ${names.length - LISTED} more (the pane lists them)` : '';
-  const close = nearest(plainName(text), words);
+  const plain = plainName(text);
+  const close = plain.length < SHORTEST ? undefined : nearest(plain, words, SLIP_PART);
   const meant = close === undefined ? undefined : nameOfWord(close, entries);
   return refused(
     'substance',

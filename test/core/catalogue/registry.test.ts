@@ -56,10 +56,38 @@ describe('the catalogue by its names', () => {
     const wrong = entries
       .flatMap((entry) => wordsOf(entry).filter((word) => meantBy(word).length === 1))
       .filter((word) => {
-        const spelt = word.toUpperCase().replace(/[ -]/g, '_');
+        // the one formula that its case tells from another's
+        const spelt = word === 'Co' ? word : word.toUpperCase().replace(/[ -]/g, '_');
         return catalogue.entry(spelt)?.name !== catalogue.entry(word)?.name;
       });
     expect(wrong).toEqual([]);
+  });
+
+  it('takes carbon monoxide for no cobalt', () => {
+    expect(catalogue.entry('Co')?.name).toBe('cobalt');
+    expect([catalogue.entry('CO'), catalogue.entry('co')]).toEqual([undefined, undefined]);
+    expect(catalogue.entry('CO2')?.name).toBe('carbon dioxide');
+  });
+
+  it('answers to figures below the line, any dot of crystal water, and dashes of print', () => {
+    const found = ['Na₂SO₄', 'Na2SO4·10H2O', 'Na₂SO₄•10H₂O', 'MgCl2∙6H2O', 'R‑717', 'n–hexane'].map(
+      (word) => catalogue.entry(word)?.name,
+    );
+    const hydrate = 'sodium sulfate decahydrate';
+    const chloride = 'magnesium chloride hexahydrate';
+    expect(found).toEqual(['sodium sulfate', hydrate, hydrate, chloride, 'ammonia', 'n-hexane']);
+  });
+
+  it('calls no other substance near that only its letters bring close', () => {
+    for (const word of ['helium', 'propylene', 'propylene glycol', 'nitric acid', 'isohexane', 'NO', 'HF']) {
+      const problem = ask(() => catalogue.find(word));
+      expect(problem instanceof Problem ? Object.keys(problem.data) : [problem.name], word).toEqual([
+        'code',
+        'argument',
+        'allowed',
+        'received',
+      ]);
+    }
   });
 
   it('a name with one letter left out is refused with that name, or with one as near', () => {
