@@ -19,6 +19,7 @@ const EXPECTED = 'numbers parted by semicolons or blanks, as 2.35; 0.0041';
  */
 export function cellNumbers(cell: unknown, decimal: Decimal): CellNumber[] {
   if (typeof cell === 'number') return [{ value: cell, unit: '' }];
+  if (typeof cell === 'boolean') throw refused(String(cell), EXPECTED);
   const text = typeof cell === 'string' ? cell.trim() : '';
   if (text === '') throw refused('nothing', EXPECTED);
   const parted = /[;\n]/.test(text) ? text.split(/[;\n]/) : joinedUnits(text.split(/\s+/));

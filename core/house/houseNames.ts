@@ -80,14 +80,30 @@ export function houseNames(
       return { all, free };
     };
     const [formula, cas, synonyms] = [wordsOf('formula'), wordsOf('CAS'), wordsOf('synonym')];
+    const inherited = replaces ? otherWords(name, builtIn) : [];
     return {
       gathered: one,
-      words: { name, formula: formula.free[0] ?? '', cas: cas.free[0] ?? '', synonyms: synonyms.free },
+      words: {
+        name,
+        formula: formula.free[0] ?? '',
+        cas: cas.free[0] ?? '',
+        synonyms: [...synonyms.free, ...inherited],
+      },
       said: { formula: formula.all[0] ?? '', cas: cas.all[0] ?? '', synonyms: synonyms.all },
       replaces,
       reachable,
     };
   });
+}
+
+/** What else leads to a built-in substance and to no other: its formula, number and synonyms go with its name. */
+function otherWords(name: string, builtIn: readonly CatalogueEntry[]): string[] {
+  const plain = plainName(name);
+  const words = ({ formula, cas, synonyms }: CatalogueEntry): string[] => [formula, cas, ...synonyms];
+  const replaced = builtIn.find((entry) => plainName(entry.name) === plain);
+  if (replaced === undefined) return [];
+  const others = new Set(builtIn.flatMap((e) => (e === replaced ? [] : [e.name, ...words(e)].map(plainName))));
+  return words(replaced).filter((word) => plainName(word) !== '' && !others.has(plainName(word)));
 }
 
 function readReplaces(

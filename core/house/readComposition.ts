@@ -22,7 +22,7 @@ const OTHER_WORDS: Readonly<Record<string, CompositionPart>> = {
  * and a sum that is not 1
  */
 export function readComposition(text: string, decimal: Decimal): Composition {
-  const parts = text.split(/[;\n]/).filter((part) => part.trim() !== '');
+  const parts = text.split(/[;\n]|,(?=\s*[a-z])/i).filter((part) => part.trim() !== '');
   if (parts.length === 0) throw refused('nothing', 'mass fractions, as water 0.6; carbohydrate 0.3; ash 0.1');
   const found: Partial<Record<CompositionPart, number>> = {};
   let sum = 0;

@@ -1,5 +1,6 @@
 import { COMPOSITION_SOURCE, PARTS, type CompositionPart } from '../estimate/compositionConstants';
 import { COMPOSITION_PARTS, type Composition } from '../estimate/compositionHeatCapacity';
+import { shortNumber } from '../problem';
 import { composedCapacity } from './composedCapacity';
 import type { HeatCapacityData } from './materialData';
 import { readComposition } from './readComposition';
@@ -18,7 +19,25 @@ export function readHeatCapacity(reader: RowReader): HeatCapacityData {
   const read = word === 'table' ? readTable(reader, scale, temperature) : readPolynomial(reader, scale, temperature);
   const piece = reader.bounded(read, reader.limits());
   reader.checkEnds(piece, (cp) => cp > 0, 'a heat capacity above 0 over its range');
+  warnOfUnusual(reader, piece);
   return piece;
+}
+
+/** J/(kg K): from the heaviest metals to hydrogen, away from absolute zero (common practice, no source). */
+const USUAL = [100, 20_000] as const;
+const COLD_K = 100;
+
+/** A slip of a thousand in the unit is no heat capacity that any material has. */
+function warnOfUnusual(reader: RowReader, { shape, fromK, toK }: HeatCapacityData): void {
+  const molarMass = reader.beside.molarMass();
+  const kilograms = Number.isNaN(molarMass) ? 1 : molarMass;
+  for (const t of [fromK, toK]) {
+    const cp = shape.at(t) / kilograms;
+    if (t < COLD_K || (cp >= USUAL[0] && cp <= USUAL[1])) continue;
+    const usual = `[${USUAL[0] / 1000}, ${USUAL[1] / 1000}] kJ/(kg K)`;
+    reader.beside.warn('unit', `${shortNumber(cp / 1000)} kJ/(kg K) at ${shortNumber(t)} K is unusual; usual ${usual}`);
+    return;
+  }
 }
 
 /** A heat capacity from the composition; without a range of its own it holds where the equations do. */

@@ -269,6 +269,21 @@ describe('names', () => {
     expect(registry.find('water').group).toBe('fluid');
   });
 
+  it('that replace a built-in one answer to its formula, number and synonyms too, but for those it shares', () => {
+    const registry = houseRegistry(entries, houseOf([own('water'), text('replaces built-in', 'yes', 'water')]));
+    for (const word of ['H2O', 'steam', '7732-18-5']) expect(registry.find(word).group, word).toBe('house');
+    const xylene = houseRegistry(entries, houseOf([own('o-xylene'), text('replaces built-in', 'yes', 'o-xylene')]));
+    expect(xylene.find('1,2-xylene').group).toBe('house');
+    expect(xylene.entry('C8H10')).toBeUndefined();
+  });
+
+  it('may be carbon monoxide, which is no cobalt', () => {
+    const house = houseOf([own('carbon monoxide'), text('formula', 'CO', 'carbon monoxide')]);
+    expect(house.faults).toEqual([]);
+    const registry = houseRegistry(entries, house);
+    expect([registry.find('CO').name, registry.find('Co').name]).toEqual(['carbon monoxide', 'cobalt']);
+  });
+
   it('do not win where the row says no, and anything else is refused', () => {
     expect(houseOf([own('ethanol'), text('replaces built-in', 'no', 'ethanol')]).replacing).toEqual([]);
     expect(houseOf([own('wash'), text('replaces built-in', true)]).faults[0]).toMatchObject({ severity: 'warning' });
@@ -334,5 +349,41 @@ describe('compositions', () => {
     expect(u / curve.at(313.15)).toBeGreaterThan(0.015);
     expect(u / curve.at(313.15)).toBeLessThan(0.03);
     expect(curve.marksAt?.(313.15)).toEqual([{ code: 'unconfirmed', text: 'coefficients of fibre are from memory' }]);
+  });
+});
+
+describe('what a slip makes of a row', () => {
+  it('a thousandfold heat capacity is warned of, with what is usual', () => {
+    const { faults } = houseOf([row('liquid heat capacity', '', 4100, 'kJ/(kg K)', 0, 100)]);
+    expect(faults.map(({ severity, message }) => [severity, message])).toEqual([
+      [
+        'warning',
+        'Substances row 5 (wash, liquid heat capacity), unit: 4100 kJ/(kg K) at 273.15 K is unusual; usual [0.1, 20] kJ/(kg K)',
+      ],
+    ]);
+    // Mercury, hydrogen and a metal near absolute zero are real.
+    const fine = [
+      row('liquid heat capacity', '', 0.14, 'kJ/(kg K)', 0, 100),
+      row('gas heat capacity', '', 14.3, 'kJ/(kg K)', 0, 100),
+      row('solid heat capacity', '', 0.01, 'kJ/(kg K)', '10 K', '20 K'),
+    ];
+    expect(houseOf(fine).faults).toEqual([]);
+  });
+
+  it('a truth value is shown as received, not as nothing', () => {
+    const [message] = errors([row('liquid heat capacity', '', true as unknown as string, 'kJ/(kg K)', 0, 100)]);
+    expect(message).toMatch(/; received true$/);
+  });
+
+  it('commas part the constituents of a composition', () => {
+    const text = (words: string): Row => row('composition', '', words);
+    const [semicolons, commas] = ['water 0.8; fat 0.2', 'water: 0.8, fat: 0.2'].map((words) =>
+      substanceOf([text(words)])
+        .heatCapacity('liquid', 101325)
+        .at(320),
+    );
+    expect(commas).toBe(semicolons);
+    const decimal = houseOf([text('water 0,8, fat 0,2')], ',');
+    expect(decimal.faults).toEqual([]);
   });
 });
