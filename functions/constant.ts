@@ -32,6 +32,7 @@ function plan(keys: readonly Key[], settings: Settings): Plan {
   return {
     compute: () => datum.value * scale + offset,
     record: () => recordOf(datum),
+    rangeWords: 'no range: one value',
     toCell: (si) => si * scale + offset,
     toCellDifference: (si) => si * scale,
   };
@@ -52,7 +53,7 @@ function recordOf(datum: Datum): Answer {
     method: 'published constant',
     sources: [datum.source],
     range: { axis: 'temperature', from: datum.value, to: datum.value },
-    marks: datum.confirmed ? [] : [{ code: 'unconfirmed', text: 'only one source stands behind this number' }],
+    marks: datum.confirmed ? [] : [{ code: 'unconfirmed', text: 'no second source confirms this number' }],
   };
 }
 

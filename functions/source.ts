@@ -2,6 +2,8 @@ import type { Datum } from '../core/answer';
 import { findChange, findPhaseOf, plainName } from '../core/catalogue/find';
 import { Problem, shortNumber } from '../core/problem';
 import type { Curve, Substance } from '../core/substance';
+import { differenceUnit } from '../core/units/differenceUnit';
+import { fromMolar } from '../core/units/fromMolar';
 import { answer } from './edge/answer';
 import { writerFor } from './edge/cellError';
 import { constantOf, noSuchItem } from './edge/constantOf';
@@ -34,10 +36,13 @@ function sourceWords(substance: Substance, item: string, settings: Settings): st
   const change = changeOf(substance, item);
   if (change !== undefined) {
     const curve = substance.latent(change, kindOption(settings, substance.defaultKind(change)));
-    return [curveWords(curve, substance.transitionTemperature(change), settings), ...notesOf(substance)].join('; ');
+    return [
+      curveWords(curve, substance, settings, substance.transitionTemperature(change)),
+      ...notesOf(substance),
+    ].join('; ');
   }
   const curve = propertyOf(substance, item, settings);
-  if (curve !== undefined) return curveWords(curve, undefined, settings);
+  if (curve !== undefined) return curveWords(curve, substance, settings);
   throw noSuchItem(substance, item, itemsOf(substance, settings));
 }
 
@@ -55,7 +60,7 @@ function datumWords({ source, uncertainty, unit, confirmed }: Datum): string {
 }
 
 /** Judged at the transition itself where the change has one, else in the middle of the range. */
-function curveWords(curve: Curve, transition: number | undefined, settings: Settings): string {
+function curveWords(curve: Curve, substance: Substance, settings: Settings, transition?: number): string {
   const write = writerFor(settings)[curve.axis];
   const { from, to } = curve;
   const place = transition !== undefined && transition >= from && transition <= to ? transition : (from + to) / 2;
@@ -67,9 +72,20 @@ function curveWords(curve: Curve, transition: number | undefined, settings: Sett
     from === to ? `valid at ${write(from)} only` : `valid from ${write(from)} to ${write(to)}`,
     u === undefined
       ? 'no stated uncertainty'
-      : `standard uncertainty ${shortNumber(u)} ${curve.unit} (k = 1) at ${write(place)}`,
+      : `standard uncertainty ${spreadWords(curve, u, substance, settings)} (k = 1) at ${write(place)}`,
     unconfirmed.length === 0 ? 'confirmed' : unconfirmed.map(({ text }) => `unconfirmed: ${text}`).join('; '),
   ].join('; ');
+}
+
+/** An uncertainty in the workbook's unit; a workbook in moles has none for a material without a molar mass. */
+function spreadWords({ unit }: Curve, u: number, { molarMass }: Substance, { units }: Settings): string {
+  const perAmount = unit === 'Pa' || unit === 'K' ? undefined : /K\)$/.test(unit) ? units.heatCapacity : units.heat;
+  if (perAmount === undefined) {
+    const own = unit === 'K' ? differenceUnit(units.temperature) : units.pressure;
+    return `${shortNumber(u / own.factor)} ${own.symbol.replace(/ gauge$/, '')}`;
+  }
+  if (!(molarMass > 0) && perAmount.basis === 'mole') return `${shortNumber(u)} ${unit}`;
+  return `${shortNumber(u * fromMolar(perAmount, molarMass).scale)} ${perAmount.symbol}`;
 }
 
 /** A change by any of its words; `undefined` for a word that is none, so that it may still be a property. */

@@ -43,9 +43,10 @@ export function noSuchItem(substance: Substance, item: string, allowed: readonly
   const words = [plainName(item), itemWords(item)];
   const known = KNOWN.find((name) => words.includes(plainName(name)));
   if (known === undefined) return refused('item', item, allowed, [...allowed, ...KNOWN]);
+  const where = substance.group === 'house' ? 'not on the Substances sheet' : 'not in the catalogue';
   return new Problem({
     code: 'missing',
     subject: `${known} of ${substance.name}`,
-    reason: `not in the catalogue; it has ${allowed.join(', ')}`,
+    reason: `${where}${allowed.length === 0 ? '' : `; it has ${allowed.join(', ')}`}`,
   });
 }

@@ -79,6 +79,7 @@ function partOf(answer: Answer, part: AnswerPart, plan: Plan, settings: Settings
     case 'source':
       return answer.sources.join('; ');
     case 'range': {
+      if (plan.rangeWords !== undefined) return plan.rangeWords;
       const write = writerFor(settings)[answer.range.axis];
       return `[${write(answer.range.from)}, ${write(answer.range.to)}]`;
     }

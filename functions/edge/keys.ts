@@ -71,7 +71,7 @@ export function pressureOption(settings: Settings, kind: LatentKind): number | u
       received: `kind=${kind}`,
     });
   }
-  return parseQuantity(text, 'pressure', settings).si;
+  return parseQuantity(text, 'pressure', settings, 'at_pressure').si;
 }
 
 const SURFACES = ['stable', 'ice', 'solid', 'liquid'] as const;

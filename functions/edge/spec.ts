@@ -27,6 +27,8 @@ export interface Plan {
   readonly record?: (a: number, b: number, c: number, d: number) => Answer;
   /** Turns an SI value of the record into the workbook's unit. */
   readonly toCell?: (si: number) => number;
+  /** What `answer=range` says of a value that belongs to no range. */
+  readonly rangeWords?: string;
   /** Turns an SI standard uncertainty into the workbook's unit. */
   readonly toCellDifference?: (si: number) => number;
 }

@@ -56,6 +56,8 @@ function temperatureState(argument: string, text: string, settings: Settings): S
   const match = /^(.*?)[\s,]+([a-z]+)$/i.exec(text.trim());
   const phase = match === null ? undefined : phaseOf(match[2] ?? '');
   const quantity = phase === undefined ? text : (match?.[1] ?? '');
+  // words where a number should stand are no slip in a unit: the whole list of states helps more
+  if (!/^[-+−.,]?\s*\d/.test(quantity.trim())) throw refused(argument, `"${text}"`);
   const temperatureK = parseQuantity(quantity, 'temperature', settings, argument).si;
   return phase === undefined ? { form: 'temperature', temperatureK } : { form: 'temperature', temperatureK, phase };
 }

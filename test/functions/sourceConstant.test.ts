@@ -69,7 +69,7 @@ describe('SOURCE', () => {
     );
     expect(sourceOf('water', 'saturation temperature', ['pressure=bar'])).toMatch(/valid from .* bar to 220\.64 bar/);
     expect(sourceOf('erythritol', 'fusion')).toMatch(
-      /valid at 117\.7 degC only; standard uncertainty [\d.]+ J\/mol \(k = 1\) at 117\.7 degC; unconfirmed: from memory/,
+      /valid at 117\.7 degC only; standard uncertainty 16\.99 kJ\/kg \(k = 1\) at 117\.7 degC; unconfirmed: from memory/,
     );
   });
 
