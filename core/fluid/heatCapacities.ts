@@ -107,6 +107,17 @@ function sourcesOf({ numbers }: FluidParts, phase: Phase): readonly string[] {
   return phase === 'liquid' ? numbers.sources.heatCapacity : numbers.sources.gas;
 }
 
+const listed = new WeakMap<FluidParts, Map<Phase, readonly string[]>>();
+
+/** The same list at each call: rows with a pressure each ask for it again. */
+function enthalpySources(parts: FluidParts, phase: Phase): readonly string[] {
+  const own = listed.get(parts) ?? new Map<Phase, readonly string[]>();
+  listed.set(parts, own);
+  const known = own.get(phase) ?? [...new Set([...sourcesOf(parts, phase), ...parts.numbers.sources.latent])];
+  own.set(phase, known);
+  return known;
+}
+
 /** Enthalpy of a phase at a pressure, metastable continuations included; vapour below where it is followed is ideal. */
 export function enthalpies(parts: FluidParts, phase: Phase, pressurePa: number): Curve {
   const branch = fluidBranch(parts, phase, pressurePa);
@@ -115,7 +126,7 @@ export function enthalpies(parts: FluidParts, phase: Phase, pressurePa: number):
     subject,
     unit: 'J/mol',
     method: branch.method,
-    sources: [...new Set([...sourcesOf(parts, phase), ...parts.numbers.sources.latent])],
+    sources: enthalpySources(parts, phase),
   } as const;
   if (phase !== 'gas') return branchCurve(branch, { ...shared, value: branch.enthalpy, marksAt: branch.marks });
   const ideal = idealBranch(parts);
