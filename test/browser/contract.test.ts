@@ -36,6 +36,7 @@ beforeAll(async () => {
   });
   await page.goto('http://host.test/');
   await page.evaluate(() => {
+    Latentry.house.publish({ state: 'absent' });
     Latentry.settings.publish({ state: 'absent' });
   });
 });
@@ -79,8 +80,18 @@ async function call(id: string, ...args: unknown[]): Promise<Outcome> {
 const ANSWERING: Readonly<Record<string, readonly unknown[]>> = {
   CONSTANT: [[['water']], [['molar mass']]],
   DELTACP: [[['water']], [['vaporization']], [[25]]],
+  DISAGREEMENT: [[['ethanol']], [['vaporization']], [[25]], [[70]]],
   EDITION: [],
   ENTHALPY: [[['water']], [[25]]],
+  ESTIMATE: [
+    [['riedel']],
+    [
+      ['boiling temperature', 80],
+      ['critical temperature', 289],
+      ['critical pressure', '48.95 bar'],
+      ['molar mass', 78],
+    ],
+  ],
   FITDELTACP: [
     [[0], [20], [40], [60]],
     [[2500], [2453], [2406], [2358]],
