@@ -73,6 +73,8 @@ export function findChange(substance: Substance, text: string): FoundChange {
   if (named !== undefined) return { change: named, sign: word?.[1] ?? 1 };
   const back = changes.find((change) => plainName(reversed(change)) === plain && !eitherWay(change));
   if (back !== undefined) return { change: back, sign: -1 };
+  const begun = changes.filter((change) => begins(change, asked));
+  if (begun.length === 1 && begun[0] !== undefined) return { change: begun[0], sign: 1 };
   const lambda = substance.lambdaPoints?.find(({ name }) => plainName(name) === plain);
   if (lambda !== undefined) {
     throw new Problem({
@@ -98,6 +100,17 @@ const GREEK: Readonly<Record<string, string>> = { α: 'alpha', β: 'beta', γ: '
 /** A solid-solid change with Greek letters, an arrow or "to" between its forms, as its name has them: `alpha-gamma`. */
 function hyphened(text: string): string {
   return text.replace(/[α-δ]/g, (letter) => GREEK[letter] ?? letter).replace(/\s*(?:→|->|[–—−]|\sto\s)\s*/g, '-');
+}
+
+/** True where both forms begin as written: `alpha-beta` for `alpha quartz-beta quartz`. A numeral is no beginning. */
+function begins(change: Change, asked: string): boolean {
+  const forms = change.split('-').map(plainName);
+  const parts = asked.split('-').map(plainName);
+  return (
+    forms.length === 2 &&
+    parts.length === 2 &&
+    forms.every((form, i) => (parts[i] ?? '').length > 3 && form.startsWith(parts[i] ?? ''))
+  );
 }
 
 function reversed(change: Change): string {

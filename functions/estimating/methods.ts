@@ -153,12 +153,13 @@ export function estimateBy(method: string, inputs: Inputs, settings: Settings): 
   if (found === undefined) {
     throw refused('method', method, methodNames, [...methodNames, ...METHODS.flatMap(({ words }) => words)]);
   }
-  if (!found.needs.every((label) => inputs.has(label))) {
+  const lacking = found.needs.filter((label) => !inputs.has(label));
+  if (lacking.length > 0) {
     throw new Problem({
       code: 'argument',
       argument: `inputs of ${found.words[0]}`,
       allowed: `${found.needs.join(', ')}, or a substance that has them`,
-      received: inputs.received.length === 0 ? 'nothing' : inputs.received.join(', '),
+      received: `${inputs.received.length === 0 ? 'nothing' : inputs.received.join(', ')}, without ${lacking.join(', ')}`,
     });
   }
   return found.run(inputs, settings);

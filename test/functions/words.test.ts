@@ -93,6 +93,11 @@ describe('changes in words', () => {
     expect(cell(latent, ['iron', 'γ→α'])).toBe(-value);
   });
 
+  it('may leave out what both forms of quartz have in common, but no part of a numeral', () => {
+    expect(cell(latent, ['quartz', 'alpha-beta'])).toBe(cell(latent, ['quartz', 'alpha quartz-beta quartz']));
+    expect(fault(latent, ['potassium sulfate', 'I-I'])).toMatch(/^#VALUE! change: allowed II-I, fusion/);
+  });
+
   it('know condensing and the British spellings, and say what a beginning stands for', () => {
     expect(cell(latent, ['water', 'condensing', 60])).toBe(cell(latent, ['water', 'condensation', 60]));
     expect(cell(latent, ['water', 'vapourisation', 60])).toBe(cell(latent, ['water', 'vaporization', 60]));
