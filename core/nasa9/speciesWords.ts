@@ -14,7 +14,7 @@ export function speciesSource(species: Pick<Nasa9Species, 'name' | 'comment'>): 
     .replace(/\s+/g, ' ')
     .replace(/\s?\bpt(\d) p?(\d)/g, ', part $1 p. $2')
     .replace(/\s?\bp{1,2}(?=\d)/g, ', p. ')
-    .replace(/([a-z])[.,](?=[A-Z])/g, '$1. ')
+    .replace(/([a-z)])([.,])(?=[A-Z])/g, '$1$2 ')
     .replace(/,(?=[a-z])/g, ', ')
     .replace(/\blambda trans\b\.?/gi, 'lambda transition')
     .replace(/\s+,/g, ',')

@@ -46,7 +46,12 @@ export function heatSteps(
   const ladder = substance.ladder(pressurePa);
   const [a, b] = endsOf(substance, from, to, pressurePa, policy);
   const steps = staysInPhase(a, b) ? alongPhase(a, b) : between(joined(a, b, ladder), joined(b, a, ladder), ladder);
-  return { steps, heat: b.enthalpy - a.enthalpy, marks: [...a.marks, ...b.marks], from: a, to: b, ladder };
+  return { steps, heat: b.enthalpy - a.enthalpy, marks: distinct([...a.marks, ...b.marks]), from: a, to: b, ladder };
+}
+
+/** What holds for both ends is said once. */
+function distinct(marks: readonly Mark[]): readonly Mark[] {
+  return marks.filter(({ text }, i) => marks.findIndex((mark) => mark.text === text) === i);
 }
 
 /** Both ends of a path, an undecided one on the side of the other. */

@@ -34,6 +34,13 @@ describe('paths beyond what is known', () => {
     expect(table.at(-1)?.[0]).toBe('extended: outside the published range of gas ethanol');
   });
 
+  it('say once what holds for both ends', () => {
+    expect(cell(heat, ['water', 99.97, 99.95], 'answer=status')).toMatch(/K from vaporization.*; near-transition: /);
+    expect(cell(heat, ['water', 99.97, 99.97], 'answer=status')).toBe(
+      'near-transition: 0.00429585 K from vaporization: taken as liquid; name the phase to be sure',
+    );
+  });
+
   it('name the missing piece and the place in the workbook’s own unit, once', () => {
     expect(fault(heat, ['ethanol', -150, 20])).toBe(
       '#N/A heat capacity of solid ethanol: not in the catalogue, so no path leads below -114.1 degC',

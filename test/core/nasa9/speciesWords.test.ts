@@ -23,6 +23,9 @@ describe('species of the data set in words', () => {
     expect(words('Fe(a)', 'Alpha. Below Lambda trans. Chase,1998 p1221.')).toBe(
       'Fe(a): Alpha. Below lambda transition Chase 1998, p. 1221',
     );
+    expect(words('Na', 'Hf:Cox,1989. Martin,W.C.,1981. Gordon,1999.')).toBe(
+      'Na: enthalpy of formation: Cox 1989. Martin, W.C. 1981. Gordon 1999',
+    );
     expect(words('CaF2(a)', 'CrII,cubic.Gurvich,1996a pt1 p461 pt2 p361.')).toBe(
       'CaF2(a): CrII, cubic. Gurvich 1996a, part 1 p. 461, part 2 p. 361',
     );
