@@ -7,14 +7,17 @@ export interface Hit {
   readonly by?: string;
 }
 
-/** How well a word answers the text: whole, from its beginning, from the beginning of a later part, somewhere inside. */
+/**
+ * How well a word answers the text: whole 0, from its beginning 2, from the beginning of a later part 4, somewhere
+ * inside 6. The odd ranks between are those of words that are not the name.
+ */
 function rankOf(text: string, word: string): number {
   const plain = plainName(word);
   if (plain === text) return 0;
-  if (plain.startsWith(text)) return 1;
+  if (plain.startsWith(text)) return 2;
   const parts = word.split(/[\s\-_,()]+/).slice(1);
-  if (parts.some((part) => part.toLowerCase().startsWith(text))) return 2;
-  return plain.includes(text) ? 3 : Infinity;
+  if (parts.some((part) => part.toLowerCase().startsWith(text))) return 4;
+  return plain.includes(text) ? 6 : Infinity;
 }
 
 interface Ranked {
@@ -31,7 +34,7 @@ function best(text: string, entry: CatalogueEntry): Ranked {
     ...entry.synonyms.map((word) => [word, word] as const),
   ];
   for (const [word, by] of others) {
-    const other = word === '' ? Infinity : rankOf(text, word);
+    const other = word === '' ? Infinity : rankOf(text, word) + 1;
     if (other >= rank) continue;
     rank = other;
     hit = { entry, by };
@@ -40,8 +43,8 @@ function best(text: string, entry: CatalogueEntry): Ranked {
 }
 
 /**
- * Entries whose name, formula, CAS number or a synonym holds the text, the nearest answers first; every entry for a
- * blank text. Nothing is built: only the words of the entries are read.
+ * Entries whose name, formula, CAS number or a synonym holds the text, the nearest answers first, names before
+ * other words that answer as well; every entry for a blank text. Nothing is built: only the words of the entries are read.
  */
 export function searchEntries(entries: readonly CatalogueEntry[], typed: string): Hit[] {
   const text = plainName(typed.trim());

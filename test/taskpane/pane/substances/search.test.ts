@@ -35,6 +35,15 @@ describe('searchEntries', () => {
     expect(names('nitrate')).toEqual(['sodium nitrate']);
   });
 
+  it('puts names before synonyms that begin alike, and those before words inside', () => {
+    const found = searchEntries(catalogue.entries, 'ethan').map(({ entry: { name } }) => name);
+    // Acetic acid is also called ethanoic acid; methanol only holds the letters.
+    const places = ['ethanol', 'acetic acid', 'methanol'].map((name) => found.indexOf(name));
+    expect(places[0]).toBe(0);
+    expect(places).toEqual(places.toSorted((a, b) => a - b));
+    expect(new Set(places).size).toBe(3);
+  });
+
   it.each([
     ['C2H6', ['ethane', 'ethanol'], 'formula C2H6'],
     ['67-56', ['methanol'], 'CAS 67-56-1'],
