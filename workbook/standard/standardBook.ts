@@ -34,7 +34,7 @@ export function standardBook(options: StandardBookOptions = {}): Book {
       unitsSheet(settings),
       latentHeatSheet(settings),
       deltaCpSheet(),
-      substancesSheet(),
+      substancesSheet(settings),
       checksSheet(),
       listsSheet(),
     ],

@@ -21,6 +21,7 @@ export const standardStyles = {
   columnHead: { bold: true, color: INK, fill: FOAM, under: SHORE, wrap: true, align: 'right', valign: 'center' },
   label: { color: INK, valign: 'center' },
   input: { color: AMBER, fill: SAND, box: SAND_LINE, valign: 'center' },
+  limit: { color: AMBER, fill: SAND, box: SAND_LINE, align: 'center', valign: 'center' },
   answer: { color: KELP, under: FOAM, align: 'right', valign: 'center' },
   data: { color: INK, under: FOAM, align: 'right', valign: 'center' },
   text: { color: INK, wrap: true, valign: 'top' },

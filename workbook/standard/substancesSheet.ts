@@ -1,11 +1,12 @@
 import { HOUSE_PROPERTIES } from '../../core/house/houseProperty';
 import { HOUSE_HEADS } from '../../core/house/houseRow';
 import { HOUSE_FORMS } from '../../core/house/readForm';
+import type { Settings } from '../../functions/settings/settingsType';
 import type { BookCell, BookName, BookSheet } from '../book';
 import { emptySheet } from '../emptySheet';
 import { choiceSource } from './listsSheet';
 import { put, putFormula } from './place';
-import { UNITS_NAME } from './unitHead';
+import { UNITS_NAME, unitInForce } from './unitHead';
 
 /** The block of the team's own substances, by its name in the workbook. */
 export const SUBSTANCES_NAME = 'Latentry_substances';
@@ -47,10 +48,11 @@ const ROWS: readonly (readonly (string | number | null)[])[] = [
   ['kelp wax', 'liquid heat capacity', 'polynomial in degC', '2.05; 0.0021', 'kJ/(kg K)', 58, 110, DEMO, 'A'],
 ];
 
+/** Beside the names, which stay in view: the words go with the columns that they speak of. */
 const HOW: readonly string[] = [
   'One property a row. A name that stands here works in every function, beside the built-in substances.',
   'Numbers of a polynomial or a table are parted by semicolons: 2.05; 0.0021 or 10:1.92; 30:2.10. Equations take temperatures in K, tables and ranges in °C, unless a cell says another unit.',
-  'A row that can’t be read says so in the answers that need it; all others go on working. The side pane lists what could not be read.',
+  'A row that can’t be read is named in the answers that need it and in the side pane; all others work on.',
 ];
 
 const PROPERTY_PROMPT =
@@ -58,29 +60,26 @@ const PROPERTY_PROMPT =
 const FORM_PROMPT =
   'Blank for a single value. "polynomial in degC" or "table in K" say the unit of temperatures among the coefficients.';
 
-/** The team's own substances: header, room for rows, a demo of two invented materials and two answers from them. */
-export function substancesSheet(): BookSheet {
+/**
+ * The team's own substances: header, room for rows, a demo of two invented materials and two answers from them.
+ *
+ * @param settings - those on the Units sheet, for the unit that is shown before the first calculation
+ */
+export function substancesSheet(settings: Settings): BookSheet {
+  const heat = unitInForce('heat', settings);
   const cells: Record<string, BookCell> = {};
-  const rowHeights: Record<string, number> = { '1': 34, '2': 20, '3': 34, '4': 20, [String(HEAD)]: 34 };
+  const rowHeights: Record<string, number> = { '1': 34, '2': 20, '3': 34, '4': 34, [String(HEAD)]: 34 };
   put(cells, 'A1', 'Substances', 'title');
-  HOW.forEach((text, i) => put(cells, `A${2 + i}`, text, 'subtitle'));
-  answer(
-    cells,
-    5,
-    'Heat to warm the concentrate from 10 to 60 °C, per amount',
-    `HEAT("${CONCENTRATE}","10 degC","60 degC",,`,
-  );
-  answer(
-    cells,
-    6,
-    'Heat to melt kelp wax that is at 20 °C, per amount',
-    'HEAT("kelp wax","20 degC","melting liquid",,',
-  );
+  HOW.forEach((text, i) => put(cells, `B${2 + i}`, text, 'subtitle'));
+  answer(cells, 5, 'Heat to warm the concentrate from 10 to 60 °C', `HEAT("${CONCENTRATE}","10 degC","60 degC",,`);
+  answer(cells, 6, 'Heat to melt kelp wax that is at 20 °C', 'HEAT("kelp wax","20 degC","melting liquid",,');
+  for (const row of [5, 6]) putFormula(cells, `E${row}`, heat.formula, 'label', heat.shown);
   HOUSE_HEADS.forEach((head, i) => put(cells, `${letter(i)}${HEAD}`, head, 'heading'));
   for (let row = HEAD + 1; row <= LAST; row++) {
     HOUSE_HEADS.forEach((_, i) => {
       const value = ROWS[row - HEAD - 1]?.[i] ?? null;
-      put(cells, `${letter(i)}${row}`, value, 'input', RANGE_COLUMNS.includes(i) ? undefined : '@');
+      const range = RANGE_COLUMNS.includes(i);
+      put(cells, `${letter(i)}${row}`, value, range ? 'limit' : 'input', range ? undefined : '@');
     });
   }
   return {
@@ -88,7 +87,7 @@ export function substancesSheet(): BookSheet {
     cells,
     columnWidths: { A: 22, B: 24, C: 22, D: 54, E: 16, F: 14, G: 14, H: 36, I: 12 },
     rowHeights,
-    merges: ['A2:I2', 'A3:I3', 'A4:I4', 'A5:C5', 'A6:C6'],
+    merges: ['B2:D2', 'B3:D3', 'B4:D4', 'B5:C5', 'B6:C6'],
     lists: [
       {
         range: `B${HEAD + 1}:B${LAST}`,
@@ -119,7 +118,7 @@ function letter(column: number): string {
 }
 
 function answer(cells: Record<string, BookCell>, row: number, words: string, call: string): void {
-  put(cells, `A${row}`, words, 'label');
+  put(cells, `B${row}`, words, 'label');
   putFormula(cells, `D${row}`, `=LATENTRY.${call}${UNITS_NAME},${SUBSTANCES_NAME})`, 'answer', null, '#,##0.00');
 }
 

@@ -15,9 +15,19 @@ export const UNITS_NAME = 'Latentry_units';
  * unitHead('Latent heat', 'heat', settings).formula // => '="Latent heat, "&INDEX(Latentry_units,4,2)'
  */
 export function unitHead(words: string, key: string, settings: Settings): { formula: string; shown: string } {
+  const unit = unitInForce(key, settings);
+  return { formula: `="${words}, "&${unit.formula.slice(1)}`, shown: `${words}, ${unit.shown}` };
+}
+
+/**
+ * The unit in force alone, for the cell beside an answer.
+ *
+ * @param key - of the setting, as `heat`
+ * @param settings - those on the Units sheet
+ * @example
+ * unitInForce('heat', settings).formula // => '=INDEX(Latentry_units,4,2)'
+ */
+export function unitInForce(key: string, settings: Settings): { formula: string; shown: string } {
   const row = SETTINGS.findIndex((setting) => setting.key === key);
-  return {
-    formula: `="${words}, "&INDEX(${UNITS_NAME},${row + 1},2)`,
-    shown: `${words}, ${settingsRows(settings)[row]?.[1] ?? ''}`,
-  };
+  return { formula: `=INDEX(${UNITS_NAME},${row + 1},2)`, shown: settingsRows(settings)[row]?.[1] ?? '' };
 }
