@@ -80,6 +80,63 @@ describe('the local page', () => {
     await expect.poll(() => readCell(page, 'Latent heat', 'C12'), { timeout: 20_000 }).toBe(before);
   });
 
+  it('lets formulas find the blocks that they name when a sheet is renamed or a row is inserted above', async () => {
+    // Longer than 64 characters and shorter: the grid keeps parsed formulas in two ways.
+    await typeInto(
+      page,
+      'Latent heat',
+      'J40',
+      '=LATENTRY.LATENT("kelp wax","fusion",,Latentry_units,Latentry_substances)',
+    );
+    await typeInto(page, 'Latent heat', 'J41', '=INDEX(Latentry_substances,5,4)');
+    await page.evaluate(() => {
+      globalThis.LatentryPage!.grid.sheet('Substances')!.setName('Ours');
+      globalThis.LatentryPage!.grid.sheet('Units')!.setName('Our units');
+    });
+    await calculated(page);
+    await typeInto(page, 'Ours', 'D12', '190');
+    const both = () => readCells(page, 'Latent heat', 'J40:J41').then(({ values }) => values.flat().map(Number));
+    await expect.poll(both).toEqual([190, 190]);
+    await page.evaluate(() => void globalThis.LatentryPage!.grid.sheet('Ours')!.insertRows(3, 1));
+    await calculated(page);
+    await typeInto(page, 'Ours', 'D13', '200');
+    await expect.poll(both).toEqual([200, 200]);
+    expect(await readCell(page, 'Latent heat', 'C12')).toBeTypeOf('number');
+  });
+
+  it('says at the row of a substance why it can’t be used, and marks the cell', async () => {
+    await typeInto(page, 'Substances', 'D12', 'x180');
+    await select(page, 'Substances', 'A12');
+    const line = page.locator('#cell-status');
+    await expect
+      .poll(() => line.textContent())
+      .toMatch(/^Substances row 12 \(kelp wax, heat of fusion\), coefficients: /);
+    const mark = (row: number, column: number) =>
+      page.evaluate(
+        ([r, c]) => globalThis.LatentryPage!.grid.sheet('Substances')!.getSheet().getCell(r, c)?.markers?.tr?.color,
+        [row, column] as const,
+      );
+    expect(await mark(11, 3)).toBe('#c0392b');
+    // A form that the list of usual ones doesn't hold is none the worse for it.
+    expect(await mark(13, 2)).toBeUndefined();
+    await typeInto(page, 'Substances', 'D12', '180');
+    await select(page, 'Substances', 'A12');
+    await expect.poll(() => line.textContent()).toBe('');
+    expect(await mark(11, 3)).toBeUndefined();
+  });
+
+  it('shows spilled numbers as wide as their columns', async () => {
+    await typeInto(page, 'Latent heat', 'J40', '=LATENTRY.HEATSTEPS("iron",20,1600)');
+    const shown = await page.evaluate(() => {
+      const sheet = globalThis.LatentryPage!.grid.sheet('Latent heat')!.getSheet();
+      return [12, 13].map((column) => String(sheet.getCell(40, column)?.v));
+    });
+    // A column of the usual width has room for ten characters.
+    for (const text of shown) expect(text).toMatch(/^[\d.]{4,10}$/);
+    const kept = (await readCells(page, 'Latent heat', 'M41')).values[0]?.[0];
+    expect(Math.abs(Number(kept) - Number(shown[0]))).toBeGreaterThan(0);
+  });
+
   it('draws a chart that follows its cells and outlives a reload', async () => {
     const cells = (address: string) => ({ sheet: 'Latent heat', address });
     await page.evaluate(

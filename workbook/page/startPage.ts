@@ -11,6 +11,7 @@ import { showHoverWords } from './cell/showHoverWords';
 import { openGrid, type Grid } from './grid/openGrid';
 import { autoHeights } from './grid/autoHeights';
 import { quietLists } from './grid/quietLists';
+import { showFaultMarks } from './grid/showFaultMarks';
 import { showFittedNumbers } from './grid/showFittedNumbers';
 import { showNoteMarks } from './grid/showNoteMarks';
 import { gridHost } from './gridHost';
@@ -41,6 +42,7 @@ export async function startPage(elements: PageElements, standard: () => Book): P
   showCellLine(grid, list);
   showHoverWords(grid, list);
   showNoteMarks(grid);
+  showFaultMarks(grid);
   showFittedNumbers(grid);
   quietLists(grid.injector);
   askWhileTyping(grid.injector);

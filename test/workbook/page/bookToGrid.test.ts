@@ -6,7 +6,7 @@ import { bookToGrid } from '../../../workbook/page/bookToGrid';
 import { cellValue, gridCell } from '../../../workbook/page/grid/cellValue';
 import { fitNumber } from '../../../workbook/page/grid/fitNumber';
 import { bookStyle, gridStyle } from '../../../workbook/page/grid/gridStyle';
-import { bookLists, listRule } from '../../../workbook/page/grid/listRule';
+import { bookLists, isOpen, listRule } from '../../../workbook/page/grid/listRule';
 import { charactersOfPixels, pixelsOfCharacters } from '../../../workbook/page/grid/measures';
 import { addressOf } from '../../../workbook/page/grid/rangeOf';
 import { styleKeys } from '../../../workbook/page/grid/styleKeys';
@@ -59,6 +59,15 @@ describe('lists of choices', () => {
   it('keeps choices, also those that hold a comma or a quote', () => {
     expect(back(['kJ/kg', 'J/g'])).toEqual([{ range: 'B4:B6', values: ['kJ/kg', 'J/g'] }]);
     expect(back(['.', ',', 'a "b"'])).toEqual([{ range: 'B4:B6', values: ['.', ',', 'a "b"'] }]);
+  });
+});
+
+describe('lists of usual choices', () => {
+  it('stay open to other entries in the grid and back', () => {
+    const rule = listRule({ range: 'C9:C20', values: ['table', 'polynomial'], open: true }, 'x');
+    expect(rule && isOpen(rule)).toBe(true);
+    expect(bookLists(rule!, addressOf)).toEqual([{ range: 'C9:C20', values: ['table', 'polynomial'], open: true }]);
+    expect(isOpen(listRule({ range: 'B4', values: ['kJ', 'J'] }, 'y')!)).toBe(false);
   });
 });
 

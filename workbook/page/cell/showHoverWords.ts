@@ -1,4 +1,5 @@
 import { CellAlertManagerService, CellAlertType, HoverManagerService } from '@univerjs/sheets-ui';
+import { createElement } from 'react';
 import { debounceTime } from 'rxjs';
 import type { FunctionList } from '../../grid/functionList';
 import type { Grid } from '../grid/openGrid';
@@ -18,12 +19,12 @@ export function showHoverWords(grid: Grid, list: FunctionList): void {
     .subscribe((hovered) => {
       if (!hovered || hovered.location.unitId !== grid.workbook().getId()) return;
       const { unitId, subUnitId, row, col } = hovered.location;
-      const { tone, text } = cellInfo(grid, list, subUnitId, row, col);
+      const { tone, text, title } = cellInfo(grid, list, subUnitId, row, col);
       if (tone === 'plain') return;
       alerts.showAlert({
         type: tone === 'error' ? CellAlertType.ERROR : CellAlertType.INFO,
-        title: tone === 'error' ? 'No value here' : 'Note',
-        message: text,
+        title: title ?? (tone === 'error' ? 'No value here' : 'Note'),
+        message: createElement('span', { className: 'cell-words' }, text),
         location: { unitId, subUnitId, row, col },
         width: 300,
         height: 74,

@@ -3,7 +3,10 @@ import type { ISheetDataValidationRule } from '@univerjs/core';
 import type { BookList } from '../../book';
 import { rangeOf } from './rangeOf';
 
-/** Choices of a cell as a rule of the grid. It warns and doesn't block: a damaged setting is answered in words. */
+/**
+ * Choices of a cell as a rule of the grid. It warns and doesn't block: a damaged setting is answered in words. Where the
+ * choices are usual ones only, the rule informs.
+ */
 export function listRule(list: BookList, uid: string): ISheetDataValidationRule | null {
   const range = rangeOf(list.range);
   if (range === null) return null;
@@ -12,7 +15,7 @@ export function listRule(list: BookList, uid: string): ISheetDataValidationRule 
     type: DataValidationType.LIST,
     ranges: [range],
     formula1: choices(list),
-    errorStyle: DataValidationErrorStyle.WARNING,
+    errorStyle: list.open === true ? DataValidationErrorStyle.INFO : DataValidationErrorStyle.WARNING,
     renderMode: DataValidationRenderMode.ARROW,
     allowBlank: true,
     ...(list.prompt === undefined ? {} : { showInputMessage: true, prompt: list.prompt }),
@@ -33,7 +36,13 @@ export function bookLists(rule: ISheetDataValidationRule, address: (range: IRang
   const formula = rule.formula1 ?? '';
   const prompt = rule.prompt === undefined || rule.prompt === '' ? {} : { prompt: rule.prompt };
   const what = choicesOf(formula);
-  return rule.ranges.map((range) => ({ range: address(range), ...what, ...prompt }));
+  const open = isOpen(rule) ? { open: true } : {};
+  return rule.ranges.map((range) => ({ range: address(range), ...what, ...prompt, ...open }));
+}
+
+/** True where a rule only offers choices, and takes other entries too. */
+export function isOpen({ errorStyle }: Pick<ISheetDataValidationRule, 'errorStyle'>): boolean {
+  return errorStyle === DataValidationErrorStyle.INFO;
 }
 
 function choicesOf(formula: string): Pick<BookList, 'values' | 'source'> {

@@ -14,12 +14,14 @@ export function showFittedNumbers(grid: Grid): void {
   grid.injector.get(SheetInterceptorService).intercept(INTERCEPTOR_POINT.CELL_CONTENT, {
     id: 'latentry-fitted-numbers',
     effect: InterceptorEffectEnum.Value,
-    // Outermost: it sees what every other rule made of the cell.
-    priority: 1000,
+    // Rules run from high to low: after that which fills in spilled values (100), before the number formats (10).
+    priority: 50,
     handler: (cell, location, next) => {
       const shown = next(cell);
       if (!shown || typeof shown.v !== 'number' || shown.t !== CellValueType.NUMBER) return shown;
-      const calculated = Boolean(shown.f ?? shown.si) || shown.isInArrayFormulaRange === true;
+      const kept = location.worksheet.getCellRaw(location.row, location.col);
+      // A cell that shows a number and keeps none is filled by the formula of another.
+      const calculated = Boolean(shown.f ?? shown.si) || kept?.v === undefined || kept.v === null;
       const pattern = location.workbook.getStyles().getStyleByCell(shown)?.n?.pattern;
       if (!calculated || (pattern !== undefined && pattern !== 'General')) return shown;
       const width = location.worksheet.getColumnWidth(location.col);
