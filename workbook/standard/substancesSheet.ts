@@ -52,7 +52,7 @@ const ROWS: readonly (readonly (string | number | null)[])[] = [
 const HOW: readonly string[] = [
   'One property a row. A name that stands here works in every function, beside the built-in substances.',
   'Numbers of a polynomial or a table are parted by semicolons: 2.05; 0.0021 or 10:1.92; 30:2.10. Equations take temperatures in K, tables and ranges in °C, unless a cell says another unit.',
-  'A row that can’t be read is named in the answers that need it and in the side pane; all others work on.',
+  'A row that can’t be read is named in the side pane and in the answers that need it.',
 ];
 
 const PROPERTY_PROMPT =

@@ -23,7 +23,17 @@ export function coefficientsHint(form: string): string {
   }
 }
 
-/** Which unit a property takes. */
+const WITHOUT_UNIT = [
+  'composition',
+  'solid composition',
+  'acentric factor',
+  'formula',
+  'cas',
+  'synonym',
+  'replaces built-in',
+];
+
+/** Which unit a property takes; a word that is no property yet is not told that it has none. */
 export function unitHint(property: string): string {
   const plain = property.toLowerCase();
   if (/vapou?r pressure|sublimation pressure/.test(plain)) return 'Of pressure and temperature, as kPa; degC';
@@ -32,5 +42,5 @@ export function unitHint(property: string): string {
   if (/temperature/.test(plain)) return 'As degC';
   if (/pressure/.test(plain)) return 'As kPa';
   if (plain === 'molar mass') return 'As g/mol';
-  return plain === '' ? 'As the property asks' : 'None';
+  return WITHOUT_UNIT.some((word) => plain.trim() === word) ? 'None' : 'As the property asks';
 }

@@ -78,12 +78,17 @@ export function onScale(si: number, { scale, offset }: Linear): number {
   return scale * si + offset;
 }
 
-/** The scale that a number of the core is shown on; `undefined` for units that have no setting. */
+/**
+ * The scale that a number of the core is shown on; `undefined` for units that have no setting. Only a material without a
+ * molar mass is given per kilogram, and its writer counts so.
+ */
 export function scaleFor(unit: string, writer: UnitWriter): Scale | undefined {
   switch (unit) {
     case 'J/mol':
+    case 'J/kg':
       return writer.heat;
     case 'J/(mol K)':
+    case 'J/(kg K)':
       return writer.heatCapacity;
     case 'Pa':
       return writer.pressure;

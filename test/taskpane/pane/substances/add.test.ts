@@ -62,5 +62,7 @@ describe('the hints of the form', () => {
     expect(unitHint('vapour pressure')).toContain('kPa; degC');
     expect(unitHint('heat of alpha-beta')).toBe('As kJ/kg');
     expect(unitHint('melting temperature')).toBe('As degC');
+    expect(unitHint('acentric factor')).toBe('None');
+    expect(unitHint('liquid heet')).toBe('As the property asks');
   });
 });

@@ -144,6 +144,8 @@ describe('unitWriter', () => {
     const writer = unitWriter(molar, NaN);
     expect([writer.heat.unit, writer.heatCapacity.unit]).toEqual(['kJ/kg', 'kJ/(kg K)']);
     expect(writeValue({ value: 100_000, unit: 'J/mol' }, writer).text).toBe('100');
+    expect(writeValue({ value: 180_000, unit: 'J/kg' }, writer)).toMatchObject({ text: '180', unit: 'kJ/kg' });
+    expect(writeValue({ value: 3455, unit: 'J/(kg K)' }, writer)).toMatchObject({ text: '3.455', unit: 'kJ/(kg K)' });
     const fusion = latentFacts(wax, at(80)).find(({ change }) => change === 'fusion')?.kinds[0];
     expect(fusion && formulaText(fusion.latent.ask, { ...formulaAt, units: writer.ownUnits })).toBe(
       '=LATENTRY.LATENT("wax two","fusion",25,Latentry_units,"heat=kJ/kg")',
