@@ -5,7 +5,14 @@ export interface Shown {
 }
 
 /** A true minus sign, and none before a zero. */
-const minus = (text: string) => text.replace(/^-(?=.*[1-9])/, '−').replace(/^-/, '');
+const minus = (text: string) =>
+  text
+    .replace(/^-(?=.*[1-9])/, '−')
+    .replace(/^-/, '')
+    .replace('e-', 'e−');
+
+/** Smaller numbers are written with a power of ten: nobody counts eight zeros. */
+const SMALL = 1e-4;
 
 /** Place of the last digit kept, as a power of ten: two significant digits of the uncertainty. */
 function lastPlace(uncertainty: number): number {
@@ -13,6 +20,10 @@ function lastPlace(uncertainty: number): number {
 }
 
 function atPlace(value: number, place: number): string {
+  if (place <= -6 && value !== 0 && Math.abs(value) < SMALL) {
+    const digits = Math.floor(Math.log10(Math.abs(value))) - place;
+    return value.toExponential(Math.min(12, Math.max(0, digits)));
+  }
   if (place < -12 || place > 6) return Number(value.toPrecision(6)).toString();
   if (place <= 0) return value.toFixed(-place);
   const step = 10 ** place;

@@ -10,6 +10,11 @@ describe('roundToUncertainty', () => {
     [1.23456, 0.0999, '1.23'],
     [0, 0.5, '0.00'],
     [-0.0004, 0.5, '0.00'],
+    [-0.00004, 0.5, '0.00'],
+    [2.9012e-9, 2.9e-10, '2.90e−9'],
+    [-2.9012e-9, 2.9e-10, '−2.90e−9'],
+    [2.9e-10, 2.9e-10, '2.9e−10'],
+    [0.00023456, 1e-6, '0.0002346'],
   ])('keeps two digits of the uncertainty: %d with %d', (value, uncertainty, text) => {
     expect(roundToUncertainty(value, uncertainty).text).toBe(text);
   });
