@@ -90,7 +90,7 @@ function atPressure(phase: Phase, pressurePa: number): Curve {
 
 /** Outside these the heat capacity of supercooled or superheated liquid bends too sharply for pieces of even width. */
 const SMOOTH: Readonly<Record<'liquid' | 'gas', readonly [number, number]>> = {
-  liquid: [255, 560],
+  liquid: [245, 580],
   gas: [COLDEST_VAPOUR_K, HOTTEST_FLUID_K],
 };
 

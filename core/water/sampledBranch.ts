@@ -1,7 +1,7 @@
 import { piecewise, type ChebyshevPieces } from './chebyshevPieces';
 
-const PIECES = 32;
-const TERMS = 18;
+const PIECES = 48;
+const TERMS = 20;
 
 /**
  * A smooth function as Chebyshev pieces through its own values, made at the first use: for functions that are asked
