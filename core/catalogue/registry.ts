@@ -1,6 +1,6 @@
-import { nearest } from '../nearest';
 import { Problem } from '../problem';
 import type { CatalogueEntry, Substance } from '../substance';
+import { meantBy, type Meant } from './meantBy';
 import { plainName } from './plainName';
 import { refused } from './refused';
 
@@ -41,7 +41,7 @@ export function makeRegistry(entries: readonly CatalogueEntry[], first: readonly
     find: (text) => {
       const candidates = found(text);
       const only = candidates[0];
-      if (only === undefined) throw unknown(text, all, [...ahead.keys(), ...behind.keys()]);
+      if (only === undefined) throw unknown(text, all);
       if (candidates.length === 1) return only.make();
       throw new Problem({
         code: 'argument',
@@ -69,21 +69,13 @@ function index(entries: readonly CatalogueEntry[]): Map<string, CatalogueEntry[]
   return byWord;
 }
 
-/** Substances are often a few letters apart: helium is not kalium, nor propylene a xylene. */
-const SLIP_PART = 1 / 4;
-
-/** Between two letters a slip is as likely as another element. */
-const SHORTEST = 3;
-
 /** How many names a message lists before it says how many more there are. */
 const LISTED = 6;
 
-function unknown(text: string, entries: readonly CatalogueEntry[], words: readonly string[]): Problem {
+function unknown(text: string, entries: readonly CatalogueEntry[]): Problem {
   const names = entries.map(({ name }) => name);
   const more = names.length > LISTED ? ` and ${names.length - LISTED} more (the pane lists them)` : '';
-  const plain = plainName(text);
-  const close = plain.length < SHORTEST ? undefined : nearest(plain, words, SLIP_PART);
-  const meant = close === undefined ? undefined : nameOfWord(close, entries);
+  const meant = nameWithWord(meantBy(entries, text));
   return refused(
     'substance',
     text,
@@ -94,14 +86,8 @@ function unknown(text: string, entries: readonly CatalogueEntry[], words: readon
 }
 
 /** A name, with the synonym that was met in front of it: `kalium (potassium)`. */
-function nameOfWord(word: string, entries: readonly CatalogueEntry[]): string | undefined {
-  for (const entry of entries) {
-    const met = wordsOf(entry).find((one) => plainName(one) === word);
-    if (met !== undefined) return plainName(entry.name) === word ? entry.name : `${met} (${entry.name})`;
-  }
-  return undefined;
-}
-
-function wordsOf({ name, formula, cas, synonyms }: CatalogueEntry): string[] {
-  return [name, formula, cas, ...synonyms];
+function nameWithWord(meant: Meant | undefined): string | undefined {
+  if (meant === undefined) return undefined;
+  const { entry, word } = meant;
+  return plainName(entry.name) === plainName(word) ? entry.name : `${word} (${entry.name})`;
 }
