@@ -1,5 +1,5 @@
 import type { LatentKind } from '../answer';
-import { remember } from '../water/remember';
+import { remember } from '../remember';
 import { Problem } from '../problem';
 import type { Change, Curve, Substance } from '../substance';
 import { missing, readable } from './given';

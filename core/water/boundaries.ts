@@ -2,7 +2,7 @@ import { HIGHEST_ICE_IH_PRESSURE_PA, highPressureMeltingTemperature } from './ic
 import { liquidVapourTemperature, sublimationTemperature } from './lineTemperature';
 import { emptyMeltingState, solveMeltingTemperature } from './meltingState';
 import { TRIPLE_PRESSURE_PA } from './ranges';
-import { remember } from './remember';
+import { remember } from '../remember';
 
 const melting = emptyMeltingState();
 

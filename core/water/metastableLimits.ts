@@ -4,7 +4,7 @@ import { emptyFluidState } from './fluidState';
 import { sublimationAt } from './iceEquilibriumLines';
 import { liquidVapourTemperature } from './lineTemperature';
 import { COLDEST_VAPOUR_K, NEAREST_TO_CRITICAL_K, TRIPLE_K } from './ranges';
-import { remember } from './remember';
+import { remember } from '../remember';
 import { saturationAt } from './saturationLine';
 
 const state = emptyFluidState();

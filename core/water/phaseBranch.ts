@@ -19,7 +19,7 @@ import {
   TRIPLE_PRESSURE_PA,
 } from './ranges';
 import { CRITICAL_PRESSURE_PA } from './saturationAuxiliary';
-import { remember } from './remember';
+import { remember } from '../remember';
 import { R10_06, R6_95 } from './sources';
 import { sublimationTemperature } from './lineTemperature';
 

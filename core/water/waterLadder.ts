@@ -15,7 +15,7 @@ import {
   NEAREST_TO_CRITICAL_K,
   TRIPLE_PRESSURE_PA,
 } from './ranges';
-import { remember } from './remember';
+import { remember } from '../remember';
 import { liquidVapourPressure } from './saturationLine';
 import { R10_06, R14_08, R6_95 } from './sources';
 

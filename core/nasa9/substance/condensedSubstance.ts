@@ -1,7 +1,7 @@
 import type { Answer, LatentKind } from '../../answer';
 import { evaluate } from '../../evaluate';
 import type { Change, Substance } from '../../substance';
-import { remember } from '../../water/remember';
+import { remember } from '../../remember';
 import { condensedConstants, molarMassOf } from './constants';
 import { condensedLadder } from './ladder';
 import { coexistenceTermCurve, latentCurve } from './latentCurves';
