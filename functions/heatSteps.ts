@@ -1,3 +1,4 @@
+import { STANDARD_ATMOSPHERE_PA } from '../core/atmosphere';
 import { heatSteps as pathSteps } from '../core/path/heatSteps';
 import { Problem } from '../core/problem';
 import { fromMolar } from '../core/units/fromMolar';
@@ -5,7 +6,6 @@ import { answer } from './edge/answer';
 import { scalarOf, type Block } from './edge/block';
 import { CellFault, shown } from './edge/cell';
 import { substanceKey } from './edge/keys';
-import { STANDARD_ATMOSPHERE_PA } from './edge/pathPlan';
 import { quantityOf } from './edge/quantityOf';
 import { onScale } from './edge/scale';
 import type { BlockwiseSpec, Key, Table } from './edge/spec';

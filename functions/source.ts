@@ -1,3 +1,4 @@
+import { STANDARD_ATMOSPHERE_PA } from '../core/atmosphere';
 import type { Datum } from '../core/answer';
 import { findChange, findPhaseOf, plainName } from '../core/catalogue/find';
 import { Problem, shortNumber } from '../core/problem';
@@ -8,7 +9,6 @@ import { answer } from './edge/answer';
 import { writerFor } from './edge/cellError';
 import { constantOf, noSuchItem } from './edge/constantOf';
 import { kindOption, substanceKey, textKey } from './edge/keys';
-import { STANDARD_ATMOSPHERE_PA } from './edge/pathPlan';
 import type { CellwiseSpec } from './edge/spec';
 import type { Settings } from './settings/settings';
 

@@ -1,3 +1,4 @@
+import { STANDARD_ATMOSPHERE_PA } from '../atmosphere';
 import type { Answer } from '../answer';
 import type { OutOfRange } from '../evaluate';
 import { GAS_CONSTANT } from '../kirchhoff/kirchhoff';
@@ -25,7 +26,6 @@ export interface BoilingMethod {
 }
 
 const PASCAL_PER_BAR = 1e5;
-const ATMOSPHERE_PA = 101325;
 
 /** Reduced boiling temperatures that the equations are used at; the benchmark's fluids lie in [0.56, 0.73]. Common practice, no source. */
 const LEAST_REDUCED = 0.5;
@@ -39,7 +39,7 @@ export function atBoilingPoint(
 ): Answer {
   above('boiling temperature', boilingK, 0, 'K');
   above('critical temperature', criticalK, 0, 'K');
-  above('critical pressure', criticalPressurePa, ATMOSPHERE_PA, 'Pa');
+  above('critical pressure', criticalPressurePa, STANDARD_ATMOSPHERE_PA, 'Pa');
   const value = GAS_CONSTANT * boilingK * ratio(boilingK / criticalK, criticalPressurePa / PASCAL_PER_BAR);
   return estimated(
     {

@@ -2,7 +2,8 @@ import type { Mark } from '../answer';
 import { Problem, shortNumber } from '../problem';
 import type { Change, Curve, Phase } from '../substance';
 import { noSuchChange } from './coexistence';
-import { ATMOSPHERE_PA, STANDARD_PRESSURE_PA } from './constants';
+import { STANDARD_ATMOSPHERE_PA } from '../atmosphere';
+import { STANDARD_PRESSURE_PA } from './constants';
 import { fluidBranch, idealBranch, type FluidBranch } from './fluidBranch';
 import { fluidCurve } from './fluidCurve';
 import { NO_MARKS, solidMarks, unconfirmedMark } from './fluidMarks';
@@ -77,7 +78,9 @@ export function betweenPhases(
 
 /** One atmosphere; for melting at least the pressure of the triple point, below which there is no liquid. */
 function usualPressure({ numbers, line }: FluidParts, change: Change): number {
-  return change === 'fusion' ? Math.max(ATMOSPHERE_PA, line.pressure(numbers.meltingK)) : ATMOSPHERE_PA;
+  return change === 'fusion'
+    ? Math.max(STANDARD_ATMOSPHERE_PA, line.pressure(numbers.meltingK))
+    : STANDARD_ATMOSPHERE_PA;
 }
 
 /** Melting at its own temperature: what the cited enthalpy of fusion says. */

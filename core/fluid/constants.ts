@@ -3,6 +3,3 @@ export const MOLAR_GAS_CONSTANT = 8.314462618;
 
 /** Pressure of the standard state, Pa. */
 export const STANDARD_PRESSURE_PA = 1e5;
-
-/** One standard atmosphere, Pa. */
-export const ATMOSPHERE_PA = 101325;

@@ -1,3 +1,4 @@
+import { STANDARD_ATMOSPHERE_PA } from '../atmosphere';
 import type { LatentKind, Mark } from '../answer';
 import { Problem, shortNumber } from '../problem';
 import type { Change, Curve, Phase } from '../substance';
@@ -7,8 +8,6 @@ import { IDEAL_GAS, joined, NO_MARKS } from './marks';
 import { heatKey, usualKind, type HeatCapacityData, type HeatData, type MaterialData } from './materialData';
 import type { MaterialLadder, MaterialRung } from './materialLadder';
 import { formsOf, heatCapacityOf } from './stations';
-
-export const ATMOSPHERE_PA = 101325;
 
 /** What a change is asked for: the heat, or its slope with temperature. */
 export type Answered = 'latent' | 'slope';
@@ -32,7 +31,7 @@ export function latentCurve(
   change: Change,
   kind: LatentKind,
   answered: Answered,
-  pressurePa = ATMOSPHERE_PA,
+  pressurePa = STANDARD_ATMOSPHERE_PA,
 ): Curve {
   const { data } = around;
   const given = data.heats.get(heatKey(change, kind));
@@ -60,7 +59,7 @@ export function latentCurve(
 }
 
 function pressureOf(data: MaterialData, change: Change): number {
-  return readable(data.transitions.get(change))?.pressurePa ?? ATMOSPHERE_PA;
+  return readable(data.transitions.get(change))?.pressurePa ?? STANDARD_ATMOSPHERE_PA;
 }
 
 interface Parts {

@@ -1,3 +1,4 @@
+import { STANDARD_ATMOSPHERE_PA } from '../atmosphere';
 import type { LatentKind } from '../answer';
 import { remember } from '../remember';
 import { Problem } from '../problem';
@@ -5,7 +6,7 @@ import type { Change, Curve, Substance } from '../substance';
 import { missing, readable } from './given';
 import { coexistenceTermCurve } from './coexistenceTerm';
 import { defaultKind, disagreementOf } from './disagreementOf';
-import { ATMOSPHERE_PA, latentCurve, type Around, type Answered } from './latentCurves';
+import { latentCurve, type Around, type Answered } from './latentCurves';
 import { heatKey, type MaterialData } from './materialData';
 import { materialLadder } from './materialLadder';
 import { materialEnthalpy, materialHeatCapacity } from './phaseCurves';
@@ -99,7 +100,7 @@ function changesOf(data: MaterialData): readonly Change[] {
 
 function referenceOf(around: Around): string {
   try {
-    return `${around.ladder(ATMOSPHERE_PA).reference}: h = 0`;
+    return `${around.ladder(STANDARD_ATMOSPHERE_PA).reference}: h = 0`;
   } catch (thrown) {
     if (thrown instanceof Problem) return 'no path at one atmosphere';
     throw thrown;

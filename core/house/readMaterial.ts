@@ -1,3 +1,4 @@
+import { STANDARD_ATMOSPHERE_PA } from '../atmosphere';
 import type { Datum } from '../answer';
 import { Problem, shortNumber } from '../problem';
 import type { Decimal } from '../units/parseNumber';
@@ -19,8 +20,6 @@ import { readComposedCapacity, readHeatCapacity } from './readHeatCapacity';
 import { readHeat } from './readHeat';
 import { readPressure } from './readPressure';
 import { refusal, RowReader, type Beside } from './rowReader';
-
-const ATMOSPHERE_PA = 101325;
 
 /** A boiling temperature and a vapour pressure that are printed for one material agree within this, K. */
 const AGREEMENT_K = 1;
@@ -81,7 +80,7 @@ class MaterialReader {
     const line = this.pressures.get('liquid');
     const row = this.transitions.get('vaporization');
     if (line === undefined || line instanceof Problem || row instanceof Problem) return;
-    const pressurePa = row?.pressurePa ?? ATMOSPHERE_PA;
+    const pressurePa = row?.pressurePa ?? STANDARD_ATMOSPHERE_PA;
     if (!(pressurePa >= line.shape.at(line.fromK) && pressurePa <= line.shape.at(line.toK))) return;
     const temperatureK = line.shape.inverse(pressurePa);
     if (row === undefined) {
@@ -159,7 +158,7 @@ class MaterialReader {
   private transition(change: string, at: string | undefined, reader: RowReader): TransitionData {
     const temperatureK = reader.quantity('temperature');
     const pressurePa =
-      at === undefined ? ATMOSPHERE_PA : reader.cell('property', () => pressureInWords(at, this.decimal));
+      at === undefined ? STANDARD_ATMOSPHERE_PA : reader.cell('property', () => pressureInWords(at, this.decimal));
     const item = propertyWords({ is: 'transition', change, at });
     this.points.set(item, datum(item, temperatureK, 'K', reader));
     return { temperatureK, pressurePa };

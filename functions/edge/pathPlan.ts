@@ -1,9 +1,8 @@
+import { STANDARD_ATMOSPHERE_PA } from '../../core/atmosphere';
 import type { Answer } from '../../core/answer';
 import type { HeatPath } from '../../core/path/heatSteps';
 import type { Place } from '../../core/path/place';
 import type { Ladder } from '../../core/substance';
-
-export const STANDARD_ATMOSPHERE_PA = 101325;
 
 /** The pressure of an optional argument: one standard atmosphere when left out. */
 export function orAtmosphere(pressurePa: number): number {

@@ -1,3 +1,4 @@
+import { STANDARD_ATMOSPHERE_PA } from '../../core/atmosphere';
 import { refused } from '../../core/catalogue/find';
 import { valueAt } from '../../core/evaluate';
 import { Problem } from '../../core/problem';
@@ -10,7 +11,6 @@ import type { Unit } from '../../core/units/unit';
 import type { Block } from '../edge/block';
 import { CellFault, peel, shown, type Cell } from '../edge/cell';
 import { substanceKey } from '../edge/keys';
-import { STANDARD_ATMOSPHERE_PA } from '../edge/pathPlan';
 import { unitFor } from '../edge/unitFor';
 import type { Settings } from '../settings/settings';
 import { labelOf, labelWords, type Label } from './labels';

@@ -1,3 +1,4 @@
+import { STANDARD_ATMOSPHERE_PA } from '../../atmosphere';
 import type { Datum, Mark } from '../../answer';
 import { makeMaterial } from '../../house/makeMaterial';
 import { heatKey, type HeatCapacityData, type HeatData } from '../../house/materialData';
@@ -48,7 +49,7 @@ export function storageMaterial(record: StorageRecord): Substance {
     constants: constantsOf(record, known),
     solidChanges: [],
     heats: new Map([[heatKey('fusion', 'isobaric'), fusion(record, molarMass, known)]]),
-    transitions: new Map([['fusion', { temperatureK: melts, pressurePa: 101325 }]]),
+    transitions: new Map([['fusion', { temperatureK: melts, pressurePa: STANDARD_ATMOSPHERE_PA }]]),
     heatCapacities,
     pressures: new Map(),
     lack: () => 'not in the catalogue',

@@ -1,3 +1,4 @@
+import { STANDARD_ATMOSPHERE_PA } from '../../atmosphere';
 import type { LatentKind, Mark } from '../../answer';
 import { shortNumber } from '../../problem';
 import type { Change, Curve } from '../../substance';
@@ -23,7 +24,7 @@ export function latentCurve(
   change: Change,
   kind: LatentKind,
   asked: Asked,
-  pressurePa = 101325,
+  pressurePa = STANDARD_ATMOSPHERE_PA,
 ): Curve {
   const index = model.forms.findIndex(({ changeAbove, secondOrder }) => changeAbove === change && !secondOrder);
   const [cold, warm] = [model.forms[index], model.forms[index + 1]];

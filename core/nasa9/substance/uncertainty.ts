@@ -1,3 +1,4 @@
+import { STANDARD_ATMOSPHERE_PA } from '../../atmosphere';
 import type { Change } from '../../substance';
 import type { CondensedModel } from './model';
 
@@ -25,8 +26,8 @@ export function spreadOf({ record }: CondensedModel, change: Change, value: numb
 
 /** The computed boiling temperature at one atmosphere, K; absent where the line does not reach it. */
 export function boilingK({ overLiquid, overSolid, meltingK }: CondensedModel): number | undefined {
-  if (overLiquid === undefined || overLiquid.toPa < 101325) return undefined;
-  const t = overLiquid.temperatureK(101325);
+  if (overLiquid === undefined || overLiquid.toPa < STANDARD_ATMOSPHERE_PA) return undefined;
+  const t = overLiquid.temperatureK(STANDARD_ATMOSPHERE_PA);
   return meltingK !== undefined && t < meltingK && overSolid !== undefined ? undefined : t;
 }
 

@@ -1,3 +1,4 @@
+import { STANDARD_ATMOSPHERE_PA } from '../../../core/atmosphere';
 import { Badge, Field, Input } from '@fluentui/react-components';
 import { useMemo, useState } from 'react';
 import type { CatalogueEntry } from '../../../core/substance';
@@ -25,7 +26,7 @@ import { Constants } from './known/Constants';
 import { DisagreementLine } from './known/DisagreementLine';
 import { Known } from './known/Known';
 import { QuantityField } from './QuantityField';
-import { ATMOSPHERE_PA, useCard } from './useCard';
+import { useCard } from './useCard';
 import { problemWords } from './facts/problemWords';
 
 export interface SubstanceCardProps {
@@ -50,7 +51,11 @@ export function SubstanceCard({ host, entry, settings, withoutUnits }: Substance
     host,
     {
       temperature: onScale(temperatureK, temperature),
-      pressure: { value: onScale(pressurePa, pressure), text: pressureText, usual: pressurePa === ATMOSPHERE_PA },
+      pressure: {
+        value: onScale(pressurePa, pressure),
+        text: pressureText,
+        usual: pressurePa === STANDARD_ATMOSPHERE_PA,
+      },
       units: writer.ownUnits,
       house,
     },

@@ -1,3 +1,4 @@
+import { STANDARD_ATMOSPHERE_PA } from '../../../core/atmosphere';
 import { useMemo, useState } from 'react';
 import { evaluate } from '../../../core/evaluate';
 import { Problem, type ProblemData } from '../../../core/problem';
@@ -5,7 +6,6 @@ import type { Ladder, Substance } from '../../../core/substance';
 import { factOf } from './facts/fact';
 import { temperatureWindow, widened, type Window } from './diagram/temperatureWindow';
 
-export const ATMOSPHERE_PA = 101_325;
 const ROOM_K = 298.15;
 
 /** What a card shows: at which pressure and temperature, and which part of the diagram. */
@@ -60,7 +60,7 @@ const NOWHERE: Window = { fromK: 273.15, toK: 323.15 };
 
 /** The state of one card; another substance is another card. */
 export function useCard(substance: Substance): CardState {
-  const [pressurePa, setPressure] = useState(ATMOSPHERE_PA);
+  const [pressurePa, setPressure] = useState(STANDARD_ATMOSPHERE_PA);
   const [around, setAround] = useState<number>();
   const { ladder, problem } = useMemo(() => ladderAt(substance, pressurePa), [substance, pressurePa]);
   const base = useMemo(() => (ladder === undefined ? NOWHERE : temperatureWindow(ladder, around)), [ladder, around]);

@@ -1,10 +1,10 @@
+import { STANDARD_ATMOSPHERE_PA } from '../../../../core/atmosphere';
 import type { Answer } from '../../../../core/answer';
 import { Problem } from '../../../../core/problem';
 import type { Change, Substance } from '../../../../core/substance';
 import { factOf, type Fact } from '../facts/fact';
 
 const ROOM_K = 298.15;
-const ATMOSPHERE_PA = 101_325;
 
 /** How far latent heat and heat capacities disagree between 298.15 K and the boiling point. */
 export interface Disagreement {
@@ -48,7 +48,7 @@ export function disagreements(substance: Substance): Disagreement[] {
 
 function boilingPoint(substance: Substance): number | undefined {
   try {
-    return substance.ladder(ATMOSPHERE_PA).gaps.find(({ change }) => change === 'vaporization')?.temperatureK;
+    return substance.ladder(STANDARD_ATMOSPHERE_PA).gaps.find(({ change }) => change === 'vaporization')?.temperatureK;
   } catch (error) {
     if (error instanceof Problem) return undefined;
     throw error;
